@@ -1,0 +1,38 @@
+import { z } from 'zod';
+import { idSchema, timestampSchema } from './common';
+import { revisionSchema } from './revisions';
+
+/** POST /api/revisions/[revisionId]/share-links */
+export const shareLinkRequestSchema = z.object({
+  label: z.string().trim().max(120).default(''),
+  mayRemark: z.boolean().default(true),
+  expiresInDays: z.number().int().min(1).max(365).default(30),
+});
+export const shareLinkSchema = z.object({
+  id: idSchema,
+  revisionId: idSchema,
+  label: z.string(),
+  mayRemark: z.boolean(),
+  expiresAt: timestampSchema,
+  revokedAt: timestampSchema.nullable(),
+  lastOpenedAt: timestampSchema.nullable(),
+  openCount: z.number().int(),
+  createdAt: timestampSchema,
+});
+export type ShareLink = z.infer<typeof shareLinkSchema>;
+/** Only the answer to POST bears the address: the token itself is not kept. */
+export const newShareLinkSchema = shareLinkSchema.extend({ url: z.url() });
+export const shareLinkListSchema = z.object({ shareLinks: z.array(shareLinkSchema) });
+
+/**
+ * GET /api/share/[token]: the revision behind a link. Its pictures and maps: GET /api/share/[token]/picture?width=… and
+ * GET /api/share/[token]/maps/[mapId] and …/maps/[mapId]/tiles. An unknown, expired or revoked token answers 404.
+ */
+export const sharedRevisionSchema = z.object({
+  organisationName: z.string(),
+  customerName: z.string(),
+  mayRemark: z.boolean(),
+  expiresAt: timestampSchema,
+  revision: revisionSchema,
+});
+export type SharedRevision = z.infer<typeof sharedRevisionSchema>;
