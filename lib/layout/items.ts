@@ -19,6 +19,8 @@ const placed = {
   angleDeg: degrees,
   locked: z.boolean().default(false),
   hidden: z.boolean().default(false),
+  /** Place in the list of items and from bottom to top on the sheet; items without one come first. */
+  order: z.number().min(-1_000_000).max(1_000_000).optional(),
 };
 
 const outline = z.array(pointMm).min(3, 'An outline needs at least three corners.').max(200);
