@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { outlineFault } from './geometry';
 
 /**
  * The things that stand on a sheet. Millimetres and degrees, floor frame: x right, y away, z up, angles counter-clockwise.
@@ -23,7 +24,14 @@ const placed = {
   order: z.number().min(-1_000_000).max(1_000_000).optional(),
 };
 
-const outline = z.array(pointMm).min(3, 'An outline needs at least three corners.').max(200);
+const outline = z
+  .array(pointMm)
+  .min(3, 'An outline needs at least three corners.')
+  .max(200)
+  .superRefine((points, context) => {
+    const fault = points.length < 3 ? null : outlineFault(points);
+    if (fault !== null) context.addIssue({ code: 'custom', message: fault });
+  });
 const heightRange = {
   zFromMm: millimetres.default(0),
   zToMm: millimetres,
