@@ -7,14 +7,23 @@ const title = z
   .min(1, 'Give the project a name.')
   .max(120, 'A project name has at most 120 characters.');
 
+const nameOrNothing = z.string().trim().max(120, 'At most 120 characters.');
+
 /** POST /api/projects */
 export const projectRequestSchema = z.object({
   name: title,
-  customerName: z.string().trim().max(120).default(''),
-  siteName: z.string().trim().max(120).default(''),
+  customerName: nameOrNothing.default(''),
+  siteName: nameOrNothing.default(''),
 });
-/** PATCH /api/projects/[projectId] */
-export const projectChangeSchema = projectRequestSchema.partial().extend({ archived: z.boolean().optional() });
+export type ProjectRequest = z.infer<typeof projectRequestSchema>;
+/** PATCH /api/projects/[projectId]: what is left out stays; so no defaults here, they would empty it. */
+export const projectChangeSchema = z.object({
+  name: title.optional(),
+  customerName: nameOrNothing.optional(),
+  siteName: nameOrNothing.optional(),
+  archived: z.boolean().optional(),
+});
+export type ProjectChange = z.infer<typeof projectChangeSchema>;
 
 export const projectSchema = z.object({
   id: idSchema,
@@ -34,4 +43,5 @@ export const projectListQuerySchema = z.object({
   archived: z.enum(['true', 'false']).default('false'),
   search: z.string().trim().max(120).default(''),
 });
+export type ProjectListQuery = z.infer<typeof projectListQuerySchema>;
 export const projectListSchema = z.object({ projects: z.array(projectSchema) });
