@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { calibrationSchema } from '@/lib/layout/calibration';
+import { calibrationRequestSchema, calibrationSchema } from '@/lib/layout/calibration';
 import { idSchema, timestampSchema } from './common';
 
 export { calibrationRequestSchema } from '@/lib/layout/calibration';
@@ -22,6 +22,13 @@ export const floorPlanSchema = z.object({
 });
 export type FloorPlan = z.infer<typeof floorPlanSchema>;
 export const floorPlanListSchema = z.object({ floorPlans: z.array(floorPlanSchema) });
+
+/** PATCH /api/floor-plans/[floorPlanId] (GET and DELETE there too): rename, set to scale, or (null) take the scale off. */
+export const floorPlanChangeSchema = z.object({
+  name: z.string().trim().min(1, 'Give the floor plan a name.').max(120).optional(),
+  calibration: calibrationRequestSchema.nullable().optional(),
+});
+export type FloorPlanChange = z.infer<typeof floorPlanChangeSchema>;
 
 /** GET …/picture?width=1024 answers the smallest stored size at least that wide, else the largest. */
 export const pictureQuerySchema = z.object({ width: z.coerce.number().int().min(1).max(20_000).default(2048) });
