@@ -1,22 +1,8 @@
 import { z } from 'zod';
-import { mapSettingsSchema } from '@/lib/layout/map-settings';
-import { toolSchema } from '@/lib/layout/items';
 import { idSchema, timestampSchema } from './common';
 
-/**
- * POST /api/maps. A map is asked for in the robot's own base frame, so it stays the same wherever the base stands:
- * x out of the base, heights above the base plate. The answer is 200 with a finished map, or 202 with one that is under way.
- */
-export const mapQuestionSchema = z.object({
-  armId: idSchema,
-  tool: toolSchema.omit({ name: true, massKg: true }),
-  /** Height of the tool point above the base plate: tool height on the sheet less the riser. */
-  toolHeightMm: z.number().min(-20_000).max(20_000),
-  settings: mapSettingsSchema.pick({ tiltDeg: true, towards: true, rollDeg: true, wrist: true, stepMm: true }),
-  /** Heading in the base frame; only used with `towards: heading` and a tilt. */
-  headingDeg: z.number().min(-720).max(720).default(0),
-});
-export type MapQuestion = z.infer<typeof mapQuestionSchema>;
+/** POST /api/maps. The answer is 200 with a finished map, or 202 with one that is under way. */
+export { mapQuestionSchema, type MapQuestion } from '@/lib/layout/map-question-schema';
 
 export const mapStateSchema = z.enum(['queued', 'running', 'done', 'failed', 'cancelled']);
 
