@@ -1,0 +1,3 @@
+export { answer } from './answer';
+export { route } from './route';
+export type { RouteContext } from './route';

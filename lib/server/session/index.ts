@@ -1,0 +1,2 @@
+export { authOptions } from './auth-options';
+export { readActor } from './read-actor';
