@@ -1,3 +1,20 @@
+const everywhere = [
+  { key: 'X-Content-Type-Options', value: 'nosniff' },
+  { key: 'X-Frame-Options', value: 'DENY' },
+  { key: 'Referrer-Policy', value: 'strict-origin-when-cross-origin' },
+  { key: 'Cross-Origin-Opener-Policy', value: 'same-origin' },
+  { key: 'Cross-Origin-Resource-Policy', value: 'same-origin' },
+  { key: 'Permissions-Policy', value: 'camera=(), geolocation=(), microphone=(), payment=(), usb=()' },
+  // Nothing here is meant for a search engine.
+  { key: 'X-Robots-Tag', value: 'noindex, nofollow' },
+];
+
+// The address of these pages is itself a key: it must not travel on in a referrer or stay in a cache.
+const addressIsAKey = [
+  { key: 'Referrer-Policy', value: 'no-referrer' },
+  { key: 'Cache-Control', value: 'no-store' },
+];
+
 /** @type {import('next').NextConfig} */
 const nextConfig = {
   // Lets the test build, the demo build and the development server live beside one another.
@@ -6,6 +23,11 @@ const nextConfig = {
   serverExternalPackages: ['sequelize', 'pg', 'pg-hstore', 'pg-boss', 'sharp', '@node-rs/argon2', 'pino'],
   poweredByHeader: false,
   reactStrictMode: true,
+  headers: async () => [
+    { source: '/:path*', headers: everywhere },
+    { source: '/:page(share|invitation|reset-password)/:path*', headers: addressIsAKey },
+    { source: '/api/share/:path*', headers: [{ key: 'Referrer-Policy', value: 'no-referrer' }] },
+  ],
 };
 
 export default nextConfig;
