@@ -1,0 +1,10 @@
+import type { JobDefinition } from './definition';
+import { mailJob } from './mail';
+import { mapTileJob } from './map-tile';
+
+export { deadLetterOf, type JobDefinition } from './definition';
+export { mailJob, type MailJob } from './mail';
+export { mapTileJob, type MapTileJob } from './map-tile';
+
+/** Every kind of job: the migrate step makes a queue for each, the worker takes from each. */
+export const JOBS: readonly JobDefinition[] = [mapTileJob, mailJob];
