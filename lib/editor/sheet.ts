@@ -1,0 +1,234 @@
+import type { LayoutChanges, Operation, OperationBatch, OperationResult, StoredItem } from '@/lib/contracts/layouts';
+import type { Item } from '@/lib/layout/items';
+import { applyChanges, rebase, type Change, type Items } from './changes';
+import { EMPTY_HISTORY, record, redo, undo, type History, type Walk } from './history';
+import { DEFAULT_SNAPPING, type Snapping } from './snapping';
+import {
+  acknowledged,
+  decided,
+  departing,
+  merged,
+  refusedAsStale,
+  restored,
+  syncedWith,
+  type Exchange,
+  type Sync,
+} from './sync';
+import { selectTool } from './tools/select';
+import { NOTHING, type Draft, type Press, type Reply, type Selection, type Tool, type View } from './tools/tool';
+
+export interface SheetState {
+  readonly items: Items;
+  readonly sync: Sync;
+  readonly history: History;
+  readonly selection: Selection;
+  readonly tool: Tool;
+  readonly draft: Draft | null;
+  /** Where the plumb hangs, floor frame; null: nowhere. */
+  readonly plumb: { readonly xMm: number; readonly yMm: number } | null;
+  readonly snapping: Snapping;
+  /** The newest thing to say aloud. A new object each time, so that the same words twice are said twice. */
+  readonly said: { readonly words: string } | null;
+}
+
+export interface LoadedSheet {
+  readonly layoutVersion: number;
+  readonly items: readonly StoredItem[];
+  /** Edits that an earlier visit could not save. */
+  readonly edits?: readonly Operation[];
+}
+
+/**
+ * A sheet being edited: the one mutable object of the editor, thin over pure functions. Views subscribe and read immutable
+ * states; every way to change items goes through `commit`, the history or an exchange with the server.
+ */
+export class Sheet {
+  private state: SheetState;
+  private readonly listeners = new Set<() => void>();
+
+  constructor(
+    loaded: LoadedSheet,
+    private readonly newId: () => string,
+  ) {
+    const start: Exchange = {
+      sync: syncedWith(loaded.layoutVersion, loaded.items),
+      items: new Map(loaded.items.map(({ item }) => [item.id, item])),
+    };
+    this.state = {
+      ...restored(start, loaded.edits ?? []),
+      history: EMPTY_HISTORY,
+      selection: NOTHING,
+      tool: selectTool(),
+      draft: null,
+      plumb: null,
+      snapping: DEFAULT_SNAPPING,
+      said: null,
+    };
+  }
+
+  readonly getState = (): SheetState => this.state;
+
+  readonly subscribe = (listener: () => void): (() => void) => {
+    this.listeners.add(listener);
+    return () => this.listeners.delete(listener);
+  };
+
+  private set(change: Partial<SheetState>): void {
+    const next = { ...this.state, ...change };
+    this.state = { ...next, selection: stillThere(next.selection, next.items) };
+    for (const listener of [...this.listeners]) listener();
+  }
+
+  // Gestures
+
+  press(at: Press): void {
+    this.take(this.state.tool.press(at, this.view()));
+  }
+
+  move(at: Press): void {
+    this.take(this.state.tool.move(at, this.view()));
+  }
+
+  release(at: Press): void {
+    this.take(this.state.tool.release(at, this.view()));
+  }
+
+  finish(): void {
+    this.take(this.state.tool.finish(this.view()));
+  }
+
+  /** Takes back what is under way; at rest it lets the selection go. */
+  cancel(): void {
+    const { tool, draft } = this.state;
+    if (tool.busy || draft) this.set({ tool: tool.cancel(), draft: null, said: { words: 'Taken back' } });
+    else this.set({ selection: NOTHING, plumb: null });
+  }
+
+  use(tool: Tool): void {
+    this.set({ tool, draft: null });
+  }
+
+  private view(): View {
+    const { items, selection, snapping } = this.state;
+    return { items, selection, snapping, newId: this.newId };
+  }
+
+  private take(reply: Reply): void {
+    const { tool, draft, selection, step, plumb, say } = reply;
+    // A press that changes nothing is not worth a new picture.
+    const idle = tool === this.state.tool && draft === undefined && !selection && !step && !plumb && !say;
+    if (idle) return;
+    this.set({
+      tool,
+      ...(draft !== undefined && { draft }),
+      ...(step && this.afterStep(step.label, step.changes)),
+      ...(selection && { selection }),
+      ...(plumb && { plumb }),
+      ...(say && { said: { words: say } }),
+    });
+  }
+
+  // Edits
+
+  /** Makes one step of the history. Fields that a colleague changed meanwhile and the step does not touch stay theirs. */
+  commit(label: string, changes: readonly Change[], selection?: Selection): void {
+    this.set({ draft: null, ...this.afterStep(label, changes), ...(selection && { selection }) });
+  }
+
+  private afterStep(label: string, changes: readonly Change[]): Partial<SheetState> {
+    const { items, history } = this.state;
+    const real = rebase(items, changes);
+    if (real.length === 0) return {};
+    return { items: applyChanges(items, real), history: record(history, label, real), said: { words: label } };
+  }
+
+  undo(): void {
+    this.walk(undo(this.state.history, this.state.items), 'Undone');
+  }
+
+  redo(): void {
+    this.walk(redo(this.state.history, this.state.items), 'Redone');
+  }
+
+  private walk(walk: Walk | null, word: string): void {
+    if (!walk) return;
+    const { history, changes, label } = walk;
+    const tool = this.state.tool.busy ? this.state.tool.cancel() : this.state.tool;
+    const items = applyChanges(this.state.items, changes);
+    this.set({ items, history, tool, draft: null, said: { words: `${word}: ${label}` } });
+  }
+
+  select(selection: Selection): void {
+    this.set({ selection });
+  }
+
+  hangPlumb(plumb: SheetState['plumb']): void {
+    this.set({ plumb });
+  }
+
+  setSnapping(snapping: Snapping): void {
+    this.set({ snapping });
+  }
+
+  say(words: string): void {
+    this.set({ said: { words } });
+  }
+
+  // Exchange with the server
+
+  /** The batch to send now, marked as in flight; null with nothing to send. */
+  depart(batchId: string): OperationBatch | null {
+    const sync = departing(this.state.sync, this.state.items, batchId);
+    if (!sync) return null;
+    this.set({ sync });
+    return sync.inFlight;
+  }
+
+  acknowledge(result: OperationResult): void {
+    this.set({ sync: acknowledged(this.state.sync, result) });
+  }
+
+  /** Answers false where the server's word brings nothing new, so that sending again would only go round in a circle. */
+  meetStale(conflicts: readonly { itemId: string; current: StoredItem | null }[]): boolean {
+    const before = this.state.sync;
+    const { sync, items } = refusedAsStale(this.state, conflicts);
+    this.set({ sync, items });
+    return sync.stored !== before.stored || sync.conflicts !== before.conflicts;
+  }
+
+  /** The batch in flight was turned down as a whole; its edits stay on the sheet as differences. */
+  drop(): void {
+    const { sync } = this.state;
+    this.set({ sync: { ...sync, inFlight: null, exchanges: sync.exchanges + 1 } });
+  }
+
+  merge(changes: LayoutChanges): void {
+    const before = this.state;
+    const { sync, items } = merged(before, changes);
+    if (sync !== before.sync || items !== before.items) this.set({ sync, items });
+  }
+
+  decide(itemId: string, choice: 'mine' | 'theirs'): void {
+    this.set(decided(this.state, itemId, choice));
+  }
+}
+
+/** A colleague may have removed what was chosen. */
+function stillThere(selection: Selection, items: Items): Selection {
+  if (selection.itemIds.every((id) => items.has(id))) {
+    if (!selection.taskPointId) return selection;
+    const [item] = selection.itemIds.map((id) => items.get(id));
+    const there = item?.kind === 'fixture' && item.taskPoints.some(({ id }) => id === selection.taskPointId);
+    return there ? selection : { ...selection, taskPointId: null };
+  }
+  return { itemIds: selection.itemIds.filter((id) => items.has(id)), taskPointId: null };
+}
+
+/** The items as drawn: with the gesture under way laid over them. */
+export function shownItems({ items, draft }: Pick<SheetState, 'items' | 'draft'>): Items {
+  if (!draft || draft.items.length === 0) return items;
+  return applyChanges(
+    items,
+    draft.items.map((item: Item) => ({ itemId: item.id, before: null, after: item })),
+  );
+}

@@ -1,0 +1,81 @@
+import { boundsOfPoints } from '@/lib/layout/viewport';
+import type { PointMm } from '@/lib/layout/geometry';
+import { footprint, liesInside } from '../footprint';
+import {
+  chosen,
+  NOTHING,
+  state,
+  type Press,
+  type Reply,
+  type Selection,
+  type Target,
+  type Tool,
+  type View,
+} from './tool';
+import { movingItems } from './move';
+import { movingTaskPoint } from './move-task-point';
+import { turning } from './turn';
+
+/** Rests until something is pressed. */
+export function selectTool(): Tool {
+  return state('select', 'Click to choose, drag to move, Shift to choose several.', { press });
+}
+
+function press(at: Press, view: View): Reply {
+  const { target } = at;
+  if (!target) return { tool: marquee([at.xMm, at.yMm], at.shift ? view.selection : NOTHING) };
+  if (target.part === 'turn') return { tool: turning(at, view, selectTool) };
+  const selection = selectionAfter(target, at.shift, view.selection);
+  return { tool: pressed(at, target, selection), selection };
+}
+
+/** A press on something already chosen keeps the selection, so that several things can be dragged by any one of them. */
+function selectionAfter(target: Target, shift: boolean, selection: Selection): Selection {
+  const { itemId } = target;
+  if (target.part === 'taskPoint') return { itemIds: [itemId], taskPointId: target.taskPointId };
+  const isChosen = selection.itemIds.includes(itemId);
+  if (shift && isChosen) return chosen(...selection.itemIds.filter((id) => id !== itemId));
+  if (shift) return chosen(...selection.itemIds, itemId);
+  return isChosen ? { ...selection, taskPointId: null } : chosen(itemId);
+}
+
+/** Down on something, not yet dragged. */
+function pressed(start: Press, target: Target, selection: Selection): Tool {
+  const self = state('select', 'Drag to move.', {
+    busy: true,
+    move: (at, view) => {
+      if (Math.hypot(at.xMm - start.xMm, at.yMm - start.yMm) < start.slackMm) return { tool: self };
+      const dragging =
+        target.part === 'taskPoint'
+          ? movingTaskPoint(start, target, view, selectTool)
+          : movingItems(start, selection, view, selectTool);
+      return dragging.move(at, view);
+    },
+    // A click on one of several chosen things chooses that one alone.
+    release: () => {
+      const alone = target.part === 'item' && !start.shift && selection.itemIds.length > 1;
+      return { tool: selectTool(), selection: alone ? chosen(target.itemId) : selection };
+    },
+    cancel: selectTool,
+  });
+  return self;
+}
+
+/** A rectangle drawn from an empty spot chooses what lies wholly inside; a plain click chooses nothing. */
+function marquee(from: PointMm, kept: Selection): Tool {
+  const reply = (at: Press, view: View): Selection => {
+    const area = boundsOfPoints([from, [at.xMm, at.yMm]]);
+    const inside = [...view.items.values()].filter((item) => {
+      const bounds = boundsOfPoints(footprint(item));
+      return !item.hidden && bounds && area && liesInside(bounds, area);
+    });
+    return chosen(...new Set([...kept.itemIds, ...inside.map(({ id }) => id)]));
+  };
+  const self = state('select', 'Draw round what you want to choose.', {
+    busy: true,
+    move: (at) => ({ tool: self, draft: { items: [], marquee: { from, to: [at.xMm, at.yMm] } } }),
+    release: (at, view) => ({ tool: selectTool(), draft: null, selection: reply(at, view) }),
+    cancel: selectTool,
+  });
+  return self;
+}
