@@ -104,9 +104,14 @@ export class Autosave {
   }
 
   private async send(): Promise<void> {
-    const batch = this.sheet.getState().sync.inFlight ?? this.sheet.depart(this.ports.newId());
-    if (!batch || this.sending || this.stopped) return this.report();
+    if (this.sending || this.stopped) return;
+    // Set before the batch departs: the sheet tells its watchers at once, this one included.
     this.sending = true;
+    const batch = this.sheet.getState().sync.inFlight ?? this.sheet.depart(this.ports.newId());
+    if (!batch) {
+      this.sending = false;
+      return this.report();
+    }
     this.report();
     const answer = await this.ports.send(batch);
     this.sending = false;
