@@ -9,12 +9,14 @@ const layoutName = z.string().trim().min(1, 'Give the variant a name.').max(120)
 
 /** POST /api/projects/[projectId]/layouts; `copyOf` starts the variant from another one of the same project. */
 export const layoutRequestSchema = z.object({ name: layoutName, copyOf: idSchema.nullable().default(null) });
+export type LayoutRequest = z.infer<typeof layoutRequestSchema>;
 /** PATCH /api/layouts/[layoutId] */
 export const layoutChangeSchema = z.object({
   name: layoutName.optional(),
   floorPlanId: idSchema.nullable().optional(),
   mapSettings: mapSettingsSchema.optional(),
 });
+export type LayoutChange = z.infer<typeof layoutChangeSchema>;
 
 export const layoutStateSchema = z.enum(['draft', 'issued', 'accepted', 'changes_requested', 'superseded']);
 export type LayoutState = z.infer<typeof layoutStateSchema>;

@@ -1,0 +1,84 @@
+import { randomUUID } from 'node:crypto';
+import type { Transaction } from 'sequelize';
+import { Layout, LayoutItem, type Project } from '@/models';
+import type { LayoutRequest, LayoutSummary } from '@/lib/contracts/layouts';
+import type { Item } from '@/lib/layout/items';
+import { mapSettingsSchema } from '@/lib/layout/map-settings';
+import { inTransaction } from '../database';
+import { conflict, invalid } from '../errors';
+import type { MemberActor } from '../policy';
+import { findProject } from '../projects/data';
+import { storedItemsOf } from './data';
+import { nextLetter } from './letters';
+import { summaryOf } from './read-layouts';
+
+async function letterFor(project: Project, transaction: Transaction): Promise<string> {
+  const given = await Layout.findAll({ where: { projectId: project.id }, attributes: ['letter'], transaction });
+  const letter = nextLetter(given.map((layout) => layout.letter));
+  if (letter === null)
+    throw conflict('letters_used_up', 'This project has all the variants it can have. Start a new project.');
+  return letter;
+}
+
+async function modelLayout(project: Project, layoutId: string, transaction: Transaction): Promise<Layout> {
+  const model = await Layout.findOne({
+    where: { id: layoutId, projectId: project.id },
+    // Shared is enough: nobody may edit the model halfway through the copy.
+    lock: transaction.LOCK.SHARE,
+    transaction,
+  });
+  if (!model) throw invalid('copyOf', 'The variant to copy is not in this project. Choose another one.');
+  return model;
+}
+
+/** The same thing as another thing: items and their task points have ids of their own in every variant. */
+function copied(item: Item): Item {
+  const copy = { ...item, id: randomUUID() };
+  if (copy.kind !== 'fixture') return copy;
+  return { ...copy, taskPoints: copy.taskPoints.map((point) => ({ ...point, id: randomUUID() })) };
+}
+
+async function copyItems(model: Layout, layout: Layout, transaction: Transaction): Promise<void> {
+  const items = (await storedItemsOf(model.id, transaction)).map(({ item }) => copied(item));
+  // One behind another in time, so that the copy lists them in the same order.
+  const startMs = Date.now();
+  await LayoutItem.bulkCreate(
+    items.map((item, index) => ({
+      layoutId: layout.id,
+      id: item.id,
+      version: 1,
+      kind: item.kind,
+      data: item,
+      layoutVersion: 0,
+      createdAt: new Date(startMs + index),
+    })),
+    { transaction },
+  );
+}
+
+/** A new variant under the next free letter, empty or with the items, floor plan and map settings of another one. */
+export async function createLayout(
+  actor: MemberActor,
+  projectId: string,
+  { name, copyOf }: LayoutRequest,
+  outer?: Transaction,
+): Promise<LayoutSummary> {
+  return inTransaction(async (transaction) => {
+    // Two who ask at the same moment get two letters: the project is held until the row is there.
+    const project = await findProject(actor, projectId, transaction, { lock: true });
+    const model = copyOf === null ? null : await modelLayout(project, copyOf, transaction);
+    const layout = await Layout.create(
+      {
+        projectId: project.id,
+        letter: await letterFor(project, transaction),
+        name,
+        floorPlanId: model?.floorPlanId ?? null,
+        mapSettings: model?.mapSettings ?? mapSettingsSchema.parse({}),
+        createdBy: actor.userId,
+      },
+      { transaction },
+    );
+    if (model) await copyItems(model, layout, transaction);
+    return summaryOf(actor, layout, transaction);
+  }, outer);
+}
