@@ -15,6 +15,7 @@ const config: Config = {
         ink: 'var(--ink)',
         'ink-soft': 'var(--ink-soft)',
         hair: 'var(--hair)',
+        rule: 'var(--rule)',
         petrol: 'var(--petrol)',
         'petrol-wash': 'var(--petrol-wash)',
         'on-petrol': 'var(--on-petrol)',

@@ -1,0 +1,8 @@
+import { z } from 'zod';
+import { idSchema } from '@/lib/contracts/common';
+import { route } from '@/lib/server/http';
+import { findMap, presentMap } from '@/lib/server/maps';
+
+export const GET = route({ role: 'viewer', params: z.object({ mapId: idSchema }) }, async ({ actor, params }) =>
+  presentMap(await findMap(actor, params.mapId)),
+);
