@@ -104,6 +104,11 @@ export class Sheet {
     else this.set({ selection: NOTHING, plumb: null });
   }
 
+  /** The press in hand was taken away; the tool stays. */
+  interrupt(): void {
+    this.set({ tool: this.state.tool.interrupted(), draft: null });
+  }
+
   use(tool: Tool): void {
     this.set({ tool, draft: null });
   }

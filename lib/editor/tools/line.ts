@@ -69,6 +69,7 @@ function pressedCorner(kind: LineKind, corners: readonly PointMm[], start: Press
       return { tool: extending(kind, next), draft: drawn(kind, next, false, view) };
     },
     cancel: () => lineTool(kind),
+    interrupted: () => (corners.length > 0 ? extending(kind, corners) : lineTool(kind)),
   });
   return self;
 }

@@ -62,6 +62,7 @@ function drawingBlock(kind: 'fixture' | 'obstacle', start: Press): Tool {
     move: (press, view) => ({ tool: self, draft: { items: [at(press, view, GHOST)] } }),
     release: (press, view) => placedReply(at(press, view, view.newId()), view),
     cancel: selectTool,
+    interrupted: () => blockTool(kind),
   });
   return self;
 }
@@ -100,6 +101,7 @@ export function plumbTool(): Tool {
     move: (press) => ({ tool: held, plumb: at(press) }),
     release: (press) => ({ tool: plumbTool(), plumb: at(press) }),
     cancel: selectTool,
+    interrupted: plumbTool,
   });
   return state('plumb', 'Click a spot to read everything there. Escape ends.', {
     busy: true,

@@ -79,6 +79,8 @@ export interface Tool {
   /** Enter or a double click: ends a line. */
   finish(view: View): Reply;
   cancel(): Tool;
+  /** The press was taken away (a second finger, the system): the state before it. */
+  interrupted(): Tool;
 }
 
 /** A tool state that answers nothing but what it is given. */
@@ -92,6 +94,7 @@ export function state(name: ToolName, hint: string, own: Partial<Omit<Tool, 'nam
     release: () => ({ tool: self }),
     finish: () => ({ tool: self }),
     cancel: () => self,
+    interrupted: () => (name === 'select' ? self.cancel() : self),
     ...own,
   };
   return self;

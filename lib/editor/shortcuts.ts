@@ -1,0 +1,119 @@
+import type { ToolName } from './tools/tool';
+
+/** What a key asks of the sheet. */
+export type Command =
+  | { readonly name: 'undo' | 'redo' | 'delete' | 'duplicate' | 'selectAll' | 'cancel' | 'finish' | 'fit' | 'help' }
+  | { readonly name: 'tool'; readonly tool: ToolName }
+  | { readonly name: 'nudge'; readonly xSteps: number; readonly ySteps: number }
+  | { readonly name: 'turn'; readonly steps: number };
+
+export interface Keystroke {
+  readonly key: string;
+  readonly ctrlKey: boolean;
+  readonly metaKey: boolean;
+  readonly shiftKey: boolean;
+  readonly altKey: boolean;
+}
+
+const TOOL_KEYS: Record<string, ToolName> = {
+  v: 'select',
+  h: 'pan',
+  r: 'robot',
+  f: 'fixture',
+  o: 'obstacle',
+  g: 'guardLine',
+  w: 'walkway',
+  t: 'taskPoint',
+  d: 'dimension',
+  p: 'plumb',
+};
+
+const ARROWS: Record<string, readonly [number, number]> = {
+  ArrowLeft: [-1, 0],
+  ArrowRight: [1, 0],
+  ArrowUp: [0, 1],
+  ArrowDown: [0, -1],
+};
+
+/** The command of a keystroke on the sheet, or null. Arrows go one step, with Shift ten. */
+export function commandOf({ key, ctrlKey, metaKey, shiftKey, altKey }: Keystroke): Command | null {
+  const lower = key.toLowerCase();
+  if (ctrlKey || metaKey) {
+    if (altKey) return null;
+    if (lower === 'z') return { name: shiftKey ? 'redo' : 'undo' };
+    if (lower === 'y') return { name: 'redo' };
+    if (lower === 'd') return { name: 'duplicate' };
+    if (lower === 'a') return { name: 'selectAll' };
+    return null;
+  }
+  const arrow = ARROWS[key];
+  if (arrow) {
+    const size = shiftKey ? 10 : 1;
+    return { name: 'nudge', xSteps: arrow[0] * size, ySteps: arrow[1] * size };
+  }
+  if (altKey) return null;
+  if (key === 'Escape') return { name: 'cancel' };
+  if (key === 'Enter') return { name: 'finish' };
+  if (key === 'Delete' || key === 'Backspace') return { name: 'delete' };
+  if (key === '[') return { name: 'turn', steps: 1 };
+  if (key === ']') return { name: 'turn', steps: -1 };
+  if (key === '?') return { name: 'help' };
+  if (key === '0') return { name: 'fit' };
+  const tool = shiftKey ? undefined : TOOL_KEYS[lower];
+  return tool ? { name: 'tool', tool } : null;
+}
+
+export interface ShortcutGroup {
+  readonly title: string;
+  readonly entries: readonly { readonly keys: readonly string[]; readonly words: string }[];
+}
+
+/** The page of shortcuts. */
+export const SHORTCUTS: readonly ShortcutGroup[] = [
+  {
+    title: 'On the sheet',
+    entries: [
+      { keys: ['Click'], words: 'Choose; with Shift several' },
+      { keys: ['Arrows'], words: 'Move by one step; with Shift by ten' },
+      { keys: ['[', ']'], words: 'Turn by one step' },
+      { keys: ['Alt'], words: 'Held: suspends snapping' },
+      { keys: ['Shift'], words: 'Held while dragging: stays level or upright' },
+      { keys: ['Escape'], words: 'Take back what is under way; then let go' },
+      { keys: ['Enter'], words: 'End a guard line or walkway' },
+      { keys: ['Delete'], words: 'Delete what is chosen' },
+    ],
+  },
+  {
+    title: 'Edit',
+    entries: [
+      { keys: ['Ctrl', 'Z'], words: 'Undo' },
+      { keys: ['Ctrl', 'Shift', 'Z'], words: 'Redo' },
+      { keys: ['Ctrl', 'D'], words: 'Duplicate' },
+      { keys: ['Ctrl', 'A'], words: 'Choose everything' },
+    ],
+  },
+  {
+    title: 'Tools',
+    entries: [
+      { keys: ['V'], words: 'Choose and move' },
+      { keys: ['R'], words: 'Robot' },
+      { keys: ['F'], words: 'Fixture' },
+      { keys: ['O'], words: 'Obstacle' },
+      { keys: ['G'], words: 'Guard line' },
+      { keys: ['W'], words: 'Walkway' },
+      { keys: ['T'], words: 'Task point' },
+      { keys: ['D'], words: 'Dimension' },
+      { keys: ['P'], words: 'Plumb' },
+    ],
+  },
+  {
+    title: 'View',
+    entries: [
+      { keys: ['Wheel'], words: 'Zoom; + and − on the keyboard' },
+      { keys: ['Space'], words: 'Held while dragging: moves the view; so does the middle button' },
+      { keys: ['H'], words: 'Move the view' },
+      { keys: ['0'], words: 'Show the whole sheet' },
+      { keys: ['?'], words: 'This list' },
+    ],
+  },
+];
