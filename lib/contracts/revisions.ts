@@ -6,7 +6,7 @@ import { libraryArmSchema } from './arms';
 import { idSchema, timestampSchema } from './common';
 import { layoutStateSchema } from './layouts';
 
-/** POST /api/layouts/[layoutId]/revisions: issue a frozen copy. */
+/** POST /api/layouts/[layoutId]/revisions: issue a frozen copy; GET there lists what was issued, newest first. */
 export const issueRequestSchema = z.object({ note: z.string().trim().max(2000).default('') });
 
 export const revisionSummarySchema = z.object({

@@ -2,12 +2,13 @@ import { z } from 'zod';
 import { idSchema, timestampSchema } from './common';
 import { revisionSchema } from './revisions';
 
-/** POST /api/revisions/[revisionId]/share-links */
+/** POST /api/revisions/[revisionId]/share-links; GET there lists them, DELETE /api/share-links/[shareLinkId] revokes one. */
 export const shareLinkRequestSchema = z.object({
   label: z.string().trim().max(120).default(''),
   mayRemark: z.boolean().default(true),
   expiresInDays: z.number().int().min(1).max(365).default(30),
 });
+export type ShareLinkRequest = z.infer<typeof shareLinkRequestSchema>;
 export const shareLinkSchema = z.object({
   id: idSchema,
   revisionId: idSchema,
