@@ -76,3 +76,9 @@ export function tooManyRequests(detail: string, retryAfterS: number): AppError {
   const headers = { 'retry-after': String(Math.max(1, Math.ceil(retryAfterS))) };
   return new AppError({ status: 429, code: 'too_many_requests', detail, headers });
 }
+
+/** 404 for a link out of a mail; says the same for a wrong, an old and a used one. */
+export function linkNotValid(): AppError {
+  const detail = 'This link is not valid any more: it was used, has expired or was withdrawn. Ask for a new one.';
+  return new AppError({ status: 404, code: 'link_not_valid', detail });
+}

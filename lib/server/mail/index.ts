@@ -1,0 +1,3 @@
+export { deliverMail } from './deliver-mail';
+export { sendMailLater } from './send-mail-later';
+export type { TemplateData, TemplateName } from './templates';
