@@ -19,6 +19,7 @@ export const remarkRequestSchema = z.object({
   body,
 });
 export const guestRemarkRequestSchema = remarkRequestSchema.extend({ guest: guestSchema });
+export type RemarkRequest = z.infer<typeof remarkRequestSchema>;
 /** POST /api/remarks/[remarkId]/replies and POST /api/share/[token]/remarks/[remarkId]/replies */
 export const replyRequestSchema = z.object({ body });
 export const guestReplyRequestSchema = replyRequestSchema.extend({ guest: guestSchema });

@@ -51,7 +51,7 @@ export async function readLayout(
     mapSettings: layout.mapSettings,
     items,
     floorPlan: floorPlan && presentFloorPlan(floorPlan),
-    arms: await armsByIds(actor, armIdsOf(items.map(({ item }) => item)), transaction),
+    arms: await armsByIds(actor.organisationId, armIdsOf(items.map(({ item }) => item)), transaction),
   };
 }
 

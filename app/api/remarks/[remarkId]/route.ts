@@ -1,0 +1,11 @@
+import { z } from 'zod';
+import { idSchema } from '@/lib/contracts/common';
+import { remarkChangeSchema } from '@/lib/contracts/remarks';
+import { route } from '@/lib/server/http';
+import { resolveRemark } from '@/lib/server/remarks/resolve-remark';
+
+const params = z.object({ remarkId: idSchema });
+
+export const PATCH = route({ role: 'planner', params, body: remarkChangeSchema }, ({ actor, params, body }) =>
+  resolveRemark(actor, params.remarkId, body),
+);
