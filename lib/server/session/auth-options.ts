@@ -4,6 +4,9 @@ import { env } from '../env';
 import { SESSION_COOKIE, SESSION_MAX_AGE_S, useSecureCookies } from './cookie';
 import { checkCredentials } from './check-credentials';
 
+// next-auth reads its own address from the environment only; ours has one name for it.
+process.env.NEXTAUTH_URL ??= env.APP_URL;
+
 const cookieOptions = { httpOnly: true, sameSite: 'lax', path: '/', secure: useSecureCookies } as const;
 
 export const authOptions: NextAuthOptions = {
