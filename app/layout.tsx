@@ -1,5 +1,5 @@
 import type { Metadata, Viewport } from 'next';
-import { cookies } from 'next/headers';
+import { cookies, headers } from 'next/headers';
 import type { ReactNode } from 'react';
 import '@fontsource/barlow-semi-condensed/400.css';
 import '@fontsource/barlow-semi-condensed/500.css';
@@ -32,10 +32,17 @@ export const viewport: Viewport = {
 export default async function RootLayout({ children }: { children: ReactNode }) {
   const kept = (await cookies()).get(BOARD_COOKIE)?.value;
   const board = isBoard(kept) ? kept : undefined;
+  // proxy.ts makes it anew for each page; without it the browser refuses to run a script of ours.
+  const nonce = (await headers()).get('x-nonce') ?? undefined;
   return (
     // The script below may set data-board before React wakes up; that difference is meant.
     <html lang="en" data-board={board} suppressHydrationWarning>
-      <head>{board ? null : <script dangerouslySetInnerHTML={{ __html: boardScript }} />}</head>
+      <head>
+        {board ? null : (
+          // Browsers hide a nonce once it has served, which React would take for a difference.
+          <script nonce={nonce} suppressHydrationWarning dangerouslySetInnerHTML={{ __html: boardScript }} />
+        )}
+      </head>
       <body>
         <DataProvider>
           <TooltipProvider>{children}</TooltipProvider>
