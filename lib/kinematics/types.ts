@@ -83,8 +83,7 @@ export interface PostureAnalysis {
 
 /** A tool pose asked for: whole, or as a point, the direction of the tool's z axis and a roll about it. */
 export type Target =
-  | { readonly pose: Pose }
-  | { readonly position: Vec3; readonly direction: Vec3; readonly roll: number | 'free' };
+  { readonly pose: Pose } | { readonly position: Vec3; readonly direction: Vec3; readonly roll: number | 'free' };
 
 /** Why a pose is not reached. Stored in maps by its position in this list, so the order never changes. */
 export const REASONS = ['reached', 'too far', 'too near', 'joint limit', 'direction', 'obstacle', 'not found'] as const;
