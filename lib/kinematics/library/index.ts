@@ -44,10 +44,10 @@ export const BUILT_IN_ARMS: readonly BuiltInArm[] = [
     payloadKg: 12,
     arm: sixAxis({
       shoulder: 0.15,
-      upperArm: 0.7,
+      upperArm: 0.62,
       elbow: 0.12,
       column: 0.45,
-      forearm: 0.72,
+      forearm: 0.63,
       flange: 0.1,
       limits: [
         [-170, 170],
