@@ -10,7 +10,12 @@ import { outlineFault } from './geometry';
 const millimetres = z.number().min(-1_000_000).max(1_000_000);
 const degrees = z.number().min(-360).max(360);
 const pointMm = z.tuple([millimetres, millimetres]);
-const name = z.string().trim().min(1, 'Give it a name.').max(80, 'A name has at most 80 characters.');
+const name = z
+  .string()
+  .trim()
+  .min(1, 'Give it a name.')
+  .max(80, 'A name has at most 80 characters.')
+  .regex(/^\P{Cc}*$/u, 'A name has no line breaks and no control characters.');
 
 const placed = {
   id: z.uuid(),
