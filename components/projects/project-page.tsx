@@ -1,0 +1,89 @@
+'use client';
+
+import { Pencil } from 'lucide-react';
+import { useState } from 'react';
+import { ProjectDialog } from '@/components/forms/project-dialog';
+import { Button } from '@/components/ui/button';
+import { Notice } from '@/components/ui/notice';
+import { Page } from '@/components/ui/page';
+import { TitleBlock } from '@/components/ui/title-block';
+import { useMayActAs } from '@/lib/client/account-context';
+import { useProject } from '@/lib/client/use-project';
+import { useProjectActions } from '@/lib/client/use-projects';
+import { FloorPlansPanel } from './floor-plans-panel';
+import { OpenRemarksPanel } from './open-remarks-panel';
+import { ProjectFault } from './project-fault';
+import { RevisionsPanel } from './revisions-panel';
+import { VariantsPanel } from './variants-panel';
+
+/** One project: its variants, floor plans, revisions and open remarks. A viewer gets what was issued. */
+export function ProjectPage({ projectId }: { projectId: string }) {
+  const { data: project, error, mutate } = useProject(projectId);
+  const mayPlan = useMayActAs('planner');
+  const { change } = useProjectActions();
+  const [isRenaming, setIsRenaming] = useState(false);
+  if (error && !project) return <ProjectFault error={error} onRetry={() => void mutate()} />;
+
+  return (
+    <>
+      <TitleBlock
+        cells={[
+          { label: 'Project', value: project?.name ?? '…', heading: true },
+          { label: 'Customer', value: project?.customerName || '–' },
+          { label: 'Site', value: project?.siteName || '–', wideOnly: true },
+          { label: 'Variants', value: project?.layoutCount ?? '–', kind: 'figure', wideOnly: true },
+        ]}
+        actions={
+          mayPlan &&
+          project && (
+            <Button variant="quiet" onClick={() => setIsRenaming(true)}>
+              <Pencil aria-hidden className="size-4" />
+              Rename
+            </Button>
+          )
+        }
+      />
+      <Page>
+        {project?.archivedAt && (
+          <Notice
+            tone="caution"
+            className="mb-4"
+            action={
+              mayPlan && (
+                <Button size="small" onClick={() => void change(projectId, { archived: false })}>
+                  Bring it back
+                </Button>
+              )
+            }
+          >
+            This project is archived. It can still be read and edited, but it is left out of the list of current
+            projects.
+          </Notice>
+        )}
+        <div className="grid items-start gap-4 lg:grid-cols-[minmax(0,1fr)_26rem]">
+          <div className="flex min-w-0 flex-col gap-4">
+            {mayPlan && <VariantsPanel projectId={projectId} />}
+            <RevisionsPanel projectId={projectId} />
+          </div>
+          <div className="flex min-w-0 flex-col gap-4">
+            {mayPlan && <FloorPlansPanel projectId={projectId} />}
+            <OpenRemarksPanel projectId={projectId} count={project?.openRemarkCount ?? 0} />
+          </div>
+        </div>
+      </Page>
+      {project && (
+        <ProjectDialog
+          open={isRenaming}
+          onOpenChange={setIsRenaming}
+          title="Rename project"
+          submitLabel="Save"
+          start={project}
+          onSubmit={async (request) => {
+            await change(projectId, request);
+            setIsRenaming(false);
+          }}
+        />
+      )}
+    </>
+  );
+}
