@@ -1,0 +1,43 @@
+import { fitBounds, screenToFloor, type FloorBounds, type Viewport } from '@/lib/layout/viewport';
+
+export interface View {
+  readonly viewport: Viewport;
+  /** The canvas on the page, px; zero before it is measured. */
+  readonly size: { readonly width: number; readonly height: number };
+  /** Pixels at the lower edge that the map key covers. */
+  readonly coveredPx: number;
+}
+
+const EMPTY_FLOOR: FloorBounds = { minXMm: 0, minYMm: 0, maxXMm: 9000, maxYMm: 6000 };
+
+/** What the canvas shows. Apart from the sheet: looking is not editing, and nobody else's business. */
+export class ViewStore {
+  private view: View = { viewport: { scale: 0.1, xMm: 0, yMm: 6000 }, size: { width: 0, height: 0 }, coveredPx: 0 };
+  private readonly listeners = new Set<() => void>();
+
+  readonly get = (): View => this.view;
+
+  readonly subscribe = (listener: () => void): (() => void) => {
+    this.listeners.add(listener);
+    return () => this.listeners.delete(listener);
+  };
+
+  set(change: Partial<View>): void {
+    this.view = { ...this.view, ...change };
+    for (const listener of [...this.listeners]) listener();
+  }
+
+  /** Shows the whole of `bounds` in the part of the canvas that nothing covers. */
+  fit(bounds: FloorBounds | null): void {
+    const { size, coveredPx } = this.view;
+    const free = { width: size.width, height: Math.max(size.height - coveredPx, 80) };
+    const margin = Math.min(48, size.width / 12);
+    this.set({ viewport: fitBounds(bounds ?? EMPTY_FLOOR, free, margin) });
+  }
+
+  /** The floor in the middle of what is seen. */
+  middle(): { xMm: number; yMm: number } {
+    const { viewport, size, coveredPx } = this.view;
+    return screenToFloor(viewport, { x: size.width / 2, y: (size.height - coveredPx) / 2 });
+  }
+}

@@ -1,0 +1,115 @@
+'use client';
+
+import { Copy, Eye, EyeOff, Lock, LockOpen, Trash2 } from 'lucide-react';
+import { useBoard, useBoardSheet } from '@/components/sheet/editor/board-context';
+import { useSelectionCommands } from '@/components/sheet/editor/use-selection-commands';
+import { Button } from '@/components/ui/button';
+import { KIND_WORDS } from '@/lib/editor/make-items';
+import type { Item } from '@/lib/layout/items';
+import { BlockFields } from './block-fields';
+import { DimensionFields, GuardLineFields, WalkwayFields } from './line-fields';
+import { NameField } from './name-field';
+import { PlaceFields } from './place-fields';
+import { RobotFields } from './robot-fields';
+import { TaskPointFields } from './task-point-fields';
+import { useItemEdit } from './use-item-edit';
+
+/** What is chosen, with everything about it that can be typed. */
+export function Inspector() {
+  const items = useBoardSheet((state) => state.items);
+  const { itemIds } = useBoardSheet((state) => state.selection);
+  const chosen = itemIds.map((id) => items.get(id)).filter((item): item is Item => item !== undefined);
+  if (chosen.length === 0) return null;
+  return (
+    <section aria-label="What is chosen" data-inspector className="border-b border-rule px-3.5 pt-2 pb-3">
+      {chosen.length === 1 ? <OneItem key={chosen[0].id} item={chosen[0]} /> : <SeveralItems items={chosen} />}
+    </section>
+  );
+}
+
+function OneItem({ item }: { readonly item: Item }) {
+  const edit = useItemEdit(item);
+  return (
+    <>
+      <div className="flex items-center gap-1">
+        <NameField
+          label={`Name of the ${KIND_WORDS[item.kind].toLowerCase()}`}
+          value={item.name}
+          onCommit={(name) => edit('Name', { name })}
+        />
+        <Button
+          variant="quiet"
+          size="icon"
+          aria-pressed={item.hidden}
+          aria-label={item.hidden ? `Show ${item.name}` : `Hide ${item.name}`}
+          onClick={() => edit(item.hidden ? 'Showing' : 'Hiding', { hidden: !item.hidden })}
+        >
+          {item.hidden ? <EyeOff aria-hidden className="size-4" /> : <Eye aria-hidden className="size-4" />}
+        </Button>
+        <Button
+          variant="quiet"
+          size="icon"
+          aria-pressed={item.locked}
+          aria-label={item.locked ? `Unlock ${item.name}` : `Lock ${item.name}`}
+          onClick={() => edit(item.locked ? 'Unlocking' : 'Locking', { locked: !item.locked })}
+        >
+          {item.locked ? <Lock aria-hidden className="size-4" /> : <LockOpen aria-hidden className="size-4" />}
+        </Button>
+        <Copies label={item.name} locked={item.locked} />
+      </div>
+      <PlaceFields item={item} />
+      <OwnFields item={item} />
+    </>
+  );
+}
+
+function OwnFields({ item }: { readonly item: Item }) {
+  switch (item.kind) {
+    case 'robot':
+      return <RobotFields robot={item} />;
+    case 'fixture':
+      return (
+        <>
+          <BlockFields item={item} />
+          <TaskPointFields fixture={item} />
+        </>
+      );
+    case 'obstacle':
+      return <BlockFields item={item} />;
+    case 'guardLine':
+      return <GuardLineFields item={item} />;
+    case 'walkway':
+      return <WalkwayFields item={item} />;
+    case 'dimension':
+      return <DimensionFields item={item} />;
+  }
+}
+
+function SeveralItems({ items }: { readonly items: readonly Item[] }) {
+  const { sheet } = useBoard();
+  return (
+    <div className="flex items-center justify-between gap-2">
+      <p className="font-semibold">{items.length} items chosen</p>
+      <span className="flex items-center gap-1">
+        <Button variant="quiet" size="small" onClick={() => sheet.select({ itemIds: [], taskPointId: null })}>
+          Let go
+        </Button>
+        <Copies label="what is chosen" locked={items.every(({ locked }) => locked)} />
+      </span>
+    </div>
+  );
+}
+
+function Copies({ label, locked }: { readonly label: string; readonly locked: boolean }) {
+  const { duplicate, remove } = useSelectionCommands();
+  return (
+    <>
+      <Button variant="quiet" size="icon" aria-label={`Duplicate ${label}`} onClick={duplicate}>
+        <Copy aria-hidden className="size-4" />
+      </Button>
+      <Button variant="quiet" size="icon" aria-label={`Delete ${label}`} disabled={locked} onClick={remove}>
+        <Trash2 aria-hidden className="size-4" />
+      </Button>
+    </>
+  );
+}
