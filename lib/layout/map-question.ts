@@ -99,7 +99,7 @@ function mapGridOf(armAndTool: Arm, stepMm: number): MapGrid {
 }
 
 /** The same grid in the sheet's millimetres. */
-export function gridInMm(grid: MapGrid): FloorGrid {
+export function gridInMm(grid: MapGrid): FloorGrid & { originMm: [number, number] } {
   const stepMm = tidy(grid.step * 1000);
   return {
     originMm: [tidy(grid.origin[0] * 1000), tidy(grid.origin[1] * 1000)],

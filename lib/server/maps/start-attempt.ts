@@ -1,0 +1,24 @@
+import type { Transaction } from 'sequelize';
+import { MapTile, type DexterityMap } from '@/models';
+import { recordAudit } from '../audit';
+import { mapTileJob } from '../jobs';
+import { enqueueAll } from '../queue';
+import type { MemberActor } from '../policy';
+
+/**
+ * Queues every tile of a locked map under the next attempt number. What an earlier attempt left is dropped, and what it may
+ * still be computing is refused when it comes.
+ */
+export async function startAttempt(actor: MemberActor, map: DexterityMap, transaction: Transaction): Promise<void> {
+  await MapTile.destroy({ where: { mapId: map.id }, transaction });
+  const attempt = map.attempt + 1;
+  await map.update(
+    { state: 'queued', attempt, tilesDone: 0, failure: null, summary: null, startedAt: null, finishedAt: null },
+    { transaction },
+  );
+  const jobs = Array.from({ length: map.tileCount }, (_, index) => ({ mapId: map.id, attempt, index }));
+  // A quick map does not wait behind the many tiles of a fine one.
+  await enqueueAll(mapTileJob, jobs, { transaction, priority: -Math.floor(Math.log2(map.tileCount)) });
+  const details = { attempt, stepMm: map.grid.stepMm, spots: map.grid.columns * map.grid.rows };
+  await recordAudit(actor, { action: 'map.asked', subjectId: map.id, details }, transaction);
+}

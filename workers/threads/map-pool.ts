@@ -1,0 +1,21 @@
+import { fileURLToPath } from 'node:url';
+import { Piscina } from 'piscina';
+import type { MapComputer } from '@/lib/server/maps/computer';
+
+/**
+ * Threads that compute maps, so that a worker process stays free for mails, for the queue and for its signals while they
+ * are busy. A thread starts with its first task and stays.
+ */
+export function mapPool(threads: number): MapComputer & { readonly close: () => Promise<void> } {
+  const pool = new Piscina({
+    filename: fileURLToPath(new URL('./map-thread.ts', import.meta.url)),
+    minThreads: 0,
+    maxThreads: threads,
+    idleTimeout: 60_000,
+  });
+  return {
+    computeTile: (task) => pool.run(task, { name: 'computeTile' }),
+    summarise: (task) => pool.run(task, { name: 'summarise' }),
+    close: () => pool.destroy(),
+  };
+}

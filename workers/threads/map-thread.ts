@@ -1,0 +1,1 @@
+export { computeTile, summarise } from '@/lib/server/maps/compute';
