@@ -2,34 +2,18 @@ import { createHash } from 'node:crypto';
 import type { Transaction } from 'sequelize';
 import { snapshotSchema, type Snapshot } from '@/lib/contracts/revisions';
 import { canonicalJson } from '@/lib/kinematics/canonical-json';
-import type { Item, Robot } from '@/lib/layout/items';
+import type { Item } from '@/lib/layout/items';
 import { questionOfRobot } from '@/lib/layout/map-question';
 import type { MapSettings } from '@/lib/layout/map-settings';
 import { FloorPlan, type Layout, type Project } from '@/models';
 import { armsByIds } from '../arms/data';
-import { AppError } from '../errors';
 import { presentFloorPlan } from '../floor-plans/present';
 import { storedItemsOf } from '../layouts/data';
 import { armIdsOf } from '../layouts/read-layouts';
-import { finishedMapFor } from '../maps/finished-map-for';
+import { finishedMapFor } from '../maps';
 import type { MemberActor } from '../policy';
 
-/** The stored map of one robot; null where it is not finished or cannot be asked for with these settings. */
-async function mapOf(
-  actor: MemberActor,
-  robot: Robot,
-  settings: MapSettings,
-  transaction: Transaction,
-): Promise<Snapshot['maps'][number] | null> {
-  try {
-    const map = await finishedMapFor(actor, questionOfRobot(robot, settings), transaction);
-    return map && { robotId: robot.id, mapId: map.id, key: map.key };
-  } catch (error) {
-    if (error instanceof AppError && error.code === 'invalid') return null;
-    throw error;
-  }
-}
-
+/** The stored map of each robot; where it is not finished, none. */
 async function mapsOf(
   actor: MemberActor,
   items: readonly Item[],
@@ -38,8 +22,9 @@ async function mapsOf(
 ): Promise<Snapshot['maps']> {
   const maps: Snapshot['maps'] = [];
   for (const item of items) {
-    const map = item.kind === 'robot' ? await mapOf(actor, item, settings, transaction) : null;
-    if (map) maps.push(map);
+    if (item.kind !== 'robot') continue;
+    const map = await finishedMapFor(actor, questionOfRobot(item, settings), transaction);
+    if (map) maps.push({ robotId: item.id, mapId: map.id, key: map.key });
   }
   return maps;
 }
