@@ -1,11 +1,14 @@
 'use client';
 
 import Link from 'next/link';
+import { LoadingLine } from '@/components/ui/loading-line';
 import { Moment } from '@/components/ui/moment';
+import { Notice } from '@/components/ui/notice';
 import { Panel } from '@/components/ui/panel';
 import { useLayouts } from '@/lib/client/use-project';
 import { useLayoutRemarks } from '@/lib/client/use-remarks';
 import type { LayoutSummary } from '@/lib/contracts/layouts';
+import type { Remark } from '@/lib/contracts/remarks';
 import { DataPart } from './data-part';
 
 /** The remarks that wait for an answer, each leading to its spot on the revision. */
@@ -29,36 +32,46 @@ export function OpenRemarksPanel({ projectId, count }: { projectId: string; coun
 }
 
 function LayoutRemarks({ layout }: { layout: LayoutSummary }) {
-  const answer = useLayoutRemarks(layout.id);
+  const { remarks, error } = useLayoutRemarks(layout.id);
+  if (!remarks) {
+    if (!error) return <LoadingLine label={`Loading the remarks on ${layout.letter}`} />;
+    return (
+      <Notice tone="trouble" className="m-3.5">
+        {error.message}
+      </Notice>
+    );
+  }
   return (
-    <DataPart answer={answer} loading={`Loading the remarks on ${layout.letter}`}>
-      {({ remarks }) => (
-        <ul className="[&+ul]:border-t [&+ul]:border-hair">
-          {remarks
-            .filter((remark) => remark.resolvedAt === null)
-            .map((remark) => (
-              <li key={remark.id} className="border-t border-hair first:border-t-0">
-                <Link
-                  href={`/revisions/${remark.revisionId}?remark=${remark.id}`}
-                  className="flex gap-3 px-3.5 py-2.5 hover:bg-petrol-wash focus-visible:-outline-offset-2"
-                >
-                  <span className="mt-0.5 flex h-5 min-w-6 shrink-0 items-center justify-center rounded bg-red px-1 text-sm font-semibold text-sheet">
-                    {remark.number}
-                  </span>
-                  <span className="min-w-0">
-                    <span className="line-clamp-2">{remark.body}</span>
-                    <span className="block text-sm text-ink-soft">
-                      {remark.author.you ? 'You' : remark.author.name}, <Moment iso={remark.createdAt} /> ·{' '}
-                      {layout.letter} rev {remark.revisionNumber}
-                      {remark.replies.length > 0 &&
-                        ` · ${remark.replies.length} ${remark.replies.length === 1 ? 'answer' : 'answers'}`}
-                    </span>
-                  </span>
-                </Link>
-              </li>
-            ))}
-        </ul>
-      )}
-    </DataPart>
+    <ul className="[&+ul]:border-t [&+ul]:border-hair">
+      {remarks
+        .filter((remark) => remark.resolvedAt === null)
+        .map((remark) => (
+          <OpenRemark key={remark.id} remark={remark} letter={layout.letter} />
+        ))}
+    </ul>
+  );
+}
+
+function OpenRemark({ remark, letter }: { remark: Remark; letter: string }) {
+  const answers = remark.replies.length;
+  return (
+    <li className="border-t border-hair first:border-t-0">
+      <Link
+        href={`/revisions/${remark.revisionId}?remark=${remark.id}`}
+        className="flex gap-3 px-3.5 py-2.5 hover:bg-petrol-wash focus-visible:-outline-offset-2"
+      >
+        <span className="mt-0.5 flex h-5 min-w-6 shrink-0 items-center justify-center rounded bg-red px-1 text-sm font-semibold text-sheet">
+          {remark.number}
+        </span>
+        <span className="min-w-0">
+          <span className="line-clamp-2">{remark.body}</span>
+          <span className="block text-sm text-ink-soft">
+            {remark.author.you ? 'You' : remark.author.name}, <Moment iso={remark.createdAt} /> · {letter} rev{' '}
+            {remark.revisionNumber}
+            {answers > 0 && ` · ${answers} ${answers === 1 ? 'answer' : 'answers'}`}
+          </span>
+        </span>
+      </Link>
+    </li>
   );
 }
