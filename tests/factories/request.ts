@@ -1,16 +1,16 @@
 import { randomBytes } from 'node:crypto';
 import type { TestMember } from './people';
 
-type Handler = (request: Request, context?: { params: Promise<object> }) => Promise<Response>;
+export type Handler = (request: Request, context?: { params: Promise<object> }) => Promise<Response>;
 
-interface CallOptions {
+export interface CallOptions {
   /** Nobody without it. */
   as?: Pick<TestMember, 'cookie'> | null;
   method?: string;
   /** Path and query; the host is ours. */
   path?: string;
   params?: object;
-  /** Sent as JSON. */
+  /** Sent as JSON, or as the form that it is. */
   body?: unknown;
   /** Replaces or adds to what a page of ours would send; null leaves one out. */
   headers?: Record<string, string | null>;
@@ -20,7 +20,8 @@ interface CallOptions {
 export function callRoute(handler: Handler, options: CallOptions = {}): Promise<Response> {
   const headers = new Headers({ 'sec-fetch-site': 'same-origin', 'x-forwarded-for': someAddress() });
   if (options.as) headers.set('cookie', options.as.cookie);
-  if (options.body !== undefined) headers.set('content-type', 'application/json');
+  const isForm = options.body instanceof FormData;
+  if (options.body !== undefined && !isForm) headers.set('content-type', 'application/json');
   for (const [name, value] of Object.entries(options.headers ?? {})) {
     if (value === null) headers.delete(name);
     else headers.set(name, value);
@@ -28,7 +29,7 @@ export function callRoute(handler: Handler, options: CallOptions = {}): Promise<
   const request = new Request(new URL(options.path ?? '/', 'http://elbowroom.test'), {
     method: options.method ?? 'GET',
     headers,
-    body: options.body === undefined ? undefined : JSON.stringify(options.body),
+    body: options.body instanceof FormData ? options.body : JSON.stringify(options.body),
   });
   return handler(request, { params: Promise.resolve(options.params ?? {}) });
 }

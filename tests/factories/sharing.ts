@@ -1,15 +1,24 @@
 import { randomBytes } from 'node:crypto';
+import type { Snapshot } from '@/lib/contracts/revisions';
 import { hashToken, randomToken } from '@/lib/server/tokens';
-import { DexterityMap, Layout, Remark, Revision, ShareLink } from '@/models';
+import { DexterityMap, Layout, MapTile, Remark, Revision, ShareLink } from '@/models';
 import { createMember, createOrganisation } from './people';
 import { createLayout, emptySnapshot } from './work';
 
-export async function createRevision(options: { layoutId?: string; issuedBy?: string } = {}): Promise<Revision> {
+interface RevisionOptions {
+  layoutId?: string;
+  issuedBy?: string;
+  /** What the frozen copy holds besides an empty layout. */
+  snapshot?: Partial<Snapshot>;
+}
+
+export async function createRevision(options: RevisionOptions = {}): Promise<Revision> {
   const layout = options.layoutId
     ? await Layout.findByPk(options.layoutId, { rejectOnEmpty: true })
     : await createLayout();
   const number = 1 + (await Revision.count({ where: { layoutId: layout.id } }));
-  return Revision.create({ layoutId: layout.id, number, issuedBy: options.issuedBy ?? null, ...emptySnapshot(layout) });
+  const frozen = emptySnapshot(layout, options.snapshot);
+  return Revision.create({ layoutId: layout.id, number, issuedBy: options.issuedBy ?? null, ...frozen });
 }
 
 interface ShareLinkOptions {
@@ -68,5 +77,20 @@ export async function createMap(options: { organisationId?: string } = {}): Prom
     input: {},
     grid: { originMm: [-1000, -1000], stepMm: 50, columns: 40, rows: 40 },
     tileCount: 1,
+  });
+}
+
+/** A finished map whose one tile holds these bytes. */
+export async function createFinishedMap(organisationId: string, bytes = Buffer.from('tile')): Promise<DexterityMap> {
+  const map = await createMap({ organisationId });
+  const none: number[] = [];
+  const quantiles = { inverseConditionNumber: none, maximumToolSpeed: none, sureSpeed: none };
+  await MapTile.create({ mapId: map.id, index: 0, attempt: 1, bytes });
+  return map.update({
+    state: 'done',
+    attempt: 1,
+    tilesDone: 1,
+    finishedAt: new Date(),
+    summary: { reachedAreaM2: 0, bestInverseConditionNumber: null, fastestToolSpeed: null, quantiles },
   });
 }

@@ -8,9 +8,16 @@ import { Arm, FloorPlan, Layout, LayoutItem, Project } from '@/models';
 import { unique } from './counter';
 import { createOrganisation } from './people';
 
-export async function createProject(options: { organisationId?: string; createdBy?: string } = {}): Promise<Project> {
+interface ProjectOptions {
+  organisationId?: string;
+  createdBy?: string;
+  name?: string;
+}
+
+export async function createProject(options: ProjectOptions = {}): Promise<Project> {
   const organisationId = options.organisationId ?? (await createOrganisation()).id;
-  return Project.create({ organisationId, name: unique('Project'), createdBy: options.createdBy ?? null });
+  const name = options.name ?? unique('Project');
+  return Project.create({ organisationId, name, createdBy: options.createdBy ?? null });
 }
 
 /** The row only: nothing lies in the object store. */
@@ -31,6 +38,7 @@ export async function createFloorPlan(options: { projectId?: string } = {}): Pro
 interface LayoutOptions {
   projectId?: string;
   createdBy?: string;
+  name?: string;
   items?: Item[];
 }
 
@@ -40,7 +48,7 @@ export async function createLayout(options: LayoutOptions = {}): Promise<Layout>
   const layout = await Layout.create({
     projectId,
     letter,
-    name: unique('Variant'),
+    name: options.name ?? unique('Variant'),
     mapSettings: mapSettingsSchema.parse({}),
     createdBy: options.createdBy ?? null,
   });
@@ -137,8 +145,8 @@ export function robotItem(armId: string): Item {
   return robotSchema.parse({ kind: 'robot', id: randomUUID(), name: 'R1', xMm: 0, yMm: 0, angleDeg: 0, armId });
 }
 
-/** A snapshot of an empty layout, and its SHA-256 as plain JSON. */
-export function emptySnapshot(layout: Layout): { snapshot: Snapshot; sha256: string } {
+/** What a revision of an empty layout freezes; `parts` are put in place of the empty ones. */
+export function emptySnapshot(layout: Layout, parts: Partial<Snapshot> = {}): { snapshot: Snapshot; sha256: string } {
   const snapshot: Snapshot = {
     format: 1,
     projectName: 'Project',
@@ -151,6 +159,8 @@ export function emptySnapshot(layout: Layout): { snapshot: Snapshot; sha256: str
     floorPlan: null,
     mapSettings: layout.mapSettings,
     maps: [],
+    ...parts,
   };
+  // Of plain JSON; the product's own hash is of canonical JSON.
   return { snapshot, sha256: createHash('sha256').update(JSON.stringify(snapshot)).digest('hex') };
 }

@@ -1,3 +1,4 @@
+import '../load-env';
 import { sequelize } from '@/lib/server/database';
 import { env } from '@/lib/server/env';
 import { letViewerIn, seedBase } from '../seed/base';

@@ -71,8 +71,10 @@ async function account(
   const password = known.find((entry) => entry.email === email)?.password ?? makePassword();
   let user = await User.findOne({ where: { email }, transaction });
   if (!user) user = await User.create({ email, name, passwordHash: await hashPassword(password) }, { transaction });
-  else if (!(await verifyPassword(user.passwordHash, password)))
-    await user.update({ passwordHash: await hashPassword(password) }, { transaction });
+  else if (!(await verifyPassword(user.passwordHash, password))) {
+    const sessionGeneration = user.sessionGeneration + 1;
+    await user.update({ passwordHash: await hashPassword(password), sessionGeneration }, { transaction });
+  }
   const membership = { userId: user.id, organisationId, role };
   const [{ id: membershipId }] = await Membership.findOrCreate({
     where: { userId: user.id },

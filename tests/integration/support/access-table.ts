@@ -1,0 +1,145 @@
+import { randomUUID } from 'node:crypto';
+import sharp from 'sharp';
+import { randomToken } from '@/lib/server/tokens';
+import { dimensionSchema } from '@/lib/layout/items';
+import { unique, uniqueEmail } from '@/tests/factories';
+import type { CallOptions } from '@/tests/factories';
+import { newQuestion } from './access-world';
+import type { AccessWorld } from './access-world';
+import { uploadForm } from './upload';
+
+/**
+ * Who asks, in the order of the table's columns: nobody · the holder of a share link to a revision of the project · a viewer
+ * of another project · an admin of another organisation · a viewer of the project · planner · integrator · admin.
+ */
+export const CALLERS = [
+  'nobody',
+  'linkHolder',
+  'otherViewer',
+  'stranger',
+  'viewer',
+  'planner',
+  'integrator',
+  'admin',
+] as const;
+export type Caller = (typeof CALLERS)[number];
+
+type Prepare = (world: AccessWorld, caller: Caller) => Promise<CallOptions> | CallOptions;
+export interface Row {
+  method: string;
+  /** Folder under app/api. */
+  path: string;
+  /** A status for each of CALLERS. */
+  statuses: readonly number[];
+  prepare: Prepare;
+}
+
+const row = (method: string, path: string, statuses: readonly number[], prepare: Prepare = () => ({})): Row => ({
+  method,
+  path,
+  statuses,
+  prepare,
+});
+
+const project: Prepare = ({ projectId }) => ({ params: { projectId } });
+const floorPlan: Prepare = ({ floorPlanId }) => ({ params: { floorPlanId } });
+const layout: Prepare = ({ layoutId }) => ({ params: { layoutId } });
+const revision: Prepare = ({ revisionId }) => ({ params: { revisionId } });
+const map: Prepare = ({ mapId }) => ({ params: { mapId } });
+const withBody =
+  (prepare: Prepare, body: unknown): Prepare =>
+  async (world, caller) => ({ ...(await prepare(world, caller)), body });
+
+/** Only the holder has the link's token; whatever else somebody is, another token opens nothing. */
+const shared =
+  (more: (world: AccessWorld) => object = () => ({}), body?: unknown): Prepare =>
+  (world, caller) => ({
+    params: { token: caller === 'linkHolder' ? world.token : randomToken(), ...more(world) },
+    body,
+  });
+
+const guest = { name: 'Vera Guest', email: uniqueEmail() };
+const remark = { xMm: 10, yMm: 20, body: 'Here?' };
+const dimension = () =>
+  dimensionSchema.parse({
+    kind: 'dimension',
+    id: randomUUID(),
+    name: 'D',
+    xMm: 0,
+    yMm: 0,
+    angleDeg: 0,
+    fromMm: [0, 0],
+    toMm: [1, 0],
+  });
+const png = () =>
+  sharp({ create: { width: 30, height: 20, channels: 3, background: 'white' } })
+    .png()
+    .toBuffer();
+
+// prettier-ignore
+export const TABLE: readonly Row[] = [
+  //                                                       nobody link  other stranger viewer plan. integ. admin
+  row('GET',    'account',                                  [401, 401,  200,  200,     200,   200,  200,   200]),
+  row('POST',   'account/password-reset',                   [202, 202,  202,  202,     202,   202,  202,   202], () => ({ body: { email: uniqueEmail() } })),
+  row('POST',   'account/password-reset/[token]',           [404, 404,  404,  404,     404,   404,  404,   404], () => ({ params: { token: randomToken() }, body: { password: 'a new long password' } })),
+
+  row('GET',    'members',                                  [401, 401,  403,  200,     403,   200,  200,   200]),
+  row('PATCH',  'members/[memberId]',                       [401, 401,  403,  404,     403,   403,  403,   200], async (world) => ({ params: { memberId: (await world.addMember()).membership.id }, body: { role: 'viewer' } })),
+  row('DELETE', 'members/[memberId]',                       [401, 401,  403,  404,     403,   403,  403,   204], async (world) => ({ params: { memberId: (await world.addMember()).membership.id } })),
+  row('GET',    'invitations',                              [401, 401,  403,  200,     403,   403,  403,   200]),
+  row('POST',   'invitations',                              [401, 401,  403,  201,     403,   403,  403,   201], () => ({ body: { email: uniqueEmail(), role: 'planner' } })),
+  row('DELETE', 'invitations/[invitationId]',               [401, 401,  403,  404,     403,   403,  403,   204], async (world) => ({ params: { invitationId: (await world.addInvitation()).id } })),
+  row('GET',    'invitations/accept/[token]',               [404, 404,  404,  404,     404,   404,  404,   404], () => ({ params: { token: randomToken() } })),
+  row('POST',   'invitations/accept/[token]',               [404, 404,  404,  404,     404,   404,  404,   404], () => ({ params: { token: randomToken() }, body: { name: 'Nia', password: 'a new long password' } })),
+
+  row('GET',    'arms',                                     [401, 401,  403,  200,     403,   200,  200,   200]),
+  row('GET',    'arms/[armId]',                             [401, 401,  403,  404,     403,   200,  200,   200], ({ armId }) => ({ params: { armId } })),
+
+  row('GET',    'projects',                                 [401, 401,  200,  200,     200,   200,  200,   200]),
+  row('POST',   'projects',                                 [401, 401,  403,  201,     403,   201,  201,   201], () => ({ body: { name: unique('Project') } })),
+  row('GET',    'projects/[projectId]',                     [401, 401,  404,  404,     200,   200,  200,   200], project),
+  row('PATCH',  'projects/[projectId]',                     [401, 401,  403,  404,     403,   200,  200,   200], withBody(project, { siteName: 'Bay 4' })),
+  row('GET',    'projects/[projectId]/floor-plans',         [401, 401,  403,  404,     403,   200,  200,   200], project),
+  row('POST',   'projects/[projectId]/floor-plans',         [401, 401,  403,  404,     403,   201,  201,   201], async (world, caller) => ({ ...(await project(world, caller)), body: uploadForm({ file: { name: 'plan.png', bytes: await png() } }) })),
+  row('GET',    'projects/[projectId]/layouts',             [401, 401,  404,  404,     200,   200,  200,   200], project),
+  row('POST',   'projects/[projectId]/layouts',             [401, 401,  403,  404,     403,   201,  201,   201], withBody(project, { name: 'Variant' })),
+
+  row('GET',    'floor-plans/[floorPlanId]',                [401, 401,  403,  404,     403,   200,  200,   200], floorPlan),
+  row('PATCH',  'floor-plans/[floorPlanId]',                [401, 401,  403,  404,     403,   200,  200,   200], withBody(floorPlan, { name: 'Hall' })),
+  row('DELETE', 'floor-plans/[floorPlanId]',                [401, 401,  403,  404,     403,   204,  204,   204], async (world) => ({ params: { floorPlanId: (await world.addFloorPlan()).id } })),
+  // The plan under an issued revision; any other is a draft to a viewer (test below).
+  row('GET',    'floor-plans/[floorPlanId]/picture',        [401, 401,  404,  404,     200,   200,  200,   200], floorPlan),
+
+  row('GET',    'layouts/[layoutId]',                       [401, 401,  403,  404,     403,   200,  200,   200], layout),
+  row('PATCH',  'layouts/[layoutId]',                       [401, 401,  403,  404,     403,   200,  200,   200], withBody(layout, { name: 'Variant' })),
+  row('DELETE', 'layouts/[layoutId]',                       [401, 401,  403,  404,     403,   204,  204,   204], async (world) => ({ params: { layoutId: (await world.addLayout()).id } })),
+  row('GET',    'layouts/[layoutId]/changes',               [401, 401,  403,  404,     403,   200,  200,   200], ({ layoutId }) => ({ params: { layoutId }, path: '/?since=0' })),
+  row('POST',   'layouts/[layoutId]/operations',            [401, 401,  403,  404,     403,   200,  200,   200], (world) => ({ params: { layoutId: world.layoutId }, body: { id: randomUUID(), operations: [{ type: 'put', baseVersion: 0, item: dimension() }] } })),
+  row('GET',    'layouts/[layoutId]/remarks',               [401, 401,  404,  404,     200,   200,  200,   200], layout),
+  row('GET',    'layouts/[layoutId]/revisions',             [401, 401,  404,  404,     200,   200,  200,   200], layout),
+  row('POST',   'layouts/[layoutId]/revisions',             [401, 401,  403,  404,     403,   403,  201,   201], withBody(layout, {})),
+
+  row('POST',   'maps',                                     [401, 401,  403,  404,     403,   202,  202,   202], ({ armId }) => ({ body: newQuestion(armId) })),
+  // A map that an issued revision names; any other is a draft to a viewer (test below).
+  row('GET',    'maps/[mapId]',                             [401, 401,  404,  404,     200,   200,  200,   200], map),
+  row('GET',    'maps/[mapId]/tiles',                       [401, 401,  404,  404,     200,   200,  200,   200], map),
+  row('POST',   'maps/[mapId]/cancel',                      [401, 401,  403,  404,     403,   200,  200,   200], async (world) => ({ params: { mapId: (await world.addQueuedMap()).id } })),
+  row('POST',   'maps/[mapId]/retry',                       [401, 401,  403,  404,     403,   200,  200,   200], async (world) => ({ params: { mapId: (await world.addFailedMap()).id } })),
+
+  row('GET',    'revisions/[revisionId]',                   [401, 401,  404,  404,     200,   200,  200,   200], revision),
+  row('GET',    'revisions/[revisionId]/remarks',           [401, 401,  404,  404,     200,   200,  200,   200], revision),
+  row('POST',   'revisions/[revisionId]/remarks',           [401, 401,  404,  404,     201,   201,  201,   201], withBody(revision, remark)),
+  row('GET',    'revisions/[revisionId]/share-links',       [401, 401,  403,  404,     403,   200,  200,   200], revision),
+  row('POST',   'revisions/[revisionId]/share-links',       [401, 401,  403,  404,     403,   403,  201,   201], withBody(revision, {})),
+  row('DELETE', 'share-links/[shareLinkId]',                [401, 401,  403,  404,     403,   403,  200,   200], async (world) => ({ params: { shareLinkId: (await world.addShareLink()).id } })),
+  row('PATCH',  'remarks/[remarkId]',                       [401, 401,  403,  404,     403,   200,  200,   200], ({ remarkId }) => ({ params: { remarkId }, body: { resolved: true } })),
+  row('POST',   'remarks/[remarkId]/replies',               [401, 401,  404,  404,     201,   201,  201,   201], ({ remarkId }) => ({ params: { remarkId }, body: { body: 'Yes' } })),
+
+  row('GET',    'share/[token]',                            [404, 200,  404,  404,     404,   404,  404,   404], shared()),
+  row('GET',    'share/[token]/picture',                    [404, 200,  404,  404,     404,   404,  404,   404], shared()),
+  row('GET',    'share/[token]/maps/[mapId]',               [404, 200,  404,  404,     404,   404,  404,   404], shared(({ mapId }) => ({ mapId }))),
+  row('GET',    'share/[token]/maps/[mapId]/tiles',         [404, 200,  404,  404,     404,   404,  404,   404], shared(({ mapId }) => ({ mapId }))),
+  row('GET',    'share/[token]/remarks',                    [404, 200,  404,  404,     404,   404,  404,   404], shared()),
+  row('POST',   'share/[token]/remarks',                    [404, 201,  404,  404,     404,   404,  404,   404], shared(undefined, { ...remark, guest })),
+  row('POST',   'share/[token]/remarks/[remarkId]/replies', [404, 201,  404,  404,     404,   404,  404,   404], shared(({ remarkId }) => ({ remarkId }), { body: 'Yes', guest })),
+];
