@@ -60,6 +60,14 @@ describe.each(TABLE)('$method /api/$path', (row) => {
   );
 });
 
+it('those inside do read what is kept from the others', async () => {
+  for (const caller of ['viewer', 'planner'] as const) {
+    for (const folder of ['projects', 'projects/[projectId]', 'revisions/[revisionId]']) {
+      expect(await (await ask(rowOf('GET', folder), caller)).text()).toContain(SECRET);
+    }
+  }
+});
+
 function isOutside(caller: Caller): boolean {
   return caller === 'nobody' || caller === 'otherViewer' || caller === 'stranger';
 }
