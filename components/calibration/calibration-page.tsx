@@ -3,7 +3,7 @@
 import dynamic from 'next/dynamic';
 import { useRouter } from 'next/navigation';
 import { useEffect, useState } from 'react';
-import { ProjectFault } from '@/components/projects/project-fault';
+import { SubjectFault } from '@/components/shell/subject-fault';
 import { Button } from '@/components/ui/button';
 import { formatFigure } from '@/components/ui/figure';
 import { LinkButton } from '@/components/ui/link-button';
@@ -35,7 +35,7 @@ interface CalibrationPageProps {
 export function CalibrationPage({ projectId, floorPlanId }: CalibrationPageProps) {
   const { data: floorPlan, error, mutate } = useFloorPlan(floorPlanId);
   if (floorPlan) return <Workbench projectId={projectId} floorPlan={floorPlan} />;
-  if (error) return <ProjectFault what="This floor plan" error={error} onRetry={() => void mutate()} />;
+  if (error) return <SubjectFault what="This floor plan" error={error} onRetry={() => void mutate()} />;
   return (
     <>
       <TitleBlock cells={[{ label: 'Floor plan', value: '…', heading: true }]} />

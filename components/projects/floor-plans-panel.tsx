@@ -12,7 +12,7 @@ import { Progress } from '@/components/ui/progress';
 import { toast } from '@/components/ui/toaster';
 import { useFloorPlans } from '@/lib/client/use-floor-plans';
 import type { FloorPlan } from '@/lib/contracts/floor-plans';
-import { DataPart } from './data-part';
+import { DataPart } from '@/components/ui/data-part';
 import { FloorPlanRow } from './floor-plan-row';
 import { useUploads } from './use-uploads';
 

@@ -10,7 +10,7 @@ import { useMayActAs } from '@/lib/client/account-context';
 import { useRevisions } from '@/lib/client/use-revisions';
 import type { LayoutSummary } from '@/lib/contracts/layouts';
 import type { RevisionSummary } from '@/lib/contracts/revisions';
-import { DataPart } from './data-part';
+import { DataPart } from '@/components/ui/data-part';
 import { STATE_WORDS } from './state-words';
 
 /** The revisions of one variant, newest first. */

@@ -9,7 +9,7 @@ import { useLayouts } from '@/lib/client/use-project';
 import { useLayoutRemarks } from '@/lib/client/use-remarks';
 import type { LayoutSummary } from '@/lib/contracts/layouts';
 import type { Remark } from '@/lib/contracts/remarks';
-import { DataPart } from './data-part';
+import { DataPart } from '@/components/ui/data-part';
 
 /** The remarks that wait for an answer, each leading to its spot on the revision. */
 export function OpenRemarksPanel({ projectId, count }: { projectId: string; count: number }) {

@@ -12,7 +12,7 @@ import { useProject } from '@/lib/client/use-project';
 import { useProjectActions } from '@/lib/client/use-projects';
 import { FloorPlansPanel } from './floor-plans-panel';
 import { OpenRemarksPanel } from './open-remarks-panel';
-import { ProjectFault } from './project-fault';
+import { SubjectFault } from '@/components/shell/subject-fault';
 import { RevisionsPanel } from './revisions-panel';
 import { VariantsPanel } from './variants-panel';
 
@@ -22,7 +22,7 @@ export function ProjectPage({ projectId }: { projectId: string }) {
   const mayPlan = useMayActAs('planner');
   const { change } = useProjectActions();
   const [isRenaming, setIsRenaming] = useState(false);
-  if (error && !project) return <ProjectFault error={error} onRetry={() => void mutate()} />;
+  if (error && !project) return <SubjectFault error={error} onRetry={() => void mutate()} />;
 
   return (
     <>

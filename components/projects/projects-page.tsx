@@ -64,7 +64,8 @@ export function ProjectsPage() {
       />
       <Page>
         <Panel
-          title={<h1>Projects</h1>}
+          title="Projects"
+          level={1}
           aside={
             <div className="flex flex-wrap items-center gap-2">
               <span className="relative">

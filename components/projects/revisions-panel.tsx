@@ -4,7 +4,7 @@ import { EmptyState } from '@/components/ui/empty-state';
 import { Panel } from '@/components/ui/panel';
 import { useMayActAs } from '@/lib/client/account-context';
 import { useLayouts } from '@/lib/client/use-project';
-import { DataPart } from './data-part';
+import { DataPart } from '@/components/ui/data-part';
 import { LayoutRevisions } from './layout-revisions';
 
 /** What was issued: every revision of every variant, and the links that lead customers to them. */

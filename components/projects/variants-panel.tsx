@@ -14,7 +14,7 @@ import { toast } from '@/components/ui/toaster';
 import { useLayoutActions, useLayouts } from '@/lib/client/use-project';
 import type { LayoutSummary } from '@/lib/contracts/layouts';
 import { CompareBar } from './compare-bar';
-import { DataPart } from './data-part';
+import { DataPart } from '@/components/ui/data-part';
 
 /** The variants of the project: open, copy, rename, delete, and set two of them against each other. */
 export function VariantsPanel({ projectId }: { projectId: string }) {

@@ -6,7 +6,7 @@ interface PanelProps {
   /** Stands at the right end of the title line: a count, a unit, an action. */
   aside?: ReactNode;
   /** The heading's level on its page. */
-  level?: 2 | 3;
+  level?: 1 | 2 | 3;
   /** Without it the content meets the rules, as tables do. */
   padded?: boolean;
   className?: string;
@@ -16,7 +16,7 @@ interface PanelProps {
 
 /** A ruled panel: a title line, an ink rule, and what stands under it. */
 export function Panel({ title, aside, level = 2, padded = false, className, id, children }: PanelProps) {
-  const Heading = level === 2 ? 'h2' : 'h3';
+  const Heading = `h${level}` as const;
   return (
     <section id={id} className={classNames('min-w-0 border border-rule bg-sheet', className)}>
       {(title || aside) && (

@@ -7,7 +7,7 @@ import { Page } from '@/components/ui/page';
 import { TitleBlock } from '@/components/ui/title-block';
 import type { ProblemError } from '@/lib/client/fetcher';
 
-interface ProjectFaultProps {
+interface SubjectFaultProps {
   error: ProblemError;
   onRetry: () => void;
   /** What could not be shown, as in “This project”. */
@@ -15,7 +15,7 @@ interface ProjectFaultProps {
 }
 
 /** A page whose subject is not there or cannot be read now. */
-export function ProjectFault({ error, onRetry, what = 'This project' }: ProjectFaultProps) {
+export function SubjectFault({ error, onRetry, what = 'This project' }: SubjectFaultProps) {
   const gone = error.status === 404 || error.status === 400 || error.status === 422;
   return (
     <>

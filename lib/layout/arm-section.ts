@@ -1,0 +1,58 @@
+import { compileChain, forward, makeStance } from '@/lib/kinematics/chain';
+import { reach } from '@/lib/kinematics/reach';
+import { makeSolver } from '@/lib/kinematics/solver';
+import type { Arm } from '@/lib/kinematics/types';
+
+/** A vertical cut through an arm's first axis: mm, x away from the axis, z up from the base. */
+
+export type SectionPoint = readonly [xMm: number, zMm: number];
+
+export interface SectionPosture {
+  /** From the base along the joint axes to the tool point; points that fall together are given once. */
+  readonly body: readonly SectionPoint[];
+  /** Where each joint lies that moves within the cut, with its number counted from one. */
+  readonly joints: readonly { readonly number: number; readonly at: SectionPoint }[];
+}
+
+/** Where a posture is looked for that shows the arm at work: shares of its reach (out, up) with the tool straight down. */
+const SPOTS = [
+  [0.7, 0.25],
+  [0.6, 0.1],
+  [0.7, 0.05],
+  [0.8, -0.1],
+] as const;
+
+function workingPosture(arm: Arm, reachM: number): ArrayLike<number> {
+  const solver = makeSolver(arm);
+  for (const [out, up] of SPOTS) {
+    const position = [out * reachM, 0, up * reachM] as const;
+    const answer = reach(solver, { position, direction: [0, 0, -1], roll: 'free' });
+    const [first] = answer.postures;
+    if (first) return first.posture;
+  }
+  const { min, max } = solver.chain;
+  return min.map((value, index) => (value + max[index]) / 2);
+}
+
+const TOGETHER_MM = 1;
+
+/** The arm in a posture with the tool pointing down, or in the middle of its ranges where it cannot point down. */
+export function sectionPosture(arm: Arm, reachMm: number): SectionPosture {
+  const chain = compileChain(arm);
+  const { origins, axes, tool } = forward(chain, workingPosture(arm, reachMm / 1000), makeStance(chain));
+  const body: SectionPoint[] = [[1000 * chain.base[3], 1000 * chain.base[11]]];
+  const joints: { number: number; at: SectionPoint }[] = [];
+  const add = (at: SectionPoint): void => {
+    const last = body[body.length - 1];
+    if (Math.hypot(at[0] - last[0], at[1] - last[1]) > TOGETHER_MM) body.push(at);
+  };
+  for (let joint = 0; joint < chain.joints; joint++) {
+    const at: SectionPoint = [1000 * origins[3 * joint], 1000 * origins[3 * joint + 2]];
+    add(at);
+    // An axis that stands across the cut turns the arm within it.
+    const isAcross = Math.abs(axes[3 * joint + 1]) > 0.9;
+    if (isAcross && !chain.prismatic[joint]) joints.push({ number: joint + 1, at });
+  }
+  add([1000 * tool[3], 1000 * tool[11]]);
+  return { body, joints };
+}
