@@ -1,0 +1,46 @@
+import type { Transform } from '../transforms';
+
+/** Postures that put the flange on a pose, before limits and modulo 2π; the next call overwrites them. */
+export interface Branches {
+  count: number;
+  /** Posture b at b × joints. */
+  readonly values: Float64Array;
+  /** Class of posture b; what the number means is told by `ClosedForm.nameOf`. */
+  readonly codes: Uint8Array;
+  /** Why there is none (count 0): how far the wanted spot lies outside (m), or a direction that the chain can't take. */
+  shortfall: 'none' | 'too far' | 'too near' | 'direction';
+  by: number;
+}
+
+/** A chain solved in closed form. Poses are of the flange in the frame of the chain's base. */
+export interface ClosedForm {
+  readonly branches: Branches;
+  readonly classes: number;
+  solve(flange: Transform): Branches;
+  nameOf(code: number): string;
+}
+
+export function makeBranches(capacity: number, joints: number): Branches {
+  return {
+    count: 0,
+    values: new Float64Array(capacity * joints),
+    codes: new Uint8Array(capacity),
+    shortfall: 'none',
+    by: 0,
+  };
+}
+
+/**
+ * The angle between two links of lengths l2 and l3 whose ends are √`square` apart, or NaN outside. Taken from the two distances to
+ * the stretched and the folded elbow rather than from a cosine, which keeps its digits near both.
+ */
+export function elbowAngle(square: number, l2: number, l3: number): number {
+  const stretched = (l2 + l3) * (l2 + l3) - square;
+  const folded = square - (l2 - l3) * (l2 - l3);
+  const slack = ELBOW_CLAMP * (l2 + l3) * (l2 + l3);
+  if (stretched < -slack || folded < -slack) return NaN;
+  return 2 * Math.atan2(Math.sqrt(Math.max(0, stretched)), Math.sqrt(Math.max(0, folded)));
+}
+
+/** Rounding at the boundary of reach, as a share of the squared reach: such spots count as just reached. */
+const ELBOW_CLAMP = 1e-13;
