@@ -23,4 +23,5 @@ export { makeSpotReader, readSpot, type SpotPosture, type SpotReading } from './
 export { velocityOutlines, type VelocityOutline, type VelocityOutlines } from './velocity-outline';
 export { computeMapTile, makeMapComputer, type MapComputer } from './maps/compute-tile';
 export { decodeMapTile, encodeMapTile, makeMapTile } from './maps/tile-codec';
+export { analyse, reasonInWords, type Answers, type Questions } from './analyse';
 export { mapSummary, type MapSummary } from './maps/summary';

@@ -114,12 +114,22 @@ const NEARNESS: readonly Reason[] = [
 ];
 
 function bestOf(answers: ReachAnswer[]): ReachAnswer {
-  const postures = answers.flatMap((answer) => answer.postures);
+  const postures = withoutTwins(answers.flatMap((answer) => answer.postures));
   if (postures.length > 0) return { reached: true, reason: 'reached', joint: -1, by: 0, postures };
   return answers.reduce((best, answer) => {
     const order = NEARNESS.indexOf(answer.reason) - NEARNESS.indexOf(best.reason);
     return order < 0 || (order === 0 && answer.by < best.by) ? answer : best;
   });
+}
+
+/** Arms that take no roll answer every roll with the same postures. */
+function withoutTwins(postures: ReachingPosture[]): ReachingPosture[] {
+  const kept: ReachingPosture[] = [];
+  for (const candidate of postures) {
+    const twin = kept.some(({ posture }) => posture.every((q, i) => Math.abs(q - candidate.posture[i]) < LIMIT_SLACK));
+    if (!twin) kept.push(candidate);
+  }
+  return kept;
 }
 
 function reachNumerically(solver: Solver, pose: Transform, freeRoll: boolean): ReachAnswer {
