@@ -166,6 +166,15 @@ describe('a batch of edits', () => {
   });
 });
 
+describe('items of one batch', () => {
+  it('stand in the list as they were sent, also after one of them was moved', async () => {
+    const blocks = Array.from({ length: 12 }, (_, index) => block(index));
+    await edit(blocks.map((item) => put(item)));
+    await edit([put({ ...blocks[5], xMm: 70 }, 1)]);
+    expect((await changes(0)).items.map(({ item }) => item.id)).toEqual(blocks.map(({ id }) => id));
+  });
+});
+
 describe('changes since a version', () => {
   it('are only those after it', async () => {
     const [first, second] = [block(1), block(2)];

@@ -36,8 +36,10 @@ export async function storeItems(
   const removed = itemIds.filter((id) => !standing.has(id));
   const layoutVersion = layout.version;
 
+  // One behind another in time: items without a place in the list stand there as they were sent.
+  const startMs = Date.now();
   await LayoutItem.bulkCreate(
-    puts.map(({ version, item }) => ({
+    puts.map(({ version, item }, index) => ({
       layoutId: layout.id,
       id: item.id,
       version,
@@ -45,6 +47,7 @@ export async function storeItems(
       data: item,
       layoutVersion,
       removedAt: null,
+      createdAt: new Date(startMs + index),
     })),
     {
       conflictAttributes: ['layoutId', 'id'],

@@ -1,0 +1,122 @@
+import { rectangleOutline } from '@/lib/layout/geometry';
+import { dimensionSchema, guardLineSchema, obstacleSchema, walkwaySchema, type Item } from '@/lib/layout/items';
+import type { Hall } from './draw-hall';
+import { at, fixture, robot, type Place } from './items';
+
+/** All invented. The origin is the crossing of two building axes outside the hall. */
+export const PUMP_HALL: Hall = {
+  left: 700,
+  right: 8300,
+  near: 900,
+  far: 7100,
+  aisle: 2250,
+  door: { x: 6400, width: 900 },
+  title: 'Quillfen Pumps, hall 2, bay 4, dimensions in mm',
+};
+
+const RISER_MM = 350;
+
+/** Where the robots stand in the variants: first one alone in the middle, then two, then the second one turned in. */
+export const PLACES = {
+  alone: [4900, 3780, 90],
+  r1: [3720, 3920, 17],
+  r2FaceToFace: [6400, 3140, -166],
+  r2TurnedIn: [6100, 3740, 150],
+} as const satisfies Record<string, Place>;
+
+export const pumpRobot = (name: string, armId: string, place: Place) => robot(name, armId, place, RISER_MM);
+
+/** The distance between the robots along x. */
+export function robotsApart(fromXMm: number, toXMm: number): Item {
+  return dimensionSchema.parse({
+    kind: 'dimension',
+    name: 'Robots apart',
+    ...at([fromXMm, 5530, 0]),
+    fromMm: [0, 0],
+    toMm: [toXMm - fromXMm, 0],
+    offsetMm: 370,
+  });
+}
+
+function stations(): Item[] {
+  return [
+    fixture(
+      'Fixture A · pump housing',
+      [4490, 4430, -12],
+      [1100, 640, 820],
+      [
+        ['Fixture A 1', -322, 187, 850, { speedMmS: 400, dwellS: 1.5 }],
+        ['Fixture A 2', -73, -52, 850, { speedMmS: 400, dwellS: 1.5 }],
+        ['Fixture A 3', 312, 10, 850, { speedMmS: 400, dwellS: 1.5 }],
+      ],
+      20,
+    ),
+    fixture(
+      'Infeed tray',
+      [3090, 5230, 8],
+      [840, 840, 800],
+      [
+        ['Infeed 1', -60, -230, 850, { speedMmS: 250, dwellS: 0.5 }],
+        ['Infeed 2', 180, -60, 850, { speedMmS: 250, dwellS: 0.5 }],
+      ],
+      10,
+    ),
+    fixture(
+      'Deburr stand',
+      [6920, 4400, -4],
+      [700, 1200, 900],
+      [
+        ['Deburr 1', -65, 315, 950, { speedMmS: 300, dwellS: 2 }],
+        ['Deburr 2', -95, -200, 950, { tiltDeg: 15, speedMmS: 300, dwellS: 2 }],
+      ],
+      50,
+    ),
+    fixture(
+      'Outfeed conveyor',
+      [5250, 2840, 0],
+      [1700, 420, 760],
+      [
+        ['Outfeed 1', -770, 60, 800, { speedMmS: 250 }],
+        ['Outfeed 2', 650, 0, 800, { speedMmS: 250 }],
+      ],
+      30,
+    ),
+  ];
+}
+
+function surroundings(): Item[] {
+  return [
+    obstacleSchema.parse({
+      kind: 'obstacle',
+      name: 'Control cabinet',
+      ...at([1100, 3400, 0]),
+      outlineMm: rectangleOutline(500, 900),
+      zToMm: 2000,
+    }),
+    guardLineSchema.parse({
+      kind: 'guardLine',
+      name: 'Perimeter guard',
+      ...at([1500, 2440, 0]),
+      pointsMm: [
+        [0, 0],
+        [6100, 0],
+        [6100, 3910],
+        [0, 3910],
+      ],
+      heightMm: 2000,
+    }),
+    walkwaySchema.parse({
+      kind: 'walkway',
+      name: 'Aisle, keep 1200 mm clear',
+      ...at([PUMP_HALL.left, 1650, 0]),
+      pointsMm: [
+        [0, 0],
+        [PUMP_HALL.right - PUMP_HALL.left, 0],
+      ],
+      widthMm: 1200,
+    }),
+  ];
+}
+
+/** Everything but the robots: the same in every variant. */
+export const pumpStations = (): Item[] => [...stations(), ...surroundings()];
