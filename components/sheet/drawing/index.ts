@@ -1,0 +1,11 @@
+export { FloorPlanLayer, pictureWidthFor } from './floor-plan-layer';
+export { GridLayer } from './grid-layer';
+export { GroundLayer, OverlayLayer } from './ground-layer';
+export { ItemsLayer, type ItemsLayerProps } from './items-layer';
+export { MapLayer, type MapLayerProps } from './map-layer';
+export { RemarkPins, type PinnedRemark } from './remark-pins';
+export { SelectionHandles } from './selection-handles';
+export { SheetStage, type SheetStageProps } from './sheet-stage';
+export type { DrawingMode, DrawnArm, DrawnBand, SheetPointer } from './types';
+export { usePalette } from './use-palette';
+export { useStageFrame } from './viewport-context';
