@@ -1,0 +1,34 @@
+import { execFileSync } from 'node:child_process';
+import { defineConfig } from '@playwright/test';
+
+/** Debian's own Chromium: nothing may download a browser. */
+const chromium = execFileSync('sh', ['-c', 'command -v chromium'], { encoding: 'utf8' }).trim();
+
+export default defineConfig({
+  testDir: 'tests/browser',
+  outputDir: 'test-results',
+  // One set of services and one demo for all: stories run one after another.
+  workers: 1,
+  fullyParallel: false,
+  timeout: 90_000,
+  expect: { timeout: 15_000 },
+  reporter: [['list'], ['json']],
+  use: {
+    baseURL: process.env.APP_URL,
+    viewport: { width: 1440, height: 900 },
+    screenshot: 'only-on-failure',
+    trace: 'retain-on-failure',
+    launchOptions: {
+      executablePath: chromium,
+      args: [
+        '--no-sandbox',
+        '--disable-gpu',
+        '--disable-quic',
+        '--no-first-run',
+        '--disable-background-networking',
+        '--disable-component-update',
+        '--disable-sync',
+      ],
+    },
+  },
+});
