@@ -84,11 +84,6 @@ export default [
     ['**/*.test.ts'],
   ),
   layer(
-    ['models/**'],
-    [anyOf('lib/contracts', 'lib/layout')],
-    'Models are columns, associations and scopes: shape answers in a presenter of lib/server.',
-  ),
-  layer(
     ['migrations/**'],
     [anyOf('lib', 'models', 'workers', 'app', 'components')],
     'A migration imports nothing: the code it would import changes, and it must not.',
