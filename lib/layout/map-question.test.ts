@@ -1,11 +1,13 @@
 import { describe, expect, it } from 'vitest';
+import { multiplyTransforms } from '@/lib/kinematics/transforms';
 import type { Arm } from '@/lib/kinematics/types';
 import { robotSchema, type Robot } from './items';
 import { finestStepMm, gridInMm, mapRequestOf, questionOfRobot } from './map-question';
 import { mapQuestionSchema } from './map-question-schema';
 import { mapSettingsSchema } from './map-settings';
 import { reachRadius } from './reach-radius';
-import { matrixOf, multiply, toolDirection, toolRotation } from './rotation';
+import { frameOnFloor } from './robot-frame';
+import { toolDirection, toolOrientation } from './tool-orientation';
 
 const link = { min: -Math.PI, max: Math.PI, maxSpeed: 1, maxAcceleration: 1, type: 'revolute', theta: 0 } as const;
 /** Upright first axis, then two links in a vertical plane. */
@@ -70,13 +72,12 @@ describe('the question of a robot', () => {
         settings({ tiltDeg, towards: 'heading', headingDeg, rollDeg }),
       );
       const radians = (degrees: number): number => (degrees * Math.PI) / 180;
-      const inBase = toolRotation(
-        toolDirection(tiltDeg, question.headingDeg),
-        radians(Number(question.settings.rollDeg)),
-      );
-      const onFloor = multiply(matrixOf([0, 0, radians(angleDeg)]), inBase);
-      const wanted = toolRotation(toolDirection(tiltDeg, headingDeg), radians(rollDeg));
-      onFloor.forEach((row, i) => row.forEach((value, j) => expect(value).toBeCloseTo(wanted[i][j], 7)));
+      const roll = radians(Number(question.settings.rollDeg));
+      const inBase = toolOrientation(toolDirection(tiltDeg, question.headingDeg), roll);
+      const turn = frameOnFloor({ xMm: 0, yMm: 0, angleDeg });
+      const onFloor = multiplyTransforms(turn, inBase, turn);
+      const wanted = toolOrientation(toolDirection(tiltDeg, headingDeg), radians(rollDeg));
+      onFloor.forEach((value, index) => expect(value).toBeCloseTo(wanted[index], 7));
     }
   });
 });

@@ -4,8 +4,8 @@ import type { Robot } from './items';
 import type { MapQuestion } from './map-question-schema';
 import type { MapSettings } from './map-settings';
 import { reachRadius } from './reach-radius';
-import { armWithTool, rotationOutOf } from './robot-frame';
-import { rollOf, toolDirection, toolRotation } from './rotation';
+import { armWithTool, poseInBase } from './robot-frame';
+import { rollOf, toolDirection, toolOrientation } from './tool-orientation';
 
 /**
  * From "this robot, these settings of the sheet" to the question that is stored and to what the kernel is asked. Robots that
@@ -52,8 +52,8 @@ function rollInBase(robot: Robot, settings: MapSettings): number | 'free' {
   if (rollDeg === 'free') return 'free';
   const upright = tiltDeg === 0 || tiltDeg === 180;
   if (settings.towards === 'outward' && !upright) return wrappedDeg(rollDeg);
-  const onFloor = toolRotation(toolDirection(tiltDeg, upright ? 0 : settings.headingDeg), radians(rollDeg));
-  return wrappedDeg((rollOf(rotationOutOf(-robot.angleDeg, onFloor)) * 180) / Math.PI);
+  const onFloor = toolOrientation(toolDirection(tiltDeg, upright ? 0 : settings.headingDeg), radians(rollDeg));
+  return wrappedDeg((rollOf(poseInBase(robot, onFloor)) * 180) / Math.PI);
 }
 
 /** What the kernel is asked: the arm in its base frame with the tool on it, and the grid of spots. */

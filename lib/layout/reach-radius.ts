@@ -1,5 +1,5 @@
+import { transformOf } from '@/lib/kinematics/transforms';
 import type { Arm, Joint } from '@/lib/kinematics/types';
-import { matrixOf, type Matrix3 } from './rotation';
 
 /** Sine below which two axes count as parallel. */
 const PARALLEL = 1e-9;
@@ -10,9 +10,9 @@ const PARALLEL = 1e-9;
  * carry it outward, so pedestals, first links and quills are left out.
  */
 export function reachRadius(arm: Arm): number {
-  const base = arm.base ?? { xyz: [0, 0, 0], rpy: [0, 0, 0] };
-  let radius = Math.hypot(base.xyz[0], base.xyz[1]);
-  let upright = isUpright(matrixOf(base.rpy));
+  const base = transformOf(arm.base);
+  let radius = Math.hypot(base[3], base[7]);
+  let upright = Math.hypot(base[2], base[6]) < PARALLEL;
   for (const joint of arm.joints) {
     // In Craig's convention the twist comes before the joint's own axis, in the standard one after it.
     if (arm.convention === 'modified') upright &&= keepsAxis(joint);
@@ -21,10 +21,6 @@ export function reachRadius(arm: Arm): number {
   }
   const tool = arm.tool?.xyz ?? [0, 0, 0];
   return radius + (upright ? Math.hypot(tool[0], tool[1]) : Math.hypot(...tool));
-}
-
-function isUpright(rotation: Matrix3): boolean {
-  return Math.hypot(rotation[0][2], rotation[1][2]) < PARALLEL;
 }
 
 function keepsAxis(joint: Joint): boolean {

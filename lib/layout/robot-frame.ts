@@ -1,7 +1,9 @@
+import { identityTransform, invertTransform, multiplyTransforms, transformOf } from '@/lib/kinematics/transforms';
+import type { Transform } from '@/lib/kinematics/transforms';
 import type { Arm, Frame, Vec3 } from '@/lib/kinematics/types';
-import { floorToItem, itemToFloor, turned, type Placement, type PointMm } from './geometry';
+import { floorToItem, itemToFloor, turned, type Placement } from './geometry';
 import type { Robot, Tool } from './items';
-import { frameOf, matrixOf, multiply, turn, type Matrix3 } from './rotation';
+import { frameOf } from './tool-orientation';
 
 /**
  * A robot's base frame: origin in the middle of its base plate, on top of the riser, x out of the base, z up. The arm, its
@@ -26,20 +28,29 @@ export function toolFrame(tool: ToolOffset): Frame {
 
 /** The arm with a tool on its flange, in its base frame. A tool transform of the library arm is its flange. */
 export function armWithTool(arm: Arm, tool: ToolOffset): Arm {
-  return { ...arm, tool: composed(arm.tool, toolFrame(tool)) };
-}
-
-/** One transform after another: `inner` is given in the frame that `outer` describes. */
-function composed(outer: Frame | undefined, inner: Frame): Frame {
+  const flange = arm.tool;
   // Taken over as it is: a way through sines and back would change its last digits, and with them the key of a map.
-  if (outer === undefined || isIdentity(outer)) return inner;
-  const rotation = matrixOf(outer.rpy);
-  const [x, y, z] = turn(rotation, inner.xyz);
-  return frameOf([outer.xyz[0] + x, outer.xyz[1] + y, outer.xyz[2] + z], multiply(rotation, matrixOf(inner.rpy)));
+  if (flange === undefined || isIdentity(flange)) return { ...arm, tool: toolFrame(tool) };
+  const toolPoint = multiplyTransforms(transformOf(flange), transformOf(toolFrame(tool)), identityTransform());
+  return { ...arm, tool: frameOf(toolPoint) };
 }
 
 function isIdentity({ xyz, rpy }: Frame): boolean {
   return [...xyz, ...rpy].every((value) => value === 0);
+}
+
+/** An item's own frame in the floor frame (m), its origin lifted by `zMm`. */
+export function frameOnFloor(placement: Placement, zMm = 0): Transform {
+  return transformOf({
+    xyz: [placement.xMm / 1000, placement.yMm / 1000, zMm / 1000],
+    rpy: [0, 0, radians(placement.angleDeg)],
+  });
+}
+
+/** A pose of the floor frame (m), in the base frame. */
+export function poseInBase(base: BasePlacement, onFloor: Transform): Transform {
+  const toBase = invertTransform(frameOnFloor(base, base.riserMm), identityTransform());
+  return multiplyTransforms(toBase, onFloor, toBase);
 }
 
 export function baseToFloor(base: BasePlacement, [xMm, yMm, zMm]: Point3Mm): [number, number, number] {
@@ -52,15 +63,10 @@ export function floorToBase(base: BasePlacement, [xMm, yMm, zMm]: Point3Mm): [nu
 
 /** A direction of the floor frame, in the base frame. */
 export function directionToBase(base: Placement, [x, y, z]: Vec3): [number, number, number] {
-  return [...turned([x, y] as PointMm, -base.angleDeg), z];
+  return [...turned([x, y], -base.angleDeg), z];
 }
 
 /** A direction of the base frame, in the floor frame. */
 export function directionToFloor(base: Placement, [x, y, z]: Vec3): [number, number, number] {
-  return [...turned([x, y] as PointMm, base.angleDeg), z];
-}
-
-/** A rotation given in an item's frame, in the frame that the item is turned in by `angleDeg`. */
-export function rotationOutOf(angleDeg: number, rotation: Matrix3): Matrix3 {
-  return multiply(matrixOf([0, 0, radians(angleDeg)]), rotation);
+  return [...turned([x, y], base.angleDeg), z];
 }

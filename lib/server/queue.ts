@@ -81,14 +81,21 @@ export async function enqueue<S extends z.ZodType<object>>(
   return id;
 }
 
-/** The same for many jobs of one kind in one statement. Jobs of a higher priority are taken first. */
+interface EnqueueAllOptions extends Pick<EnqueueOptions, 'transaction'> {
+  /** Higher ones are taken first; 0 unless given. */
+  priority?: number;
+  /** In place of what the definition says. */
+  expireInSeconds?: number;
+}
+
+/** The same for many jobs of one kind in one statement. */
 export async function enqueueAll<S extends z.ZodType<object>>(
   definition: JobDefinition<S>,
   list: readonly z.input<S>[],
-  { transaction, priority = 0 }: { transaction: Transaction; priority?: number },
+  { transaction, ...each }: EnqueueAllOptions,
 ): Promise<void> {
   const db = databaseOf(transaction);
-  const jobs = list.map((data) => ({ name: definition.name, data: definition.schema.parse(data), priority }));
+  const jobs = list.map((data) => ({ name: definition.name, data: definition.schema.parse(data), ...each }));
   const { rows } = await db.executeSql(`SELECT 1 FROM ${QUEUE_SCHEMA}.queue WHERE name = $1`, [definition.name]);
   if (rows.length === 0) throw missingQueue(definition);
   await sender.insert(jobs, { db });

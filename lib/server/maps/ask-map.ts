@@ -32,7 +32,7 @@ export async function askMap(actor: Actor, question: MapQuestion, outer?: Transa
     const map = await DexterityMap.findOne({ where, lock: transaction.LOCK.UPDATE, transaction, rejectOnEmpty: true });
     if (map.attempt === 0 || isOver(map)) {
       await demandRoom(actor, transaction);
-      await startAttempt(actor, map, transaction);
+      await startAttempt(actor, map, input, transaction);
     }
     return map;
   }, outer);
@@ -50,7 +50,7 @@ async function insertIfNew(actor: MemberActor, input: MapInput, key: string, tra
     key,
     input,
     grid: gridInMm(input.request.grid),
-    tileCount: tileCountOf(input.request.grid),
+    tileCount: tileCountOf(input),
     askedBy: actor.userId,
   };
   await DexterityMap.bulkCreate([row], { ignoreDuplicates: true, transaction });

@@ -6,19 +6,22 @@ import { mapRequestSchema } from '@/lib/contracts/analyse';
 import type { MapQuestion } from '@/lib/contracts/maps';
 import { canonicalJson } from '@/lib/kinematics/canonical-json';
 import { KERNEL_VERSION } from '@/lib/kinematics/version';
-import { finestStepMm, mapRequestOf } from '@/lib/layout/map-question';
+import { finestStepMm, mapRequestOf, type KernelQuestion } from '@/lib/layout/map-question';
 import { Arm } from '@/models';
 import { invalid, notFound } from '../errors';
 import type { MemberActor } from '../policy';
-import { SPOT_LIMIT } from './tiling';
+import { spotLimitOf } from './tiling';
 
 /** All that the answer depends on, as it is stored with the map and read back by the worker. */
+export interface MapInput extends KernelQuestion {
+  readonly kernelVersion: number;
+}
+
 export const mapInputSchema = z.object({
   kernelVersion: z.number().int(),
   arm: armSchema,
   request: mapRequestSchema,
-});
-export type MapInput = z.infer<typeof mapInputSchema>;
+}) satisfies z.ZodType<MapInput, unknown>;
 
 /** SHA-256 of the canonical JSON of the whole input, hexadecimal. */
 export function mapKey(input: MapInput): string {
@@ -39,17 +42,18 @@ export async function mapInputOf(
     transaction,
   });
   if (!arm) throw notFound('arm');
-  return mapInputSchema.parse({ kernelVersion: KERNEL_VERSION, ...mapRequestOf(question, arm.definition) });
+  return { kernelVersion: KERNEL_VERSION, ...mapRequestOf(question, arm.definition) };
 }
 
 /** @throws 422 for a map of too many spots, naming the step that would do. */
-export function demandAffordable({ arm, request }: MapInput): void {
-  const spots = request.grid.columns * request.grid.rows;
-  if (spots <= SPOT_LIMIT) return;
+export function demandAffordable(input: MapInput): void {
+  const { columns, rows } = input.request.grid;
+  const limit = spotLimitOf(input);
+  if (columns * rows <= limit) return;
   const number = new Intl.NumberFormat('en-GB');
   throw invalid(
     'settings.stepMm',
-    `This map would have ${number.format(spots)} spots; ${number.format(SPOT_LIMIT)} is the most. ` +
-      `Choose a step of ${finestStepMm(arm, SPOT_LIMIT)} mm or more.`,
+    `This map would have ${number.format(columns * rows)} spots; ${number.format(limit)} is the most for this arm and tool. ` +
+      `Choose a step of ${finestStepMm(input.arm, limit)} mm or more.`,
   );
 }

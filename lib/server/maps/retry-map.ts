@@ -19,9 +19,9 @@ export async function retryMap(actor: Actor, mapId: string, outer?: Transaction)
     if (map.state !== 'failed' && map.state !== 'cancelled') return map;
     const input = mapInputSchema.safeParse(map.input);
     // Its key names the old computation, so the new one's answer must not be stored under it.
-    if (input.data?.kernelVersion !== KERNEL_VERSION)
+    if (!input.success || input.data.kernelVersion !== KERNEL_VERSION)
       throw conflict('map_outdated', 'The computation has changed since this map was asked. Ask for the map again.');
-    await startAttempt(actor, map, transaction);
+    await startAttempt(actor, map, input.data, transaction);
     return map;
   }, outer);
 }

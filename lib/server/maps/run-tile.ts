@@ -3,7 +3,7 @@ import { KERNEL_VERSION } from '@/lib/kinematics/version';
 import { DexterityMap, MapTile } from '@/models';
 import { inTransaction } from '../database';
 import type { MapTileJob } from '../jobs';
-import type { MapComputer } from './computer';
+import type { MapComputer, TileTask } from './computer';
 import { failMap } from './fail-map';
 import { mapInputSchema, type MapInput } from './question';
 import { rowsOfTile } from './tiling';
@@ -22,7 +22,8 @@ export async function runMapTile(job: MapTileJob, computer: MapComputer): Promis
     throw new Error(`The map needs computation ${input.data.kernelVersion}, and this worker has ${KERNEL_VERSION}.`);
   }
   await markRunning(job);
-  const bytes = await tileBytes(job, input.data, computer);
+  const rows = rowsOfTile(input.data.request.grid, map.tileCount, job.index);
+  const bytes = await tileBytes(job, { arm: input.data.arm, request: input.data.request, ...rows }, computer);
   if (bytes) await storeTile(job, input.data, bytes, computer);
 }
 
@@ -36,12 +37,11 @@ async function markRunning({ mapId, attempt }: MapTileJob): Promise<void> {
 }
 
 /** Null where the kernel refuses the question: it would refuse it every time, so the map has failed. */
-async function tileBytes(job: MapTileJob, input: MapInput, computer: MapComputer): Promise<Uint8Array | null> {
+async function tileBytes(job: MapTileJob, task: TileTask, computer: MapComputer): Promise<Uint8Array | null> {
   const { mapId, attempt, index } = job;
   const stored = await MapTile.findOne({ where: { mapId, attempt, index } });
   if (stored) return stored.bytes;
-  const { rowFrom, rowTo } = rowsOfTile(input.request.grid, index);
-  const result = await computer.computeTile({ arm: input.arm, request: input.request, rowFrom, rowTo });
+  const result = await computer.computeTile(task);
   if ('bytes' in result) return result.bytes;
   await failMap(job, `The map cannot be computed: ${result.fault}`);
   return null;
