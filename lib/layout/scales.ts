@@ -79,6 +79,9 @@ export function divergingTable(board: 'day' | 'night' = 'day'): Uint32Array {
   return tableOf(`diverging-${board}`, diverging[board]);
 }
 
+/** Reach has no value a spot: where it stands on the scale with one robot, and where two or more can meet. */
+export const REACH_SHARES = { one: 0.3, more: 0.62 } as const;
+
 /** The values at the two ends of a scale. */
 export interface ValueRange {
   readonly from: number;

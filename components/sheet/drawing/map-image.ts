@@ -1,10 +1,13 @@
 import { CELL_CHANGES, type FloorDifference } from '@/lib/layout/floor-figures';
 import type { FloorGrid, FloorMap } from '@/lib/layout/floor-map';
-import { divergingTable, scaleTable, TABLE_SIZE, type MapScale, type ValueRange } from '@/lib/layout/scales';
-
-/** Reach has no value a spot: floor reached by one robot, and floor where two can meet. */
-const REACH_SHARE = 0.3;
-const SHARED_REACH_SHARE = 0.62;
+import {
+  divergingTable,
+  REACH_SHARES,
+  scaleTable,
+  TABLE_SIZE,
+  type MapScale,
+  type ValueRange,
+} from '@/lib/layout/scales';
 
 /** A canvas with one pixel a cell; `reuse` is painted over where it fits, so that a dragged map allocates nothing. */
 function blankImage(grid: FloorGrid, reuse: HTMLCanvasElement | null): HTMLCanvasElement {
@@ -58,8 +61,8 @@ function mapImage(
   const canvas = blankImage(map.grid, reuse);
   const { value, reachedBy } = map;
   if (map.measure === 'reach') {
-    const one = table[Math.round(REACH_SHARE * last)];
-    const more = table[Math.round(SHARED_REACH_SHARE * last)];
+    const one = table[Math.round(REACH_SHARES.one * last)];
+    const more = table[Math.round(REACH_SHARES.more * last)];
     return paint(canvas, (cell) => (reachedBy[cell] === 0 ? 0 : reachedBy[cell] === 1 ? one : more));
   }
   const factor = last / (range.to - range.from || 1);
