@@ -7,7 +7,7 @@ import { Wordmark } from '@/components/ui/wordmark';
 export default function AccountLayout({ children }: { children: ReactNode }) {
   return (
     <DrawingFrame>
-      <ArmElevation className="pointer-events-none absolute inset-y-0 left-0 hidden h-full w-[calc(100%-26rem)] lg:block" />
+      <ArmElevation className="pointer-events-none absolute inset-0 hidden size-full lg:block" />
       <div className="relative flex min-h-full flex-col justify-start gap-5 p-4 sm:mx-auto sm:max-w-md sm:justify-center lg:mx-0 lg:ml-auto lg:w-[27rem] lg:max-w-none lg:p-8">
         <Wordmark className="py-2" />
         <main>{children}</main>

@@ -75,7 +75,7 @@ function ArmSheet({ arm }: { arm: LibraryArm }) {
           </div>
         </Panel>
       </div>
-      <Panel title="Section through the first axis" aside="tool down">
+      <Panel title="Section through the first axis" aside="tool down, wrist held">
         <SectionDrawing arm={arm} />
       </Panel>
     </Page>

@@ -2,72 +2,74 @@
 
 import { useMemo } from 'react';
 import type { LibraryArm } from '@/lib/contracts/arms';
-import { sectionPosture, type SectionPoint } from '@/lib/layout/arm-section';
+import { sectionGrid, sectionPosture } from '@/lib/layout/arm-section';
+import { SectionMap } from './section-map';
 
-const WIDTH = 430;
-const HEIGHT = 400;
-const MARGIN = 26;
-/** Room behind the first axis, as a share of the reach. */
-const BEHIND = 0.42;
-const ABOVE = 1.3;
-const BELOW = 0.55;
+/** Drawing units a cell of the map; the lettering counts in them too. */
+const CELL = 4;
+const FOOT = 24;
 const GRID_MM = 500;
 
-/** The arm cut along its first axis, to scale, on a half-metre grid. */
+/** The arm cut along its first axis, to scale: the map of the cut, half-metre lines, and the arm with its tool down. */
 export function SectionDrawing({ arm }: { arm: LibraryArm }) {
-  const posture = useMemo(() => sectionPosture(arm.definition, arm.reachMm), [arm]);
-  const scale = Math.min(
-    (WIDTH - 2 * MARGIN) / (arm.reachMm * (1.15 + BEHIND)),
-    (HEIGHT - 2 * MARGIN) / (arm.reachMm * (ABOVE + BELOW)),
-  );
-  const x = (mm: number): number => MARGIN + (mm + arm.reachMm * BEHIND) * scale;
-  const y = (mm: number): number => MARGIN + (arm.reachMm * ABOVE - mm) * scale;
+  const { definition, reachMm } = arm;
+  const grid = useMemo(() => sectionGrid(reachMm), [reachMm]);
+  const posture = useMemo(() => sectionPosture(definition, reachMm), [definition, reachMm]);
+  const width = grid.columns * CELL;
+  const height = grid.rows * CELL;
+  const x = (xMm: number): number => ((xMm - grid.originXMm) / grid.stepMm + 0.5) * CELL;
+  const y = (zMm: number): number => height - ((zMm - grid.originZMm) / grid.stepMm + 0.5) * CELL;
   const path = posture.body
-    .map(([xMm, zMm], index) => `${index === 0 ? 'M' : 'L'}${x(xMm).toFixed(1)} ${y(zMm).toFixed(1)}`)
+    .map(([xMm, zMm], at) => `${at ? 'L' : 'M'}${x(xMm).toFixed(1)} ${y(zMm).toFixed(1)}`)
     .join('');
-  const tool: SectionPoint = posture.body[posture.body.length - 1];
-  const grid = Array.from({ length: Math.floor((arm.reachMm * 1.15) / GRID_MM) + 1 }, (_, index) => index * GRID_MM);
+  const [toolXMm, toolZMm] = posture.body[posture.body.length - 1];
+  const marks = Array.from({ length: Math.floor((1.05 * reachMm) / GRID_MM) + 1 }, (_, index) => index * GRID_MM);
   return (
-    <svg
-      viewBox={`0 0 ${WIDTH} ${HEIGHT}`}
-      role="img"
-      aria-label={`${arm.name} from the side, tool down`}
-      className="block w-full"
-    >
-      <g stroke="var(--hair)">
-        {grid.map((mm) => (
-          <path key={mm} d={`M${x(mm)} ${MARGIN / 2}V${HEIGHT - MARGIN}`} />
-        ))}
-      </g>
-      <g className="font-mono text-[11px]" fill="var(--ink-soft)" textAnchor="middle">
-        {grid.map((mm) => (
-          <text key={mm} x={x(mm)} y={HEIGHT - 8}>
-            {mm}
-          </text>
-        ))}
-      </g>
-      <path d={`M0 ${y(0)}H${WIDTH}`} stroke="var(--ink-soft)" strokeWidth="1.5" />
-      <g fill="none" strokeLinecap="round" strokeLinejoin="round">
-        <path d={path} stroke="var(--ink)" strokeWidth="13" />
-        <path d={path} stroke="var(--sheet)" strokeWidth="9.6" />
-      </g>
-      {posture.joints.map(({ number, at }) => (
-        <g key={number}>
-          <circle cx={x(at[0])} cy={y(at[1])} r="6.5" fill="var(--sheet)" stroke="var(--ink)" strokeWidth="1.7" />
-          <text
-            x={x(at[0]) + 11}
-            y={y(at[1]) - 9}
-            className="text-[12px] font-semibold"
-            fill="var(--ink)"
-            stroke="var(--sheet)"
-            strokeWidth="3"
-            paintOrder="stroke"
-          >
-            J{number}
-          </text>
+    <div className="relative">
+      <SectionMap arm={definition} grid={grid} className="absolute inset-x-0 top-0 w-full" />
+      <svg
+        viewBox={`0 0 ${width} ${height + FOOT}`}
+        role="img"
+        aria-label={`${arm.name} from the side with its tool down. The darker the spot, the more evenly it moves there.`}
+        className="relative block w-full"
+      >
+        <g stroke="var(--ink)" strokeOpacity="0.13">
+          {marks.map((mm) => (
+            <path key={mm} d={`M${x(mm)} 0V${height}`} />
+          ))}
         </g>
-      ))}
-      <circle cx={x(tool[0])} cy={y(tool[1])} r="4.5" fill="var(--red)" />
-    </svg>
+        <g className="font-mono text-[12px]" fill="var(--ink-soft)" textAnchor="middle">
+          {marks.map((mm) => (
+            <text key={mm} x={x(mm)} y={height + 16}>
+              {mm}
+            </text>
+          ))}
+        </g>
+        <path d={`M0 ${y(0)}H${width}`} stroke="var(--ink)" strokeWidth="1.3" />
+        <g fill="none" strokeLinecap="round" strokeLinejoin="round">
+          <path d={path} stroke="var(--ink)" strokeWidth="13" />
+          <path d={path} stroke="var(--sheet)" strokeWidth="9.8" />
+        </g>
+        {posture.joints.map(({ number, at: [xMm, zMm] }, index) => (
+          <g key={number}>
+            <circle cx={x(xMm)} cy={y(zMm)} r="6.5" fill="var(--sheet)" stroke="var(--ink)" strokeWidth="1.7" />
+            <text
+              x={x(xMm) + (index === posture.joints.length - 1 ? 11 : -10)}
+              y={y(zMm) - 8}
+              // Beside the arm, not on it: the forearm comes down on the right of the others.
+              textAnchor={index === posture.joints.length - 1 ? 'start' : 'end'}
+              className="text-[13px] font-semibold"
+              fill="var(--ink)"
+              stroke="var(--sheet)"
+              strokeWidth="3.5"
+              paintOrder="stroke"
+            >
+              J{number}
+            </text>
+          </g>
+        ))}
+        <circle cx={x(toolXMm)} cy={y(toolZMm)} r="4.5" fill="var(--red)" />
+      </svg>
+    </div>
   );
 }

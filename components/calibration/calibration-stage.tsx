@@ -130,7 +130,7 @@ export function CalibrationStage({ floorPlan, calibration, size }: CalibrationSt
           onRight={aim.screen.x < size.width / 2 || aim.screen.y > 220}
         />
       )}
-      <div className="absolute bottom-3 left-3 flex items-stretch border border-rule bg-sheet">
+      <div className="absolute right-3 bottom-3 flex items-stretch border border-rule bg-sheet">
         <Button
           variant="quiet"
           size="icon"

@@ -17,7 +17,7 @@ function stateWord(step: StepName, calibration: CalibrationInHand): { word: stri
   }
   const state = lineState(calibration.draft, step);
   if (state === 'complete' && !calibration.faults[step]) return { word: 'Done', tone: 'text-green', done: true };
-  if (state === 'empty') return { word: step === 'scale' ? 'To do' : 'If you like', tone: soft, done: false };
+  if (state === 'empty') return { word: step === 'scale' ? 'To do' : 'Optional', tone: soft, done: false };
   return { word: 'Not finished', tone: 'text-amber', done: false };
 }
 

@@ -60,14 +60,19 @@ export function ProjectPage({ projectId }: { projectId: string }) {
             projects.
           </Notice>
         )}
-        <div className="grid items-start gap-4 lg:grid-cols-[minmax(0,1fr)_26rem]">
-          <div className="flex min-w-0 flex-col gap-4">
+        {/* On a narrow screen one column, the floor plans before the revisions: that is the order of the work. */}
+        <div className="flex flex-col gap-4 lg:grid lg:grid-cols-[minmax(0,1fr)_26rem] lg:items-start">
+          <div className="contents min-w-0 gap-4 lg:flex lg:flex-col">
             {mayPlan && <VariantsPanel projectId={projectId} />}
-            <RevisionsPanel projectId={projectId} />
+            <div className="order-3 min-w-0">
+              <RevisionsPanel projectId={projectId} />
+            </div>
           </div>
-          <div className="flex min-w-0 flex-col gap-4">
+          <div className="contents min-w-0 gap-4 lg:flex lg:flex-col">
             {mayPlan && <FloorPlansPanel projectId={projectId} />}
-            <OpenRemarksPanel projectId={projectId} count={project?.openRemarkCount ?? 0} />
+            <div className="order-4 min-w-0">
+              <OpenRemarksPanel projectId={projectId} count={project?.openRemarkCount ?? 0} />
+            </div>
           </div>
         </div>
       </Page>

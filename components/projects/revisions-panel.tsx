@@ -17,7 +17,13 @@ export function RevisionsPanel({ projectId }: { projectId: string }) {
         {({ layouts }) => {
           const issued = layouts.filter((layout) => layout.latestRevision !== null);
           if (issued.length > 0) {
-            return issued.map((layout) => <LayoutRevisions key={layout.id} layout={layout} />);
+            return (
+              <div>
+                {issued.map((layout) => (
+                  <LayoutRevisions key={layout.id} layout={layout} />
+                ))}
+              </div>
+            );
           }
           return mayPlan ? (
             <EmptyState

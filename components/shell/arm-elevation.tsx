@@ -28,10 +28,10 @@ export function ArmElevation({ className }: { className?: string }) {
   const ghost = `M${SHOULDER.x} ${SHOULDER.y}L${before.elbow.x} ${before.elbow.y}L${before.wrist.x} ${before.wrist.y}L${before.tool.x} ${before.tool.y}`;
   const reach = UPPER + FORE;
   return (
-    <svg viewBox="-60 -40 900 800" aria-hidden className={className} fill="none" preserveAspectRatio="xMidYMid meet">
+    <svg viewBox="-60 -40 1330 800" aria-hidden className={className} fill="none" preserveAspectRatio="xMinYMid meet">
       <g stroke="var(--hair)">
-        {Array.from({ length: 19 }, (_, index) => (
-          <path key={index} d={`M${-240 + index * 80} -400V1200M-1000 ${-240 + index * 80}H1800`} />
+        {Array.from({ length: 30 }, (_, index) => (
+          <path key={index} d={`M${-240 + index * 80} -600V1400M-1000 ${-480 + index * 80}H2400`} />
         ))}
       </g>
       <g stroke="var(--petrol)" strokeWidth="1.4">
@@ -40,19 +40,19 @@ export function ArmElevation({ className }: { className?: string }) {
         <path d={arc(reach * 0.72, -14, 118)} strokeOpacity="0.4" />
         <path d={arc(reach * 0.86, -20, 132)} strokeOpacity="0.4" />
       </g>
-      <path d={`M-1000 ${FLOOR}H1800`} stroke="var(--ink)" strokeWidth="2" />
+      <path d={`M-1000 ${FLOOR}H2400`} stroke="var(--ink)" strokeWidth="2" />
       <path
-        d={Array.from({ length: 90 }, (_, index) => `M${-520 + index * 22} ${FLOOR}l-11 13`).join('')}
+        d={Array.from({ length: 140 }, (_, index) => `M${-520 + index * 22} ${FLOOR}l-11 13`).join('')}
         stroke="var(--ink-soft)"
       />
-      <path d={`M-1000 ${now.tool.y.toFixed(1)}H1800`} stroke="var(--red)" strokeDasharray="9 6" />
+      <path d={`M-1000 ${now.tool.y.toFixed(1)}H2400`} stroke="var(--red)" strokeDasharray="9 6" />
       <text x="770" y={now.tool.y - 9} fill="var(--red)" className="font-mono text-[15px]" textAnchor="end">
         z 850
       </text>
       <g stroke="var(--ink)" strokeWidth="1.6" fill="var(--sheet)">
         <rect x="286" y="560" width="88" height={FLOOR - 560} />
         <path d={`M286 560L374 ${FLOOR}M374 560L286 ${FLOOR}`} strokeWidth="0.7" />
-        <path d="M300 560V446h60v114z" />
+        <path d={`M296 560V${SHOULDER.y + 34}l12 -34h44l12 34V560z`} />
       </g>
       <path d={ghost} stroke="var(--ink-soft)" strokeDasharray="3 5" strokeWidth="1.2" />
       <Link path={path} />

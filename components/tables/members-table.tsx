@@ -1,5 +1,6 @@
 'use client';
 
+import { UserMinus } from 'lucide-react';
 import { useMemo } from 'react';
 import { ROLE_NAMES, ROLES_IN_ORDER } from '@/components/shell/role-words';
 import { Button } from '@/components/ui/button';
@@ -22,6 +23,14 @@ const ROLE_OPTIONS = ROLES_IN_ORDER.map((value) => ({ value, label: ROLE_NAMES[v
 
 const saysProjects = (count: number): string =>
   count === 0 ? 'No project yet' : count === 1 ? '1 project' : `${count} projects`;
+
+function ProjectsButton({ member, onProjects }: { member: Member } & Pick<MembersTableProps, 'onProjects'>) {
+  return (
+    <Button size="small" aria-label={`Projects of ${member.name}`} onClick={() => onProjects(member)}>
+      {saysProjects(member.projectIds.length)}
+    </Button>
+  );
+}
 
 /** Everyone in the organisation, by name. */
 export function MembersTable({ members, ownUserId, onRole, onProjects, onRemove }: MembersTableProps) {
@@ -50,18 +59,26 @@ export function MembersTable({ members, ownUserId, onRole, onProjects, onRemove 
         id: 'role',
         header: 'Role',
         value: (member) => ROLES_IN_ORDER.indexOf(member.role),
-        cell: (member) =>
-          member.userId === ownUserId ? (
-            <span className="px-2.5">{ROLE_NAMES[member.role]}</span>
-          ) : (
-            <Select
-              aria-label={`Role of ${member.name}`}
-              value={member.role}
-              onValueChange={(role) => onRole(member, role)}
-              options={ROLE_OPTIONS}
-              className="min-h-8! w-32!"
-            />
-          ),
+        cell: (member) => (
+          <span className="flex flex-col items-start gap-1">
+            {member.userId === ownUserId ? (
+              <span className="px-2.5">{ROLE_NAMES[member.role]}</span>
+            ) : (
+              <Select
+                aria-label={`Role of ${member.name}`}
+                value={member.role}
+                onValueChange={(role) => onRole(member, role)}
+                options={ROLE_OPTIONS}
+                className="min-h-8! w-32!"
+              />
+            )}
+            {member.role === 'viewer' && (
+              <span className="sm:hidden">
+                <ProjectsButton member={member} onProjects={onProjects} />
+              </span>
+            )}
+          </span>
+        ),
       },
       {
         id: 'projects',
@@ -69,12 +86,11 @@ export function MembersTable({ members, ownUserId, onRole, onProjects, onRemove 
         value: (member) => (member.role === 'viewer' ? member.projectIds.length : Number.MAX_SAFE_INTEGER),
         cell: (member) =>
           member.role === 'viewer' ? (
-            <Button size="small" aria-label={`Projects of ${member.name}`} onClick={() => onProjects(member)}>
-              {saysProjects(member.projectIds.length)}
-            </Button>
+            <ProjectsButton member={member} onProjects={onProjects} />
           ) : (
             <span className="px-2.5 text-ink-soft">All projects</span>
           ),
+        wideOnly: true,
       },
       {
         id: 'joined',
@@ -89,8 +105,8 @@ export function MembersTable({ members, ownUserId, onRole, onProjects, onRemove 
         headerHidden: true,
         cell: (member) =>
           member.userId !== ownUserId && (
-            <Button size="small" variant="quiet" aria-label={`Remove ${member.name}`} onClick={() => onRemove(member)}>
-              Remove
+            <Button variant="quiet" size="icon" aria-label={`Remove ${member.name}`} onClick={() => onRemove(member)}>
+              <UserMinus aria-hidden className="size-4" />
             </Button>
           ),
         className: 'w-10',

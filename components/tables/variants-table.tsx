@@ -51,8 +51,7 @@ export function VariantsTable({ layouts, onDeed }: VariantsTableProps) {
     () => [
       {
         id: 'letter',
-        header: '',
-        headerHidden: true,
+        header: 'Letter',
         value: (layout) => layout.letter,
         cell: (layout) => <span className="text-lg font-semibold">{layout.letter}</span>,
         className: 'w-10',

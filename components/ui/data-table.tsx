@@ -56,6 +56,7 @@ export function SortHeadCell({ direction, onSort, figures, className, children }
         onClick={onSort}
         className={classNames(
           '-mx-1 inline-flex min-h-8 items-center gap-1 px-1 hover:text-petrol pointer-coarse:min-h-11',
+          figures && 'flex-row-reverse',
           direction && 'text-ink',
         )}
       >

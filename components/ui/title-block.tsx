@@ -71,7 +71,7 @@ export function TitleBlock({ cells, actions, children }: TitleBlockProps) {
     <header className="flex flex-wrap items-stretch border-b-2 border-rule bg-sheet lg:h-[58px] lg:flex-nowrap">
       <div className="flex min-w-0 flex-none items-center px-3.5 py-2 lg:w-[195px] lg:py-0">
         {homeHref ? (
-          <Link href={homeHref} aria-label="Elbowroom, all projects" className="rounded py-1">
+          <Link href={homeHref} aria-label="Elbowroom, all projects" className="flex rounded py-1">
             <Wordmark />
           </Link>
         ) : (

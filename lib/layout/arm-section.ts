@@ -1,4 +1,5 @@
 import { compileChain, forward, makeStance } from '@/lib/kinematics/chain';
+import { makeMapComputer } from '@/lib/kinematics/maps/compute-tile';
 import { reach } from '@/lib/kinematics/reach';
 import { makeSolver } from '@/lib/kinematics/solver';
 import type { Arm } from '@/lib/kinematics/types';
@@ -39,7 +40,12 @@ const TOGETHER_MM = 1;
 /** The arm in a posture with the tool pointing down, or in the middle of its ranges where it cannot point down. */
 export function sectionPosture(arm: Arm, reachMm: number): SectionPosture {
   const chain = compileChain(arm);
-  const { origins, axes, tool } = forward(chain, workingPosture(arm, reachMm / 1000), makeStance(chain));
+  const {
+    origins,
+    axes,
+    tool,
+    joints: posture,
+  } = forward(chain, workingPosture(arm, reachMm / 1000), makeStance(chain));
   const body: SectionPoint[] = [[1000 * chain.base[3], 1000 * chain.base[11]]];
   const joints: { number: number; at: SectionPoint }[] = [];
   const add = (at: SectionPoint): void => {
@@ -49,10 +55,51 @@ export function sectionPosture(arm: Arm, reachMm: number): SectionPosture {
   for (let joint = 0; joint < chain.joints; joint++) {
     const at: SectionPoint = [1000 * origins[3 * joint], 1000 * origins[3 * joint + 2]];
     add(at);
+    // Up along the joint's own axis first, then across to the next one: a column stands and a shoulder reaches out.
+    const along = 1000 * (chain.d[joint] + (chain.prismatic[joint] ? posture[joint] : 0));
+    add([at[0] + along * axes[3 * joint], at[1] + along * axes[3 * joint + 2]]);
     // An axis that stands across the cut turns the arm within it.
     const isAcross = Math.abs(axes[3 * joint + 1]) > 0.9;
     if (isAcross && !chain.prismatic[joint]) joints.push({ number: joint + 1, at });
   }
   add([1000 * tool[3], 1000 * tool[11]]);
   return { body, joints };
+}
+
+/** Rows and columns of a section map: `origin` is the centre of the first cell (lowest, left), all in mm. */
+export interface SectionGrid {
+  readonly originXMm: number;
+  readonly originZMm: number;
+  readonly stepMm: number;
+  readonly columns: number;
+  readonly rows: number;
+}
+
+/** Cells from the first axis to the reach, so that a section takes about a second. */
+const CELLS_OUT = 72;
+
+/** A grid round everything that the arm may reach in the cut, and a little behind its first axis. */
+export function sectionGrid(reachMm: number): SectionGrid {
+  const stepMm = reachMm / CELLS_OUT;
+  const cells = (share: number): number => Math.round(share * CELLS_OUT);
+  return {
+    originXMm: -cells(0.35) * stepMm,
+    originZMm: -cells(0.6) * stepMm,
+    stepMm,
+    columns: cells(0.35 + 1.1),
+    rows: cells(0.6 + 1.15),
+  };
+}
+
+/** Inverse condition number along one row of the cut with the tool down and the wrist held; NaN where it is not reached. */
+export function sectionRow(arm: Arm, grid: SectionGrid, row: number): Float32Array {
+  const computer = makeMapComputer(arm, {
+    grid: { origin: [grid.originXMm / 1000, 0], step: grid.stepMm / 1000, columns: grid.columns, rows: 1 },
+    toolHeight: (grid.originZMm + row * grid.stepMm) / 1000,
+    direction: { kind: 'down' },
+    roll: 'free',
+    wrist: 'held',
+    branch: 'best',
+  });
+  return computer.tile(0, 1).inverseConditionNumber;
 }
