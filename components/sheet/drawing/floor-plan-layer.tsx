@@ -27,16 +27,21 @@ export function pictureWidthFor(floorPlan: FloorPlan, scale: number, devicePixel
 
 /** The floor plan's picture where its calibration puts it. A plan that is not set to scale yet is not drawn. */
 export const FloorPlanLayer = memo(function FloorPlanLayer(props: FloorPlanLayerProps) {
+  const { floorPlan } = props;
+  // Another plan starts anew: the old picture must not stand in at the new one's scale.
+  return floorPlan?.calibration ? <PlacedPicture key={floorPlan.id} {...props} floorPlan={floorPlan} /> : null;
+});
+
+function PlacedPicture(props: FloorPlanLayerProps & { readonly floorPlan: FloorPlan }) {
   const { floorPlan, pictureUrl, opacity = 1, mode } = props;
   const { viewport } = useStageFrame();
   const devicePixels = typeof window === 'undefined' ? 1 : window.devicePixelRatio;
-  const width = floorPlan?.calibration ? pictureWidthFor(floorPlan, viewport.scale, devicePixels) : null;
-  const picture = usePicture(width === null ? null : pictureUrl(width));
+  const picture = usePicture(pictureUrl(pictureWidthFor(floorPlan, viewport.scale, devicePixels)));
   const { board } = usePalette(mode);
   const drawn = useMemo(() => picture && pictureForBoard(picture, board), [picture, board]);
 
-  const calibration = floorPlan?.calibration;
-  if (!floorPlan || !calibration || !drawn) return null;
+  const { calibration } = floorPlan;
+  if (!calibration || !drawn) return null;
   return (
     <KonvaImage
       image={drawn}
@@ -54,4 +59,4 @@ export const FloorPlanLayer = memo(function FloorPlanLayer(props: FloorPlanLayer
       perfectDrawEnabled={false}
     />
   );
-});
+}

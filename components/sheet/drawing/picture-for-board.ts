@@ -11,7 +11,12 @@ export function pictureForBoard(
   canvas.height = picture.naturalHeight;
   const ink = canvas.getContext('2d');
   if (!ink) return picture;
-  ink.filter = 'invert(1) hue-rotate(180deg)';
+  ink.fillStyle = '#ffffff';
+  ink.fillRect(0, 0, canvas.width, canvas.height);
+  // White less the picture is its negative; canvas filters would say the same, but not every browser has them.
+  ink.globalCompositeOperation = 'difference';
+  ink.drawImage(picture, 0, 0);
+  ink.globalCompositeOperation = 'hue';
   ink.drawImage(picture, 0, 0);
   return canvas;
 }

@@ -2,15 +2,12 @@
 
 import { useEffect, useState } from 'react';
 
-/** A picture, once it is there; keeps showing the last one while a sharper one loads, and null after a failure at the first. */
+/** A picture, once it is there. Keeps showing the last one while another loads; null before the first and where it fails. */
 export function usePicture(url: string | null): HTMLImageElement | null {
   const [picture, setPicture] = useState<HTMLImageElement | null>(null);
   useEffect(() => {
+    if (!url) return;
     let wanted = true;
-    if (!url) {
-      setPicture(null);
-      return;
-    }
     const image = new Image();
     image.decoding = 'async';
     image.src = url;
@@ -22,5 +19,5 @@ export function usePicture(url: string | null): HTMLImageElement | null {
       wanted = false;
     };
   }, [url]);
-  return picture;
+  return url ? picture : null;
 }
