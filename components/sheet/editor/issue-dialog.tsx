@@ -66,8 +66,8 @@ export function IssueDialog({ open, onOpenChange }: IssueDialogProps) {
         {state !== 'saved' && <Notice tone="caution">The sheet is not saved yet. Wait until it says “saved”.</Notice>}
         {unfinished > 0 && (
           <Notice tone="caution">
-            {unfinished === 1 ? 'One map is' : `${unfinished} maps are`} not finished. What is issued now shows the sheet
-            without {unfinished === 1 ? 'it' : 'them'}.
+            {unfinished === 1 ? 'One map is' : `${unfinished} maps are`} not finished. What is issued now shows the
+            sheet without {unfinished === 1 ? 'it' : 'them'}.
           </Notice>
         )}
         {fault && <Notice tone="trouble">{fault}</Notice>}

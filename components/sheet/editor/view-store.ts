@@ -1,3 +1,4 @@
+import type { MapScale } from '@/lib/layout/scales';
 import { fitBounds, screenToFloor, type FloorBounds, type Viewport } from '@/lib/layout/viewport';
 
 export interface View {
@@ -6,13 +7,20 @@ export interface View {
   readonly size: { readonly width: number; readonly height: number };
   /** Pixels at the lower edge that the map key covers. */
   readonly coveredPx: number;
+  /** The colours of the map: a reader's own choice. */
+  readonly mapScale: MapScale;
 }
 
 const EMPTY_FLOOR: FloorBounds = { minXMm: 0, minYMm: 0, maxXMm: 9000, maxYMm: 6000 };
 
 /** What the canvas shows. Apart from the sheet: looking is not editing, and nobody else's business. */
 export class ViewStore {
-  private view: View = { viewport: { scale: 0.1, xMm: 0, yMm: 6000 }, size: { width: 0, height: 0 }, coveredPx: 0 };
+  private view: View = {
+    viewport: { scale: 0.1, xMm: 0, yMm: 6000 },
+    size: { width: 0, height: 0 },
+    coveredPx: 0,
+    mapScale: 'tide',
+  };
   private readonly listeners = new Set<() => void>();
 
   readonly get = (): View => this.view;

@@ -15,11 +15,17 @@ import { TaskPointFields } from './task-point-fields';
 import { useItemEdit } from './use-item-edit';
 
 /** What is chosen, with everything about it that can be typed. */
-export function Inspector() {
+export function Inspector({ emptyWords = false }: { readonly emptyWords?: boolean }) {
   const items = useBoardSheet((state) => state.items);
   const { itemIds } = useBoardSheet((state) => state.selection);
   const chosen = itemIds.map((id) => items.get(id)).filter((item): item is Item => item !== undefined);
-  if (chosen.length === 0) return null;
+  if (chosen.length === 0) {
+    return emptyWords ? (
+      <p className="px-3.5 py-3 text-sm text-ink-soft">
+        Nothing is chosen. Tap something on the sheet, or in the list.
+      </p>
+    ) : null;
+  }
   return (
     <section aria-label="What is chosen" data-inspector className="border-b border-rule px-3.5 pt-2 pb-3">
       {chosen.length === 1 ? <OneItem key={chosen[0].id} item={chosen[0]} /> : <SeveralItems items={chosen} />}

@@ -87,9 +87,7 @@ function Row({ item }: { readonly item: Item }) {
         data-item-kind={item.kind}
         aria-pressed={isChosen}
         onClick={(event) =>
-          event.shiftKey
-            ? sheet.select(chosen(...new Set([...sheet.getState().selection.itemIds, item.id])))
-            : choose()
+          event.shiftKey ? sheet.select(chosen(...new Set([...sheet.getState().selection.itemIds, item.id]))) : choose()
         }
         onKeyDown={onKeyDown}
         className="block w-full py-1 pr-9 pl-[11px] text-left focus-visible:-outline-offset-2 pointer-coarse:min-h-11"

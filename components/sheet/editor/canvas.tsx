@@ -1,0 +1,162 @@
+'use client';
+
+import { useEffect, useMemo, useRef } from 'react';
+import {
+  FloorPlanLayer,
+  GridLayer,
+  GroundLayer,
+  ItemsLayer,
+  MapLayer,
+  OverlayLayer,
+  RemarkPins,
+  SelectionHandles,
+  SheetStage,
+} from '@/components/sheet/drawing';
+import type { Remark } from '@/lib/contracts/remarks';
+import { inOrder } from '@/lib/editor/order';
+import { boundsOfItems } from '@/lib/editor/place-in-view';
+import { shownItems } from '@/lib/editor/sheet';
+import type { Item } from '@/lib/layout/items';
+import { unionBounds } from '@/lib/layout/viewport';
+import { useBoard, useBoardSettings, useBoardSheet, useView } from './board-context';
+import { DraftMarks } from './draft-marks';
+import { useFloor } from './floor-context';
+import { floorPlanBounds } from './floor-plan-bounds';
+import { PlumbMarks } from './plumb-marks';
+import { useReadings } from './readings-context';
+import { useMapLook } from './use-map-look';
+import { useToolPointer } from './use-tool-pointer';
+
+interface CanvasProps {
+  readonly remarks: readonly Remark[];
+  readonly chosenRemarkId: string | null;
+  readonly onRemark: (remarkId: string) => void;
+}
+
+/** The drawing in the middle of the board. */
+export function Canvas({ remarks, chosenRemarkId, onRemark }: CanvasProps) {
+  const { arms, floorPlan, layout, view } = useBoard();
+  const { viewport, size } = useView();
+  const items = useBoardSheet((state) => state.items);
+  const draft = useBoardSheet((state) => state.draft);
+  const selection = useBoardSheet((state) => state.selection);
+  const tool = useBoardSheet((state) => state.tool);
+  const { floorMap, isDragging } = useFloor();
+  const { postures, byPoint } = useReadings();
+  const settings = useBoardSettings();
+  const look = useMapLook();
+  const pointer = useToolPointer();
+  const box = useRef<HTMLDivElement>(null);
+  useMeasuredAndFitted(box);
+
+  const shown = useMemo(() => inOrder(shownItems({ items, draft })), [items, draft]);
+  const selectedIds = useMemo(
+    () => new Set([...selection.itemIds, ...(draft?.items.map(({ id }) => id) ?? [])]),
+    [selection, draft],
+  );
+  const chosenItems = useMemo(
+    () => shown.filter((item) => selection.itemIds.includes(item.id) && !item.hidden),
+    [shown, selection],
+  );
+  const bands = useMemo(
+    () => new Map([...byPoint].map(([pointId, { best }]) => [pointId, best?.band ?? ('unknown' as const)])),
+    [byPoint],
+  );
+  const pins = useMemo(() => remarks.map((remark) => ({ ...remark, resolved: remark.resolvedAt !== null })), [remarks]);
+  const pictureUrl = useMemo(() => {
+    const address = `/api/floor-plans/${encodeURIComponent(floorPlan?.id ?? '')}/picture?width=`;
+    return (widthPx: number) => address + widthPx;
+  }, [floorPlan?.id]);
+  const { measure, thresholds } = settings;
+
+  return (
+    <div
+      ref={box}
+      className="absolute inset-0"
+      data-canvas
+      data-viewport={JSON.stringify(viewport)}
+      data-tool={tool.name}
+    >
+      {size.width > 0 && (
+        <SheetStage
+          width={size.width}
+          height={size.height}
+          viewport={viewport}
+          onViewportChange={(next) => view.set({ viewport: next })}
+          label={`Drawing of ${layout.name}. The list on the left holds everything on it.`}
+          dragPans={tool.name === 'pan'}
+          cursor={CURSORS[tool.name] ?? 'crosshair'}
+          onFloorPointerDown={pointer.onFloor}
+          onPointerMove={pointer.onMove}
+          onPointerUp={pointer.onUp}
+          onPointerCancel={pointer.onTakenAway}
+          onPointerLeave={pointer.onLeave}
+          onDoubleClick={pointer.onFinish}
+        >
+          <GroundLayer>
+            <MapLayer
+              map={floorMap}
+              scale={look.scale}
+              range={look.range}
+              threshold={measure === 'reach' ? null : thresholds[measure]}
+              isoLines={isDragging ? null : look.isoLines}
+            />
+            <GridLayer />
+            <FloorPlanLayer floorPlan={floorPlan} pictureUrl={pictureUrl} />
+          </GroundLayer>
+          <ItemsLayer
+            items={shown}
+            arms={arms}
+            mode="edit"
+            selectedIds={selectedIds}
+            selectedTaskPointId={selection.taskPointId}
+            postures={postures}
+            verdicts={bands}
+            onItemPointerDown={tool.name === 'pan' ? undefined : pointer.onItem}
+            onTaskPointPointerDown={tool.name === 'pan' ? undefined : pointer.onTaskPoint}
+          />
+          <OverlayLayer>
+            {tool.name === 'select' && (
+              <SelectionHandles items={chosenItems} arms={arms} onHandlePointerDown={pointer.onHandle} />
+            )}
+            <PlumbMarks />
+            <DraftMarks />
+            <RemarkPins remarks={pins} chosenId={chosenRemarkId} onPinPointerDown={onRemark} />
+          </OverlayLayer>
+        </SheetStage>
+      )}
+      {tool.name !== 'select' && (
+        <p
+          role="status"
+          className="pointer-events-none absolute top-2 left-1/2 -translate-x-1/2 border border-rule bg-sheet px-3 py-1 text-sm max-sm:w-[92%]"
+        >
+          {tool.hint}
+        </p>
+      )}
+    </div>
+  );
+}
+
+const CURSORS: Partial<Record<string, string>> = { select: 'default', pan: 'grab' };
+
+/** Keeps the canvas at the size of its box, and shows the whole sheet once at the start. */
+function useMeasuredAndFitted(box: React.RefObject<HTMLDivElement | null>): void {
+  const { view, sheet, floorPlan } = useBoard();
+  const fitted = useRef(false);
+  useEffect(() => {
+    const element = box.current;
+    if (!element) return;
+    const measure = () => {
+      const { clientWidth: width, clientHeight: height } = element;
+      view.set({ size: { width, height } });
+      if (fitted.current || width === 0 || height === 0) return;
+      fitted.current = true;
+      const items: ReadonlyMap<string, Item> = sheet.getState().items;
+      view.fit(unionBounds(boundsOfItems(items), floorPlanBounds(floorPlan)));
+    };
+    const observer = new ResizeObserver(measure);
+    observer.observe(element);
+    measure();
+    return () => observer.disconnect();
+  }, [box, view, sheet, floorPlan]);
+}

@@ -1,0 +1,39 @@
+'use client';
+
+import { useBoard } from '@/components/sheet/editor/board-context';
+import { useReadings } from '@/components/sheet/editor/readings-context';
+import { placeWords, printed } from '@/lib/editor/measure-text';
+import type { Item } from '@/lib/layout/items';
+import { fixtureWords } from './verdict-order';
+
+export interface ItemNote {
+  readonly title: string;
+  readonly words: string;
+  readonly tone: 'figures' | 'soft' | 'red';
+}
+
+/** What the list says of an item: its name, and the one thing worth knowing about it. */
+export function useItemNote(item: Item): ItemNote {
+  const { arms } = useBoard();
+  const { byPoint } = useReadings();
+  switch (item.kind) {
+    case 'robot': {
+      const arm = arms.get(item.armId)?.name;
+      const title = arm ? `${item.name} · ${arm[0].toLowerCase()}${arm.slice(1)}` : item.name;
+      return { title, words: placeWords(item), tone: 'figures' };
+    }
+    case 'fixture': {
+      const verdicts = item.taskPoints.flatMap(({ id }) => byPoint.get(id) ?? []);
+      const { words, isTrouble } = fixtureWords(verdicts, item.taskPoints.length);
+      return { title: item.name, words, tone: isTrouble ? 'red' : 'soft' };
+    }
+    case 'dimension': {
+      const length = Math.hypot(item.toMm[0] - item.fromMm[0], item.toMm[1] - item.fromMm[1]);
+      return { title: item.name, words: `${printed(length, 0)} mm`, tone: 'figures' };
+    }
+    case 'walkway':
+      return { title: item.name, words: `keep ${printed(item.widthMm, 0)} mm clear`, tone: 'soft' };
+    default:
+      return { title: item.name, words: placeWords(item), tone: 'figures' };
+  }
+}
