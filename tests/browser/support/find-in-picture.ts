@@ -1,4 +1,4 @@
-import sharp from 'sharp';
+import sharp, { type Sharp } from 'sharp';
 import type { Page } from '@playwright/test';
 
 /** Half the side of the patch looked for and how far it may be off, screen pixels. */
@@ -10,7 +10,7 @@ interface Patch {
   readonly values: Uint8Array;
 }
 
-async function patchOf(image: sharp.Sharp, side: number): Promise<Patch> {
+async function patchOf(image: Sharp, side: number): Promise<Patch> {
   const { data } = await image
     .resize(side, side, { fit: 'fill' })
     .greyscale()
