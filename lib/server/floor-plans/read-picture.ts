@@ -55,7 +55,7 @@ async function checkedHead(bytes: Uint8Array): Promise<Metadata> {
 /** The whole picture: exact pixels for drawings, a fine WebP for photographs and scans. */
 function whole(picture: Sharp, type: PictureType, { width, height }: { width: number; height: number }): Sharp {
   const lossy = type === 'image/jpeg' && Math.max(width, height) <= WEBP_MAX_SIDE_PX;
-  return lossy ? picture.webp({ quality: 92 }) : picture.png({ compressionLevel: 6 });
+  return lossy ? picture.webp({ quality: 92, effort: 2 }) : picture.png({ compressionLevel: 6 });
 }
 
 async function rendition(picture: Sharp): Promise<Rendition> {
