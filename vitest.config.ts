@@ -26,6 +26,7 @@ export default defineConfig({
           environment: 'jsdom',
           include: ['{app,components,lib}/**/*.test.tsx'],
           setupFiles: ['tests/components/setup.ts'],
+          testTimeout: 60_000,
         },
       },
       {

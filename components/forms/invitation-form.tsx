@@ -1,7 +1,6 @@
 'use client';
 
 import { zodResolver } from '@hookform/resolvers/zod';
-import { signIn } from 'next-auth/react';
 import { useRouter } from 'next/navigation';
 import { useForm } from 'react-hook-form';
 import { Button } from '@/components/ui/button';
@@ -12,6 +11,7 @@ import { Notice } from '@/components/ui/notice';
 import { PasswordInput } from '@/components/ui/password-input';
 import { TextInput } from '@/components/ui/text-input';
 import { send } from '@/lib/client/fetcher';
+import { signInWith } from '@/lib/client/sign-in';
 import { useAnswer } from '@/lib/client/use-answer';
 import { invitationAcceptSchema, invitationPreviewSchema } from '@/lib/contracts/accounts';
 import { ROLE_DEEDS, ROLE_NAMES } from '@/components/shell/role-words';
@@ -33,12 +33,9 @@ export function InvitationForm({ token }: { token: string }) {
       applyProblem(form, error);
       return;
     }
-    const { email } = invitation;
-    const outcome = await signIn('credentials', { email, password: request.password, redirect: false }).catch(
-      () => null,
-    );
+    const outcome = await signInWith(invitation.email, request.password);
     // The account exists now either way; where signing in went wrong, the sign-in page says why.
-    router.replace(outcome?.ok && !outcome.error ? '/projects' : '/sign-in');
+    router.replace(outcome === 'signed in' ? '/projects' : '/sign-in');
     router.refresh();
   });
 

@@ -1,7 +1,6 @@
 'use client';
 
 import { zodResolver } from '@hookform/resolvers/zod';
-import { signIn } from 'next-auth/react';
 import { useRouter } from 'next/navigation';
 import { useForm } from 'react-hook-form';
 import { z } from 'zod';
@@ -11,15 +10,16 @@ import { TextLink } from '@/components/ui/link-button';
 import { Notice } from '@/components/ui/notice';
 import { PasswordInput } from '@/components/ui/password-input';
 import { TextInput } from '@/components/ui/text-input';
+import { signInWith } from '@/lib/client/sign-in';
 import { emailSchema } from '@/lib/contracts/common';
 
 const signInSchema = z.object({ email: emailSchema, password: z.string().min(1, 'Write your password.') });
 
-const WORDS: Record<string, string> = {
-  CredentialsSignin: 'This e-mail address and password do not belong together. Check both, or set a new password.',
-  too_many_attempts: 'Too many tries with this address. Wait a quarter of an hour, or set a new password.',
+const WORDS = {
+  wrong: 'This e-mail address and password do not belong together. Check both, or set a new password.',
+  'too many attempts': 'Too many tries with this address. Wait a quarter of an hour, or set a new password.',
+  'no answer': 'The server did not answer. Check your connection and try again.',
 };
-const NO_ANSWER = 'The server did not answer. Check your connection and try again.';
 
 /** E-mail and password; goes on to `returnTo`, a path that has been checked to be local. */
 export function SignInForm({ returnTo }: { returnTo: string }) {
@@ -28,13 +28,13 @@ export function SignInForm({ returnTo }: { returnTo: string }) {
   const { errors, isSubmitting, isSubmitSuccessful } = form.formState;
 
   const submit = form.handleSubmit(async ({ email, password }) => {
-    const outcome = await signIn('credentials', { email, password, redirect: false }).catch(() => null);
-    if (outcome?.ok && !outcome.error) {
+    const outcome = await signInWith(email, password);
+    if (outcome === 'signed in') {
       router.replace(returnTo);
       router.refresh();
       return;
     }
-    form.setError('root', { message: outcome ? (WORDS[outcome.error ?? ''] ?? WORDS.CredentialsSignin) : NO_ANSWER });
+    form.setError('root', { message: WORDS[outcome] });
     form.setFocus('password', { shouldSelect: true });
   });
 
