@@ -1,5 +1,6 @@
 import { BUILT_IN_ARMS } from '@/lib/kinematics/library';
-import type { Arm, Frame, Freedom, Joint } from '@/lib/kinematics/types';
+import { RIGHT_ANGLE as RIGHT, sliding, turning } from '@/lib/kinematics/testing/chains';
+import type { Arm, Frame, Freedom } from '@/lib/kinematics/types';
 
 /** The arms that the reference data covers: every built-in one, and chains of other kinds (invented lengths and speeds). */
 export interface ReferenceArm {
@@ -9,31 +10,9 @@ export interface ReferenceArm {
   readonly freedoms: readonly Freedom[];
 }
 
-const RIGHT = Math.PI / 2;
 const ALL: readonly Freedom[] = ['x', 'y', 'z', 'rx', 'ry', 'rz'];
 const TILTED_BASE: Frame = { xyz: [0.3, -0.2, 0.5], rpy: [0.2, -0.3, 0.4] };
 const CROOKED_TOOL: Frame = { xyz: [0.06, 0.03, 0.12], rpy: [0.5, -0.4, 0.3] };
-
-type Row = Pick<Joint, 'a' | 'alpha' | 'd'>;
-
-export const turning = (row: Row, maxSpeed = 2, theta = 0): Joint => ({
-  type: 'revolute',
-  ...row,
-  theta,
-  min: -3,
-  max: 3,
-  maxSpeed,
-  maxAcceleration: 10,
-});
-export const sliding = (row: Row, maxSpeed = 1.5): Joint => ({
-  type: 'prismatic',
-  ...row,
-  theta: 0,
-  min: 0,
-  max: 1,
-  maxSpeed,
-  maxAcceleration: 5,
-});
 
 const SEVEN_JOINTS = [
   turning({ a: 0, alpha: -RIGHT, d: 0.34 }),

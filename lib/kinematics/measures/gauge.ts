@@ -41,6 +41,11 @@ export interface Gauge {
   /** The velocity set of the posture last read, and its corners (one of each ± pair) as m numbers each. */
   velocitySet(): VelocitySet;
   corners(): Float64Array;
+  /**
+   * Speed that the posture last read can make along a direction without sideways drift: the largest t with t·d in the velocity set (m/s).
+   * `direction` has an entry for each of `linearRows`, any length above zero. Answers 0 where the set is flat (sure speed 0).
+   */
+  speedAlong(direction: ArrayLike<number>): number;
 }
 
 /**
@@ -154,11 +159,26 @@ export function makeGauge(chain: Chain, freedoms: readonly number[], mode: Wrist
     reading.bindingActuator = current.leastActuator;
   }
 
+  function speedAlong(direction: ArrayLike<number>): number {
+    if (reading.sureSpeed === 0) return 0;
+    let size = 0;
+    for (let r = 0; r < m; r++) size += direction[r] * direction[r];
+    size = Math.sqrt(size);
+    let least = Infinity;
+    current.normals(current.set, (normal) => {
+      let along = 0;
+      for (let r = 0; r < m; r++) along += normal[r] * direction[r];
+      if (along !== 0) least = Math.min(least, current.support(normal) / Math.abs(along / size));
+    });
+    return least;
+  }
+
   return {
     mode,
     linearRows,
     reading,
     read,
+    speedAlong,
     velocitySet: () => current.set,
     corners: () => current.corners.points.subarray(0, current.cornerCount * m),
   };
@@ -168,6 +188,8 @@ interface Toolbox {
   readonly set: VelocitySet;
   readonly corners: Corners;
   readonly normals: FacetNormals;
+  /** How far the set reaches along a unit vector. */
+  readonly support: (normal: Float64Array) => number;
   readonly visit: (normal: Float64Array, actuator: number) => void;
   cornerCount: number;
   least: number;
@@ -203,6 +225,7 @@ function makeToolbox(m: number, k: number, n: number, free: boolean): Toolbox {
     set,
     corners,
     normals,
+    support,
     visit: (normal, actuator) => {
       const distance = support(normal);
       if (distance < box.least) {

@@ -1,0 +1,16 @@
+import type { Chain } from '../chain';
+
+/** Random numbers that come out the same for the same seed (mulberry32, public domain). */
+export function seededRandom(seed: number): () => number {
+  let state = seed >>> 0;
+  return () => {
+    state = (state + 0x6d2b79f5) >>> 0;
+    let mixed = Math.imul(state ^ (state >>> 15), state | 1);
+    mixed ^= mixed + Math.imul(mixed ^ (mixed >>> 7), mixed | 61);
+    return ((mixed ^ (mixed >>> 14)) >>> 0) / 2 ** 32;
+  };
+}
+
+/** An even draw inside the actuators' limits. */
+export const randomPosture = (chain: Chain, random: () => number): number[] =>
+  Array.from(chain.min, (low, i) => low + (chain.max[i] - low) * random());
