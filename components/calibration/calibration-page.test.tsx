@@ -3,14 +3,14 @@ import type { UserEvent } from '@testing-library/user-event';
 import { http, HttpResponse } from 'msw';
 import { beforeEach, describe, expect, it, vi } from 'vitest';
 import truth from '@/tests/fixtures/floor-plans/truth.json';
-import { api, problem, useApi } from '@/tests/components/api';
+import { api, problem, withApi } from '@/tests/components/api';
 import { fakeFloorPlan, fakeId, fakeProject } from '@/tests/components/fakes';
 import { show } from '@/tests/components/show';
 import { CalibrationPage } from './calibration-page';
 
 vi.mock('next/navigation', () => ({ useRouter: () => ({ push: vi.fn() }) }));
 
-useApi();
+withApi();
 
 // Points and true sizes come with the pictures (truth.json): the bay is 9000 mm by 5700 mm.
 const SCAN = truth['plan-scan.jpg'];

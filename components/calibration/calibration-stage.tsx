@@ -1,7 +1,7 @@
 'use client';
 
 import { Maximize, Minus, Plus } from 'lucide-react';
-import { useEffect, useRef, useState, type KeyboardEvent } from 'react';
+import { useRef, useState, type KeyboardEvent } from 'react';
 import { usePanAndZoom } from '@/components/sheet/drawing/use-pan-and-zoom';
 import { usePicture } from '@/components/sheet/drawing/use-picture';
 import { Button } from '@/components/ui/button';
@@ -171,6 +171,6 @@ function useWantedWidth(floorPlan: FloorPlan, zoom: number): number {
   const shown = Math.min(floorPlan.widthPx, floorPlan.widthPx * zoom * density);
   const wanted =
     floorPlan.pictureWidths.find((width) => width >= shown) ?? floorPlan.pictureWidths.at(-1) ?? floorPlan.widthPx;
-  useEffect(() => setLoaded((last) => Math.max(last, wanted)), [wanted]);
+  if (wanted > loaded) setLoaded(wanted);
   return Math.max(loaded, wanted);
 }

@@ -2,12 +2,12 @@ import { screen, waitFor, within } from '@testing-library/react';
 import { http, HttpResponse } from 'msw';
 import { describe, expect, it, vi } from 'vitest';
 import type { ShareLink } from '@/lib/contracts/share-links';
-import { api, useApi } from '@/tests/components/api';
+import { api, withApi } from '@/tests/components/api';
 import { fakeId, fakeShareLink } from '@/tests/components/fakes';
 import { show } from '@/tests/components/show';
 import { ShareLinkDialog } from './share-link-dialog';
 
-useApi();
+withApi();
 
 const LIST = `/api/revisions/${fakeId(60)}/share-links`;
 const ADDRESS = 'https://elbowroom.example/share/a-token-that-is-shown-once';

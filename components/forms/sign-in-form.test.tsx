@@ -1,14 +1,14 @@
 import { screen, waitFor } from '@testing-library/react';
 import { http, HttpResponse } from 'msw';
 import { beforeEach, describe, expect, it, vi } from 'vitest';
-import { api, useApi } from '@/tests/components/api';
+import { api, withApi } from '@/tests/components/api';
 import { show } from '@/tests/components/show';
 import { SignInForm } from './sign-in-form';
 
 const router = { replace: vi.fn(), refresh: vi.fn() };
 vi.mock('next/navigation', () => ({ useRouter: () => router }));
 
-useApi();
+withApi();
 
 /** What next-auth answers to a sign-in: the address to go on to, with the error in it. */
 function answerSignIn(error: string | null): { seen: URLSearchParams[] } {

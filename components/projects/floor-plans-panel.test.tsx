@@ -2,14 +2,14 @@ import { fireEvent, screen } from '@testing-library/react';
 import { http, HttpResponse } from 'msw';
 import { describe, expect, it, vi } from 'vitest';
 import { FLOOR_PLAN_MAX_BYTES, type FloorPlan } from '@/lib/contracts/floor-plans';
-import { api, problem, useApi } from '@/tests/components/api';
+import { api, problem, withApi } from '@/tests/components/api';
 import { fakeFloorPlan, fakeId } from '@/tests/components/fakes';
 import { show } from '@/tests/components/show';
 import { FloorPlansPanel } from './floor-plans-panel';
 
 vi.mock('next/navigation', () => ({ useRouter: () => ({ push: vi.fn() }) }));
 
-useApi();
+withApi();
 
 const LIST = `/api/projects/${fakeId(1)}/floor-plans`;
 

@@ -2,7 +2,7 @@ import { screen, waitFor, within } from '@testing-library/react';
 import { http, HttpResponse } from 'msw';
 import { beforeEach, describe, expect, it, vi } from 'vitest';
 import type { Project } from '@/lib/contracts/projects';
-import { api, problem, useApi } from '@/tests/components/api';
+import { api, problem, withApi } from '@/tests/components/api';
 import { fakeProject } from '@/tests/components/fakes';
 import { show } from '@/tests/components/show';
 import { ProjectsPage } from './projects-page';
@@ -10,7 +10,7 @@ import { ProjectsPage } from './projects-page';
 const router = { push: vi.fn() };
 vi.mock('next/navigation', () => ({ useRouter: () => router }));
 
-useApi();
+withApi();
 
 const PROJECTS = [
   fakeProject(1, { name: 'Pump housing line, bay 4', openRemarkCount: 2 }),

@@ -7,7 +7,7 @@ import { ProblemError } from './fetcher';
 /** A session that ended while the page was open: back to sign-in, and afterwards back here. */
 function leaveForSignIn(): void {
   const here = window.location.pathname + window.location.search;
-  window.location.assign(`/sign-in?return=${encodeURIComponent(here)}`);
+  window.location.replace(`/sign-in?return=${encodeURIComponent(here)}`);
 }
 
 /** What all data on a page shares: no retry of what was refused, and the way to sign-in when the session is over. */

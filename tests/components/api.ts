@@ -5,7 +5,7 @@ import { afterAll, afterEach, beforeAll } from 'vitest';
 /** The server as component tests see it: each test says what it answers; an address nobody spoke of fails the test. */
 export const api = setupServer();
 
-export function useApi(): void {
+export function withApi(): void {
   beforeAll(() => api.listen({ onUnhandledRequest: 'error' }));
   afterEach(() => api.resetHandlers());
   afterAll(() => api.close());
