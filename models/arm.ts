@@ -15,6 +15,8 @@ export class Arm extends Model<InferAttributes<Arm>, InferCreationAttributes<Arm
   declare definition: LibraryArm['definition'];
   declare createdBy: CreationOptional<string | null>;
   declare createdAt: CreationOptional<Date>;
+  /** The same for all versions of one arm. */
+  declare archivedAt: CreationOptional<Date | null>;
 }
 
 export function initArm(sequelize: Sequelize): void {
@@ -31,6 +33,7 @@ export function initArm(sequelize: Sequelize): void {
       definition: { type: DataTypes.JSONB, allowNull: false },
       createdBy: DataTypes.UUID,
       createdAt: DataTypes.DATE,
+      archivedAt: DataTypes.DATE,
     },
     { sequelize, modelName: 'Arm', tableName: 'arms', underscored: true, updatedAt: false },
   );

@@ -32,7 +32,7 @@ export const snapshotSchema = z.object({
   name: z.string(),
   layoutVersion: z.number().int(),
   items: z.array(itemSchema),
-  arms: z.array(libraryArmSchema.omit({ layoutCount: true, latest: true, createdAt: true })),
+  arms: z.array(libraryArmSchema.omit({ layoutCount: true, latest: true, createdAt: true, archivedAt: true })),
   floorPlan: floorPlanSchema.nullable(),
   mapSettings: mapSettingsSchema,
   /** The stored map of each robot at the moment of issue; robots whose map was not finished are left out. */

@@ -1,5 +1,5 @@
 import { createHash, randomUUID } from 'node:crypto';
-import type { LibraryArm } from '@/lib/contracts/arms';
+import type { ArmContent, LibraryArm } from '@/lib/contracts/arms';
 import type { Snapshot } from '@/lib/contracts/revisions';
 import { mapSettingsSchema } from '@/lib/layout/map-settings';
 import { robotSchema } from '@/lib/layout/items';
@@ -139,6 +139,11 @@ export async function createArm(options: ArmOptions = {}): Promise<Arm> {
     reachMm: 1400,
     definition,
   });
+}
+
+/** What a request says of an arm; `part` in place of the usual. */
+export function armContent(part: Partial<ArmContent> = {}): ArmContent {
+  return { name: unique('Arm'), description: '', payloadKg: 12, definition, ...part };
 }
 
 export function robotItem(armId: string): Item {

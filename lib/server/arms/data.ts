@@ -1,6 +1,6 @@
-import { literal } from 'sequelize';
+import { literal, Op } from 'sequelize';
 import type { FindAttributeOptions } from 'sequelize';
-import type { LibraryArm } from '@/lib/contracts/arms';
+import type { ArmListQuery, LibraryArm } from '@/lib/contracts/arms';
 import { Arm } from '@/models';
 import type { Transaction } from '../database';
 import { notFound } from '../errors';
@@ -23,12 +23,19 @@ const attributes: FindAttributeOptions = {
   ],
 };
 
-/** Every version of every arm, by name, newest version first. Viewers find the arms of a revision in its snapshot. */
-export async function listArms(actor: Actor, transaction?: Transaction): Promise<LibraryArm[]> {
+/** Every version of every arm on one shelf, by name, newest first. Viewers find the arms of a revision in its snapshot. */
+export async function listArms(
+  actor: Actor,
+  { archived }: ArmListQuery = { archived: 'false' },
+  transaction?: Transaction,
+): Promise<LibraryArm[]> {
   demandRole(actor, 'planner');
   const arms = await Arm.findAll({
     attributes,
-    where: { organisationId: actor.organisationId },
+    where: {
+      organisationId: actor.organisationId,
+      archivedAt: archived === 'true' ? { [Op.not]: null } : null,
+    },
     order: [
       ['name', 'ASC'],
       ['familyId', 'ASC'],
@@ -46,6 +53,28 @@ export async function getArm(actor: Actor, armId: string, transaction?: Transact
   const arm = await Arm.findOne({ attributes, where, transaction });
   if (!arm) throw notFound('arm');
   return presentArm(arm);
+}
+
+/** All versions of the arm that `armId` is a version of, newest first. Throws 404 for an arm of another organisation. */
+export async function listArmVersions(actor: Actor, armId: string, transaction?: Transaction): Promise<LibraryArm[]> {
+  const { familyId } = await getArm(actor, armId, transaction);
+  const where = { organisationId: actor.organisationId, familyId };
+  const arms = await Arm.findAll({ attributes, where, order: [['version', 'DESC']], transaction });
+  return arms.map(presentArm);
+}
+
+/**
+ * Holds the arm that `armId` is a version of until the transaction ends, and gives its newest version. The first version is the
+ * one that is locked: it is always there, so that two who save at once wait for each other. Throws 404.
+ */
+export async function holdNewest(actor: Actor, armId: string, transaction: Transaction): Promise<LibraryArm> {
+  const { familyId } = await getArm(actor, armId, transaction);
+  const where = { organisationId: actor.organisationId, familyId };
+  await Arm.findOne({ where, order: [['version', 'ASC']], lock: transaction.LOCK.UPDATE, transaction });
+  // Asked again behind the lock: a version saved while waiting is seen here.
+  const newest = await Arm.findOne({ attributes, where, order: [['version', 'DESC']], transaction });
+  if (!newest) throw notFound('arm');
+  return presentArm(newest);
 }
 
 /**

@@ -15,5 +15,6 @@ export function presentArm(arm: Arm): LibraryArm {
     createdAt: arm.createdAt.toISOString(),
     latest: Boolean(arm.get('latest')),
     layoutCount: Number(arm.get('layoutCount')),
+    archivedAt: arm.archivedAt?.toISOString() ?? null,
   };
 }

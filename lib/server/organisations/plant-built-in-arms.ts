@@ -1,7 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import { BUILT_IN_ARMS } from '@/lib/kinematics/library';
 import { armSchema } from '@/lib/contracts/arm';
-import { reachRadius } from '@/lib/layout/reach-radius';
+import { armReachMm } from '@/lib/layout/arm-reach';
 import { Arm } from '@/models';
 import type { Transaction } from '../database';
 
@@ -18,7 +18,7 @@ export async function plantBuiltInArms(organisationId: string, transaction: Tran
       name,
       description,
       payloadKg,
-      reachMm: Math.round(reachRadius(arm) * 1000),
+      reachMm: Math.round(armReachMm(arm)),
       definition: armSchema.parse(arm),
     })),
     { transaction },

@@ -2,7 +2,7 @@ import { randomUUID } from 'node:crypto';
 import sharp from 'sharp';
 import { randomToken } from '@/lib/server/tokens';
 import { dimensionSchema } from '@/lib/layout/items';
-import { unique, uniqueEmail } from '@/tests/factories';
+import { armContent, unique, uniqueEmail } from '@/tests/factories';
 import type { CallOptions } from '@/tests/factories';
 import { newQuestion } from './access-world';
 import type { AccessWorld } from './access-world';
@@ -45,6 +45,7 @@ const project: Prepare = ({ projectId }) => ({ params: { projectId } });
 const floorPlan: Prepare = ({ floorPlanId }) => ({ params: { floorPlanId } });
 const layout: Prepare = ({ layoutId }) => ({ params: { layoutId } });
 const revision: Prepare = ({ revisionId }) => ({ params: { revisionId } });
+const arm: Prepare = ({ armId }) => ({ params: { armId } });
 const map: Prepare = ({ mapId }) => ({ params: { mapId } });
 const withBody =
   (prepare: Prepare, body: unknown): Prepare =>
@@ -93,7 +94,11 @@ export const TABLE: readonly Row[] = [
   row('POST',   'invitations/accept/[token]',               [404, 404,  404,  404,     404,   404,  404,   404], () => ({ params: { token: randomToken() }, body: { name: 'Nia', password: 'a new long password' } })),
 
   row('GET',    'arms',                                     [401, 401,  403,  200,     403,   200,  200,   200]),
-  row('GET',    'arms/[armId]',                             [401, 401,  403,  404,     403,   200,  200,   200], ({ armId }) => ({ params: { armId } })),
+  row('POST',   'arms',                                     [401, 401,  403,  201,     403,   403,  201,   201], () => ({ body: armContent() })),
+  row('GET',    'arms/[armId]',                             [401, 401,  403,  404,     403,   200,  200,   200], arm),
+  row('PATCH',  'arms/[armId]',                             [401, 401,  403,  404,     403,   403,  200,   200], async (world) => ({ params: { armId: (await world.addArm()).id }, body: { archived: true } })),
+  row('GET',    'arms/[armId]/versions',                    [401, 401,  403,  404,     403,   200,  200,   200], arm),
+  row('POST',   'arms/[armId]/versions',                    [401, 401,  403,  404,     403,   403,  201,   201], async (world) => ({ params: { armId: (await world.addArm()).id }, body: { ...armContent(), baseVersion: 1 } })),
 
   row('GET',    'projects',                                 [401, 401,  200,  200,     200,   200,  200,   200]),
   row('POST',   'projects',                                 [401, 401,  403,  201,     403,   201,  201,   201], () => ({ body: { name: unique('Project') } })),

@@ -73,6 +73,7 @@ export async function buildAccessWorld() {
     revisionId: revision.id,
     remarkId: remark.id,
     // What a caller may take away is made anew for each of them.
+    addArm: () => createArm({ organisationId }),
     addFloorPlan,
     addLayout,
     addShareLink: async () => (await createShareLink({ revisionId: revision.id })).shareLink,
