@@ -11,21 +11,39 @@ const MOVES = 1e-9;
 export function controlledFreedoms(arm: Arm, chain: Chain): number[] {
   if (arm.freedoms) return FREEDOMS.map((_, row) => row).filter((row) => arm.freedoms!.includes(FREEDOMS[row]));
   if (chain.actuators >= 6) return [0, 1, 2, 3, 4, 5];
-  const stance = makeStance(chain);
-  const columns = chain.actuators;
-  const matrix = new Float64Array(6 * columns);
   let best: number[] = [];
-  for (const share of [0.31, 0.57, 0.79]) {
-    const posture = Array.from({ length: columns }, (_, i) => {
-      // Different shares of each range, so that no two links line up by chance.
-      const at = (share + 0.137 * i) % 1;
-      return chain.min[i] + (chain.max[i] - chain.min[i]) * at;
-    });
-    jacobian(chain, forward(chain, posture, stance), matrix);
-    const rows = independentRows(matrix, columns);
+  for (const matrix of generalPostures(chain)) {
+    const rows = independentRows(matrix, chain.actuators);
     if (rows.length > best.length) best = rows;
   }
   return best;
+}
+
+/**
+ * Rows that a pose has to match to count as reached: the point always; of the orientation what the arm says it controls, or all of it where
+ * it says nothing and controls any; and in any case what no joint can change.
+ */
+export function rowsToMatch(arm: Arm, chain: Chain, controlled: readonly number[]): number[] {
+  const turns = controlled.some((row) => row >= 3);
+  return [0, 1, 2, 3, 4, 5].filter((row) => {
+    if (row < 3 || controlled.includes(row)) return true;
+    return arm.freedoms || !turns ? !canMove(chain, row) : true;
+  });
+}
+
+function canMove(chain: Chain, row: number): boolean {
+  return generalPostures(chain).some((matrix) =>
+    matrix.subarray(row * chain.actuators, (row + 1) * chain.actuators).some((value) => Math.abs(value) > MOVES),
+  );
+}
+
+/** Jacobians at three postures with different shares of each range, so that no two links line up by chance. */
+function generalPostures(chain: Chain): Float64Array[] {
+  const stance = makeStance(chain);
+  return [0.31, 0.57, 0.79].map((share) => {
+    const posture = Array.from(chain.min, (low, i) => low + (chain.max[i] - low) * ((share + 0.137 * i) % 1));
+    return jacobian(chain, forward(chain, posture, stance), new Float64Array(6 * chain.actuators));
+  });
 }
 
 /** Rows that add rank, taken from the top, by Gram-Schmidt. */

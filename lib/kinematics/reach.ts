@@ -1,6 +1,5 @@
 import type { Solver } from './solver';
 import { posturesInside, missBy, nearestToMiddle } from './inverse/turns';
-import { solveNumerically } from './inverse/numerical';
 import { hasFreeRoll, rolled, transformOfTarget } from './target';
 import { identityTransform, type Transform } from './transforms';
 import { LIMIT_SLACK } from './limits';
@@ -133,11 +132,9 @@ function withoutTwins(postures: ReachingPosture[]): ReachingPosture[] {
 }
 
 function reachNumerically(solver: Solver, pose: Transform, freeRoll: boolean): ReachAnswer {
-  const answer = solveNumerically(solver.chain, solver.freedoms, pose, freeRoll);
-  const postures = answer.solutions.map((posture) => ({ posture, branch: '', roll: 0 }));
-  if (postures.length > 0) return { reached: true, reason: 'reached', joint: -1, by: 0, postures };
-  const reason = answer.outsideLimits ? 'joint limit' : 'not found';
-  return { reached: false, reason, joint: -1, by: answer.residual, postures };
+  const { solutions, reason, joint, by } = solver.solveNumerically(pose, freeRoll);
+  const postures = solutions.map((posture) => ({ posture, branch: '', roll: 0 }));
+  return { reached: postures.length > 0, reason, joint, by, postures };
 }
 
 /** The copy of a closed-form posture that maps show: every joint as near to the middle of its range as whole turns allow. */

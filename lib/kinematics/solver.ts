@@ -1,6 +1,7 @@
 import { compileChain, forward, jacobian, makeStance, type Chain, type Stance } from './chain';
-import { controlledFreedoms } from './freedoms';
+import { controlledFreedoms, rowsToMatch } from './freedoms';
 import type { ClosedForm } from './inverse/closed-form';
+import { makeNumericalSolver, type NumericalSolver } from './inverse/numerical';
 import { parallelAxesSolver } from './inverse/parallel-axes';
 import { sphericalWristSolver } from './inverse/spherical-wrist';
 import { identityTransform, invertTransform, multiplyTransforms, type Transform } from './transforms';
@@ -15,6 +16,8 @@ export interface Solver {
   readonly freedoms: readonly number[];
   readonly method: SolutionMethod;
   readonly closedForm: ClosedForm | null;
+  /** For chains without a closed form. */
+  readonly solveNumerically: NumericalSolver;
   /** The tool's z axis lies on the last axis, so a free roll only turns the last joint. */
   readonly toolOnLastAxis: boolean;
   readonly stance: Stance;
@@ -34,11 +37,13 @@ export function makeSolver(arm: Arm): Solver {
   const flange = identityTransform();
   const stance = makeStance(chain);
   const matrix = new Float64Array(6 * chain.actuators);
+  const freedoms = controlledFreedoms(arm, chain);
   return {
     chain,
-    freedoms: controlledFreedoms(arm, chain),
+    freedoms,
     method: spherical ? 'spherical wrist' : closedForm ? 'parallel axes' : 'numerical',
     closedForm,
+    solveNumerically: makeNumericalSolver(chain, rowsToMatch(arm, chain, freedoms)),
     toolOnLastAxis: toolOnLastAxis(chain),
     stance,
     matrix,

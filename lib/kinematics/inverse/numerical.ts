@@ -1,57 +1,84 @@
-import { forward, jacobian, makeStance, type Chain } from '../chain';
+import { forward, makeStance, type Chain } from '../chain';
 import { withinLimits } from '../limits';
-import { invertSmall } from '../measures/small-matrix';
 import type { Transform } from '../transforms';
+import type { Reason } from '../types';
+import { makeDescent, THERE, type DescentResult } from './descent';
+import { missBy, posturesInside } from './turns';
 
 /**
- * Inverse kinematics for chains without a closed form: damped least squares (Wampler 1986; Nakamura & Hanafusa 1986) from several
- * starts, damping by Levenberg's rule (less where a step helps, more where it does not). Same input, same answer: the starts are fixed.
+ * Inverse kinematics for chains without a closed form: damped least squares from several fixed starts, so the same question gets
+ * the same answer. Every other start may leave the limits on its way: isolated solutions are found better so, and whole turns
+ * are taken off afterwards; and where all of them end outside, it is known which joint forbids the spot.
  */
 
 const STARTS = 24;
-const STEPS = 120;
-/** m and rad: what counts as there, well inside the 1e-9 that callers are promised. */
-const THERE = 1e-11;
+/** Starts of the search for the nearest point, where nothing was found. */
+const NEAREST_STARTS = 6;
 /** Two postures closer than this (rad, m) are one solution. */
 const SAME_POSTURE = 1e-6;
+const POINT_ROWS = [0, 1, 2];
 
 export interface NumericalAnswer {
   readonly solutions: number[][];
   /** Least error over all starts: m and rad together, as a root sum of squares. */
   readonly residual: number;
-  readonly stop: 'found' | 'stalled' | 'out of steps';
-  /** True where a start arrived, but outside the limits. */
-  readonly outsideLimits: boolean;
+  readonly stop: DescentResult['stop'];
+  readonly reason: Reason;
+  /** Actuator (from zero) that forbids the spot, or −1; and by how much (rad, m), or how far the spot is out of reach (m). */
+  readonly joint: number;
+  readonly by: number;
 }
 
-/**
- * `freedoms`: rows of the Jacobian that have to match. `freeRoll`: only the direction of the tool's z axis counts, not its roll.
- * `target`: tool pose in the frame that the base is given in.
- */
-export function solveNumerically(
-  chain: Chain,
-  freedoms: readonly number[],
-  target: Transform,
-  freeRoll: boolean,
-): NumericalAnswer {
-  const solutions: number[][] = [];
-  let residual = Infinity;
-  let stop: NumericalAnswer['stop'] = 'stalled';
-  let outsideLimits = false;
-  const descend = makeDescent(chain, freedoms, target, freeRoll);
-  for (let start = 0; start < STARTS; start++) {
-    const u = startPosture(chain, start);
-    const result = descend(u);
-    if (result.error < residual) {
-      residual = result.error;
-      stop = result.stop;
+/** `target`: tool pose in the frame that the base is given in. */
+export type NumericalSolver = (target: Transform, freeRoll: boolean) => NumericalAnswer;
+
+/** `rows` of the Jacobian that have to match where the roll is given; see rowsToMatch. */
+export function makeNumericalSolver(chain: Chain, rows: readonly number[]): NumericalSolver {
+  const fixed = makeDescent(chain, rows, false);
+  const free = makeDescent(chain, [0, 1, 2, 3, 4, 5], true);
+  const point = makeDescent(chain, POINT_ROWS, true);
+  const stance = makeStance(chain);
+
+  return (target, freeRoll) => {
+    const descend = freeRoll ? free : fixed;
+    const solutions: number[][] = [];
+    let best: DescentResult = { error: Infinity, stop: 'stalled' };
+    let joint = -1;
+    let by = Infinity;
+    let outside = false;
+    for (let start = 0; start < STARTS; start++) {
+      const insideLimits = start % 2 === 0;
+      const u = startPosture(chain, start);
+      const result = descend(u, target, insideLimits);
+      if (result.error < best.error) best = result;
+      if (result.error > THERE) continue;
+      for (const posture of copiesWithin(chain, u)) addNew(solutions, posture);
+      outside = true;
+      const miss = worstMiss(chain, u);
+      if (miss.by < by) ({ joint, by } = miss);
     }
-    if (result.error > THERE) continue;
-    if (!withinLimits(chain, u)) outsideLimits = true;
-    else if (!solutions.some((known) => known.every((value, i) => Math.abs(value - u[i]) < SAME_POSTURE)))
-      solutions.push(Array.from(u));
+    const found = { solutions, residual: best.error, stop: best.stop };
+    if (solutions.length > 0) return { ...found, reason: 'reached', joint: -1, by: 0 };
+    if (outside) return { ...found, reason: 'joint limit', joint, by: joint < 0 ? 0 : by };
+    return { ...found, ...nearest(target) };
+  };
+
+  /** Nothing was found, not even outside the limits: is it the spot, or the direction? */
+  function nearest(target: Transform): Pick<NumericalAnswer, 'reason' | 'joint' | 'by'> {
+    let by = Infinity;
+    let far = true;
+    for (let start = 0; start < NEAREST_STARTS; start++) {
+      const u = startPosture(chain, start);
+      const { error } = point(u, target, false);
+      if (error >= by) continue;
+      by = error;
+      const { tool, origins } = forward(chain, u, stance);
+      const spread = (t: Transform) => Math.hypot(t[3] - origins[0], t[7] - origins[1], t[11] - origins[2]);
+      far = spread(target) >= spread(tool);
+    }
+    if (by <= THERE) return { reason: 'direction', joint: -1, by: 0 };
+    return { reason: far ? 'too far' : 'too near', joint: -1, by };
   }
-  return { solutions, residual, stop, outsideLimits };
 }
 
 /** The middle of every range first, then points of a Kronecker sequence (multiples of roots of primes, modulo 1). */
@@ -66,105 +93,27 @@ function startPosture(chain: Chain, start: number): Float64Array {
   });
 }
 
-function makeDescent(chain: Chain, freedoms: readonly number[], target: Transform, freeRoll: boolean) {
-  const n = chain.actuators;
-  const stance = makeStance(chain);
-  const matrix = new Float64Array(6 * n);
-  const error = new Float64Array(6);
-  const trial = new Float64Array(n);
-  const normal = new Float64Array(n * n);
-  const inverse = new Float64Array(n * n);
-  const gradient = new Float64Array(n);
-
-  const measure = (u: Float64Array): number => {
-    forward(chain, u, stance);
-    poseError(stance.tool, target, freeRoll, error);
-    let sum = 0;
-    for (const row of freedoms) sum += error[row] * error[row];
-    return Math.sqrt(sum);
-  };
-
-  return (u: Float64Array): { error: number; stop: NumericalAnswer['stop'] } => {
-    let size = measure(u);
-    let damping = 1e-2;
-    for (let step = 0; step < STEPS; step++) {
-      if (size <= THERE) return { error: size, stop: 'found' };
-      jacobian(chain, stance, matrix);
-      // Near the goal the damping fades with the error, which makes the last steps Newton steps.
-      const lambda = damping * Math.min(1, size);
-      for (let i = 0; i < n; i++) {
-        gradient[i] = 0;
-        for (const row of freedoms) gradient[i] += matrix[row * n + i] * error[row];
-        for (let j = 0; j < n; j++) {
-          let sum = i === j ? lambda + 1e-14 : 0;
-          for (const row of freedoms) sum += matrix[row * n + i] * matrix[row * n + j];
-          normal[i * n + j] = sum;
-        }
-      }
-      if (!invertSmall(normal, n, inverse)) {
-        damping = Math.max(damping * 10, 1e-6);
-        measure(u);
-        if (damping > 1e6) return { error: size, stop: 'stalled' };
-        continue;
-      }
-      for (let i = 0; i < n; i++) {
-        let move = 0;
-        for (let j = 0; j < n; j++) move += inverse[i * n + j] * gradient[j];
-        trial[i] = clampToRange(chain, i, u[i] + move);
-      }
-      const next = measure(trial);
-      if (next < size) {
-        u.set(trial);
-        size = next;
-        damping = Math.max(damping / 5, 1e-12);
-      } else {
-        damping *= 4;
-        if (damping > 1e6) return { error: size, stop: 'stalled' };
-        measure(u);
-      }
-    }
-    return { error: size, stop: 'out of steps' };
-  };
+/** Under a coupling whole turns of an actuator are no whole turns of a joint, so there only the posture itself counts. */
+function copiesWithin(chain: Chain, u: Float64Array): number[][] {
+  if (chain.coupling) return withinLimits(chain, u) ? [Array.from(u)] : [];
+  return posturesInside(chain, u);
 }
 
-function clampToRange(chain: Chain, i: number, value: number): number {
-  return Math.min(chain.max[i], Math.max(chain.min[i], value));
+function addNew(solutions: number[][], posture: number[]) {
+  if (!solutions.some((known) => known.every((value, i) => Math.abs(value - posture[i]) < SAME_POSTURE)))
+    solutions.push(posture);
 }
 
-/** What is still missing: position (m), then a rotation vector (rad), or for a free roll the turn that lays z on z. */
-function poseError(pose: Transform, target: Transform, freeRoll: boolean, out: Float64Array) {
-  out[0] = target[3] - pose[3];
-  out[1] = target[7] - pose[7];
-  out[2] = target[11] - pose[11];
-  let sx: number;
-  let sy: number;
-  let sz: number;
-  let cosine: number;
-  if (freeRoll) {
-    sx = pose[6] * target[10] - pose[10] * target[6];
-    sy = pose[10] * target[2] - pose[2] * target[10];
-    sz = pose[2] * target[6] - pose[6] * target[2];
-    cosine = pose[2] * target[2] + pose[6] * target[6] + pose[10] * target[10];
-  } else {
-    // Half the sum of the cross products of matching axes: axis times sine of the turn from pose to target.
-    sx = sy = sz = 0;
-    let trace = 0;
-    for (let c = 0; c < 3; c++) {
-      sx += pose[4 + c] * target[8 + c] - pose[8 + c] * target[4 + c];
-      sy += pose[8 + c] * target[c] - pose[c] * target[8 + c];
-      sz += pose[c] * target[4 + c] - pose[4 + c] * target[c];
-      trace += pose[c] * target[c] + pose[4 + c] * target[4 + c] + pose[8 + c] * target[8 + c];
+/** The actuator that is farthest outside; −1 and no distance where only chain joints of a coupling are. */
+function worstMiss(chain: Chain, u: Float64Array): { joint: number; by: number } {
+  let joint = -1;
+  let by = 0;
+  for (let i = 0; i < chain.actuators; i++) {
+    const miss = chain.coupling ? Math.max(chain.min[i] - u[i], u[i] - chain.max[i]) : missBy(chain, i, u[i]);
+    if (miss > by) {
+      by = miss;
+      joint = i;
     }
-    sx /= 2;
-    sy /= 2;
-    sz /= 2;
-    cosine = (trace - 1) / 2;
   }
-  const sine = Math.hypot(sx, sy, sz);
-  const angle = Math.atan2(sine, cosine);
-  // Facing the other way the axis is undefined; any push off that spot will do.
-  const scale = sine > 1e-12 ? angle / sine : 1;
-  out[3] = sine > 1e-12 || cosine > 0 ? sx * scale : Math.PI;
-  out[4] = sy * scale;
-  out[5] = sz * scale;
+  return { joint, by: joint < 0 ? Infinity : by };
 }

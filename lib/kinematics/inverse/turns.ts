@@ -33,11 +33,15 @@ export function copiesInside(chain: Chain, i: number, value: number): number[] {
   return copies;
 }
 
+/** Joints of many turns each would multiply without end; beyond this many postures only the middle copy of a joint is taken. */
+const MAX_COPIES = 4096;
+
 /** All copies of a posture inside the limits. */
 export function posturesInside(chain: Chain, posture: ArrayLike<number>): number[][] {
   let found: number[][] = [[]];
   for (let i = 0; i < chain.joints; i++) {
-    const copies = copiesInside(chain, i, posture[i]);
+    let copies = copiesInside(chain, i, posture[i]);
+    if (found.length * copies.length > MAX_COPIES) copies = [copies[copies.length >> 1]];
     found = found.flatMap((start) => copies.map((copy) => [...start, copy]));
   }
   return found;

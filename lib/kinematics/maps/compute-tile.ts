@@ -1,6 +1,5 @@
 import { makeGauge, type Gauge } from '../measures/gauge';
 import { missBy } from '../inverse/turns';
-import { solveNumerically } from '../inverse/numerical';
 import { middleCopy, ROLL_SAMPLES } from '../reach';
 import { makeSolver, type Solver } from '../solver';
 import { orient, rolled } from '../target';
@@ -200,10 +199,9 @@ function leastShare({ chain }: Solver, posture: Float64Array): number {
 }
 
 function tryNumerically(solver: Solver, gauge: Gauge, pose: Transform, freeRoll: boolean, cell: Cell) {
-  const answer = solveNumerically(solver.chain, solver.freedoms, pose, freeRoll);
-  for (const posture of answer.solutions) keepIfBetter(solver, gauge, Float64Array.from(posture), 0, 0, cell);
-  if (answer.solutions.length === 0)
-    note(cell, CODE[answer.outsideLimits ? 'joint limit' : 'not found'], 0, answer.residual);
+  const { solutions, reason, joint, by } = solver.solveNumerically(pose, freeRoll);
+  for (const posture of solutions) keepIfBetter(solver, gauge, Float64Array.from(posture), 0, 0, cell);
+  if (solutions.length === 0) note(cell, CODE[reason], joint + 1, by);
 }
 
 function write(out: MapTile, at: number, cell: Cell) {
