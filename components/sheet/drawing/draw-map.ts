@@ -34,17 +34,19 @@ export function drawGroundImage(ink: Ink, image: HTMLCanvasElement, grid: FloorG
   ink.imageSmoothingEnabled = true;
 }
 
-/** Floor below the threshold: hatched in paper, so that its colour still reads between the lines. */
-export function drawHatched(ink: Ink, palette: Palette, px: number, area: Path2D): void {
+/** Hatches a part of the map in paper, so that its colour still reads between the lines; `edge` rules round it. */
+export function drawHatched(ink: Ink, palette: Palette, px: number, area: Path2D, edge: string | null): void {
   const pattern = hatchPattern(ink, palette.sheet, px, HATCH_SPACING_PX);
   if (!pattern) return;
   ink.save();
   ink.fillStyle = pattern;
   ink.fill(area, 'evenodd');
-  ink.strokeStyle = palette.red;
-  ink.lineWidth = px;
-  ink.globalAlpha = 0.75;
-  ink.stroke(area);
+  if (edge) {
+    ink.strokeStyle = edge;
+    ink.lineWidth = px;
+    ink.globalAlpha = 0.75;
+    ink.stroke(area);
+  }
   ink.restore();
 }
 

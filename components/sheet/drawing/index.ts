@@ -1,8 +1,10 @@
+export { DifferenceLayer } from './difference-layer';
 export { FloorPlanLayer, pictureWidthFor } from './floor-plan-layer';
 export { GridLayer } from './grid-layer';
 export { GroundLayer, OverlayLayer } from './ground-layer';
 export { ItemsLayer, type ItemsLayerProps } from './items-layer';
 export { MapLayer, type MapLayerProps } from './map-layer';
+export { MovedMarks } from './moved-marks';
 export { RemarkPins, type PinnedRemark } from './remark-pins';
 export { SelectionHandles } from './selection-handles';
 export { SheetStage, type SheetStageProps } from './sheet-stage';

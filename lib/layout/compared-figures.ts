@@ -1,0 +1,106 @@
+import { polygonAreaMm2 } from './geometry';
+import type { Item } from './items';
+import type { MapMeasure } from './map-settings';
+import { MEASURE_WORDS } from './measure-words';
+import type { FloorFigures, VerdictFigures } from './verdict-figures';
+
+/** One line of the table of numbers. Null where a sheet has no such number. */
+export interface ComparedFigure {
+  readonly label: string;
+  readonly unit: string;
+  readonly decimals: number;
+  readonly left: number | null;
+  readonly right: number | null;
+  /** Written after the number, such as the 9 of `8 of 9`. */
+  readonly leftOf?: number;
+  readonly rightOf?: number;
+  readonly better: 'more' | 'less' | 'neither';
+}
+
+export interface SheetFigures {
+  readonly verdicts: VerdictFigures;
+  /** Null until the sheet's maps are there. */
+  readonly floor: FloorFigures | null;
+  readonly guardedM2: number;
+}
+
+/** Floor inside closed guard lines, m². */
+export function guardedAreaM2(items: readonly Item[]): number {
+  return items.reduce(
+    (sum, item) => (item.kind === 'guardLine' && item.closed ? sum + polygonAreaMm2(item.pointsMm) / 1e6 : sum),
+    0,
+  );
+}
+
+/** The numbers of two sheets side by side, the work first, then the floor. */
+export function comparedFigures(
+  left: SheetFigures,
+  right: SheetFigures,
+  measure: MapMeasure,
+  threshold: number | null,
+): ComparedFigure[] {
+  const metres = (mm: number | null) => (mm === null ? null : mm / 1000);
+  const floor = (label: string, pick: (figures: FloorFigures) => number | null, better: ComparedFigure['better']) => ({
+    label,
+    unit: 'm²',
+    decimals: 1,
+    left: left.floor && pick(left.floor),
+    right: right.floor && pick(right.floor),
+    better,
+  });
+  return [
+    {
+      label: 'Task points met',
+      unit: '',
+      decimals: 0,
+      left: left.verdicts.met,
+      right: right.verdicts.met,
+      leftOf: left.verdicts.points,
+      rightOf: right.verdicts.points,
+      better: 'more',
+    },
+    {
+      label: 'Worst task point, inverse condition number',
+      unit: '',
+      decimals: 2,
+      left: left.verdicts.worstInverseConditionNumber,
+      right: right.verdicts.worstInverseConditionNumber,
+      better: 'more',
+    },
+    {
+      label: 'Slowest wanted move, margin',
+      unit: 'm/s',
+      decimals: 2,
+      left: metres(left.verdicts.slowestMarginMmS),
+      right: metres(right.verdicts.slowestMarginMmS),
+      better: 'more',
+    },
+    ...(threshold === null || measure === 'reach'
+      ? []
+      : [
+          floor(
+            `Floor at or above ${threshold.toFixed(MEASURE_WORDS[measure].decimals)}`,
+            ({ atOrAboveM2 }) => atOrAboveM2,
+            'more',
+          ),
+        ]),
+    floor('Floor reached', ({ reachedM2 }) => reachedM2, 'more'),
+    floor('Floor that two robots share', ({ sharedM2 }) => sharedM2, 'neither'),
+    {
+      label: 'Guarded floor',
+      unit: 'm²',
+      decimals: 1,
+      left: left.guardedM2,
+      right: right.guardedM2,
+      better: 'neither',
+    },
+  ];
+}
+
+/** Whether right is better than left, as far as it would be written: what rounds to no change is none. */
+export function verdictOf({ left, right, better, decimals }: ComparedFigure): 'better' | 'worse' | 'none' {
+  if (left === null || right === null || better === 'neither') return 'none';
+  const change = Number((right - left).toFixed(decimals));
+  if (change === 0) return 'none';
+  return change > 0 === (better === 'more') ? 'better' : 'worse';
+}
