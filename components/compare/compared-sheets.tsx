@@ -11,7 +11,7 @@ import { Panel } from '@/components/ui/panel';
 import { SegmentedControl } from '@/components/ui/segmented-control';
 import { type SheetRef } from '@/lib/client/sheet-ref';
 import { type AskedDocument } from '@/lib/client/use-sheet-document';
-import { type MapSettings } from '@/lib/layout/map-settings';
+import { mapSettingsSchema, type MapSettings } from '@/lib/layout/map-settings';
 import { directionWords, wristWords } from '@/lib/layout/measure-words';
 import type { MapScale } from '@/lib/layout/scales';
 import { ChangedPanel } from './changed-panel';
