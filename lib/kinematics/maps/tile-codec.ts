@@ -1,4 +1,4 @@
-import type { MapTile } from '../types';
+import { REASONS, type MapTile } from '../types';
 
 /**
  * A tile as bytes, little-endian: format byte, three reserved bytes, rowFrom, rowTo and columns as 32-bit whole numbers; then a byte a
@@ -43,6 +43,9 @@ export function decodeMapTile(bytes: Uint8Array): MapTile {
   const cells = (rowTo - rowFrom) * columns;
   if (rowTo < rowFrom || sizeOf(cells) !== bytes.length) throw new RangeError('A map tile has the wrong length.');
   const plane = (index: number) => bytes.slice(HEADER + index * cells, HEADER + (index + 1) * cells);
+  const reason = plane(0);
+  if (reason.some((code) => code >= REASONS.length))
+    throw new RangeError('A map tile holds a reason that is not known.');
   const floats = HEADER + padded(BYTE_PLANES.length * cells);
   const floatPlane = (index: number) => {
     const start = floats + 4 * cells * index;
@@ -52,7 +55,7 @@ export function decodeMapTile(bytes: Uint8Array): MapTile {
     rowFrom,
     rowTo,
     columns,
-    reason: plane(0),
+    reason,
     bindingJoint: plane(1),
     branch: plane(2),
     inverseConditionNumber: floatPlane(0),
