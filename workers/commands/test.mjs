@@ -1,117 +1,140 @@
 import { mkdirSync, rmSync } from 'node:fs';
 import path from 'node:path';
 import { buildWeb } from './setup/build.mjs';
+import { claim } from './setup/claim.mjs';
 import { Installation } from './setup/installation.mjs';
+import { installDebianPackages, installNodePackages, installTestPackages } from './setup/packages.mjs';
 import { makeProfile } from './setup/profile.mjs';
-import { SetupError } from './setup/shell.mjs';
+import { Halted, SetupError } from './setup/shell.mjs';
 import { countsOf, stage } from './setup/stages.mjs';
+import { readPlan } from './setup/test-plan.mjs';
 
 /**
  * `npm test`: the same set-up as `npm run up` in a database and ports of its own, then every check.
- * `npm test -- unit|components|integration|browser [files]` runs one kind; `--keep` leaves the services up until Ctrl-C.
+ * `npm test -- lint|types|unit|components|integration|browser [files]` runs some; `--keep` leaves the services up until Ctrl-C.
  */
 
-const KINDS = ['lint', 'types', 'unit', 'components', 'integration', 'browser'];
-const words = process.argv.slice(2);
-const keep = words.includes('--keep');
-const kinds = words.filter((word) => KINDS.includes(word));
-const files = words.filter((word) => !KINDS.includes(word) && word !== '--keep');
-const wants = (kind) => kinds.length === 0 || kinds.includes(kind);
-
+const plan = readPlan(process.argv.slice(2));
 const profile = makeProfile('test');
-const installation = new Installation(profile, (text) => console.log(`· ${text}`));
-const reports = path.join(profile.data, 'reports');
-rmSync(reports, { recursive: true, force: true });
-mkdirSync(reports, { recursive: true });
 const began = Date.now();
 const total = { passed: 0, failed: 0 };
 
-for (const signal of ['SIGINT', 'SIGTERM'])
+const other = await claim(profile);
+if (other) {
+  console.error(
+    `Tests run in this checkout already (process ${other.pid ?? 'unknown'}), and two at once would empty each other's database. Wait for them, or stop them.`,
+  );
+  process.exit(1);
+}
+
+const installation = new Installation(profile, (words) => console.log(`· ${words}`));
+const reports = path.join(profile.data, 'reports');
+rmSync(reports, { recursive: true, force: true });
+mkdirSync(reports, { recursive: true });
+
+for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'])
   process.on(signal, async () => {
     await installation.stop();
     process.exit(130);
   });
 
-/** A check without tests of its own counts as failed where it fails. */
-async function check(name, args, env) {
-  if (!(await stage(name, args, env))) total.failed += 1;
+installation.onDeath = (name, how, words) => {
+  total.failed += 1;
+  console.log(`\n── ${name} stopped by itself (${how}). Its last words:\n${words}`);
+};
+
+const bin = {
+  eslint: 'node_modules/eslint/bin/eslint.js',
+  next: 'node_modules/next/dist/bin/next',
+  playwright: 'node_modules/@playwright/test/cli.js',
+  prettier: 'node_modules/prettier/bin/prettier.cjs',
+  tsc: 'node_modules/typescript/bin/tsc',
+  vitest: 'node_modules/vitest/vitest.mjs',
+};
+
+/** A check without tests of its own counts where it fails. */
+async function check(name, args) {
+  if (!(await stage(name, args, installation.environment()))) total.failed += 1;
 }
 
-async function vitest(project, env) {
-  const report = path.join(reports, `${project}.json`);
-  const args = [
-    'node_modules/vitest/vitest.mjs',
-    'run',
-    '--project',
-    project,
-    '--reporter=default',
-    '--reporter=json',
-    `--outputFile.json=${report}`,
-    ...files,
-  ];
-  const passed = await stage(`${project} tests`, args, { ...env, NODE_ENV: 'test' });
-  add(countsOf(report, 'vitest'), passed);
-}
-
-function add(counts, passed) {
+async function test(kind, runner, args, env) {
+  const report = path.join(reports, `${kind}.json`);
+  const passed = await stage(`${kind} tests`, args(report), { ...installation.environment('test'), ...env(report) });
+  const counts = countsOf(report, runner);
   total.passed += counts.passed;
   // A runner that fails without a failed test has failed all the same.
   total.failed += counts.failed || (passed ? 0 : 1);
 }
 
-async function browser() {
-  await installation.emptyDatabase();
-  installation.seed();
-  installation.startWorker();
-  await installation.startWeb();
-  const report = path.join(reports, 'browser.json');
-  const env = { ...installation.environment('test'), PLAYWRIGHT_JSON_OUTPUT_NAME: report };
-  const passed = await stage('browser tests', ['node_modules/@playwright/test/cli.js', 'test', ...files], env);
-  add(countsOf(report, 'playwright'), passed);
+async function readSources() {
+  if (plan.wants('lint')) {
+    await check('prettier', [bin.prettier, '--check', '--log-level=warn', '.']);
+    await check('eslint', [bin.eslint, '--max-warnings=0', '.']);
+  }
+  if (plan.wants('types')) {
+    await check('route types', [bin.next, 'typegen']);
+    await check('types', [bin.tsc, '--noEmit']);
+  }
 }
 
-const nextBin = 'node_modules/next/dist/bin/next';
+async function build() {
+  try {
+    await buildWeb(profile, installation.environment(), installation.say);
+    return true;
+  } catch (error) {
+    if (!(error instanceof SetupError)) throw error;
+    total.failed += 1;
+    console.log(`\n── build: FAILED\n${error.message}`);
+    return false;
+  }
+}
+
+async function runVitest() {
+  for (const project of ['unit', 'components', 'integration']) {
+    if (!plan.wants(project)) continue;
+    const args = (report) =>
+      [bin.vitest, 'run', '--project', project, '--reporter=default', '--reporter=json'].concat(
+        `--outputFile.json=${report}`,
+        plan.files,
+      );
+    await test(project, 'vitest', args, () => ({}));
+  }
+}
+
+async function runBrowser() {
+  await installation.migrate({ anew: true });
+  await installation.seed();
+  installation.startWorker();
+  await installation.startWeb();
+  const args = () => [bin.playwright, 'test', ...plan.files];
+  await test('browser', 'playwright', args, (report) => ({ PLAYWRIGHT_JSON_OUTPUT_FILE: report }));
+}
 
 try {
-  await installation.prepare({ reset: true });
-  const env = installation.environment();
-  // Two cores: the checks that read the sources run beside the tests that mostly wait.
-  await Promise.all([
-    (async () => {
-      if (wants('lint')) {
-        await check('prettier', ['node_modules/prettier/bin/prettier.cjs', '--check', '--log-level=warn', '.'], env);
-        await check('eslint', ['node_modules/eslint/bin/eslint.js', '--max-warnings=0', '.'], env);
-      }
-      if (wants('types')) {
-        await check('route types', [nextBin, 'typegen'], env);
-        await check('types', ['node_modules/typescript/bin/tsc', '--noEmit'], env);
-      }
-      if (wants('browser')) {
-        try {
-          buildWeb(profile, env, (text) => console.log(`· ${text}`));
-        } catch (error) {
-          total.failed += 1;
-          console.log(`\n── build: FAILED\n${error.message}`);
-        }
-      }
-    })(),
-    (async () => {
-      for (const project of ['unit', 'components', 'integration']) if (wants(project)) await vitest(project, env);
-    })(),
-  ]);
-  if (wants('browser')) await browser();
-  if (keep) {
-    console.log('\nServices stay up for --keep; Ctrl-C stops them.');
+  await installNodePackages(installation.say);
+  await installDebianPackages(installation.say, { database: plan.wantsServices, browser: plan.wants('browser') });
+  if (plan.wantsTests) await installTestPackages(installation.say);
+  await installation.prepare();
+  if (plan.wantsServices) await installation.startServices({ anew: true });
+  // Two cores: what reads the sources runs beside the tests that mostly wait.
+  const [built] = await Promise.all([readSources().then(() => plan.wants('browser') && build()), runVitest()]);
+  if (built) await runBrowser();
+  if (plan.wantsTests && total.passed + total.failed === 0) {
+    total.failed = 1;
+    console.log('\nNo test was found.');
+  }
+  console.log(`\n${((Date.now() - began) / 1000).toFixed(0)} s in all`);
+  console.log(`${total.passed} passed, ${total.failed} failed`);
+  if (plan.keep) {
+    console.log('\nThe services stay up; Ctrl-C stops them.');
     await new Promise(() => setInterval(() => {}, 60_000));
   }
 } catch (error) {
-  total.failed += 1;
+  // A signal has stopped the stage, and its handler ends the rest.
+  if (error instanceof Halted) await new Promise(() => {});
   console.error(error instanceof SetupError ? `\n${error.message}` : error);
-} finally {
-  await installation.stop();
+  console.log(`${total.passed} passed, ${total.failed + 1} failed`);
+  total.failed += 1;
 }
-
-if (total.passed === 0) total.failed = Math.max(1, total.failed);
-console.log(`\n${((Date.now() - began) / 1000).toFixed(0)} s in all`);
-console.log(`${total.passed} passed, ${total.failed} failed`);
+await installation.stop();
 process.exit(total.failed === 0 ? 0 : 1);

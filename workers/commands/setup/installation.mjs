@@ -1,166 +1,144 @@
-import { existsSync, readFileSync, readlinkSync, rmSync, writeFileSync } from 'node:fs';
+import { mkdirSync, rmSync } from 'node:fs';
 import path from 'node:path';
+import { clearState, identityOf, readState, stillRuns, writeState } from './claim.mjs';
 import { environmentOf, readSecrets, writeEnvFile } from './environment.mjs';
-import { installDebianPackages, installNodePackages } from './packages.mjs';
 import { choosePorts, portAnswers } from './ports.mjs';
-import { initialiseCluster, resetDatabase, startCluster, stopCluster } from './postgres.mjs';
-import { root } from './profile.mjs';
-import { lastLinesOf, run, sleep, start, stopGroup, until } from './shell.mjs';
+import { createDatabase, initialiseCluster, serverCommand, serverIsReady, stopLeftServer } from './postgres.mjs';
+import { haltSteps, lastLinesOf, run, signalGroup, sleep, start, stopGroup, until } from './shell.mjs';
+
+const script = (file) => ['--import', 'tsx', file];
 
 /**
- * One profile's services: started in order, watched, and stopped in the reverse order, PostgreSQL last. Only what was started here is
- * ever stopped.
+ * One profile's services: started in order, watched, and stopped in the reverse order, PostgreSQL last. Only what was started
+ * here is ever stopped. The profile must have been claimed before.
  */
 export class Installation {
   constructor(profile, say) {
     this.profile = profile;
-    this.say = say;
+    this.say = (words) => {
+      this.note({ step: words });
+      say(words);
+    };
     this.children = new Map();
     this.stopping = false;
+    // What an earlier start has left behind stays noted until it is gone.
+    this.state = { children: readState(profile)?.children ?? {} };
+    this.note({ step: 'Starting' });
   }
 
-  /** Everything up to a migrated database, an object store and a mail server. */
-  async prepare({ reset = false } = {}) {
-    const { profile, say } = this;
-    installNodePackages(say);
-    installDebianPackages(say, { forTests: profile.isTest });
-    await this.clearLeftovers();
+  /** Secrets, ports and the environment made of them. Starts nothing. */
+  async prepare() {
+    const { profile } = this;
+    mkdirSync(profile.kept, { recursive: true, mode: profile.asRoot ? 0o711 : 0o700 });
     this.secrets = readSecrets(profile);
-    this.ports = await choosePorts(profile, () => false);
-    this.env = environmentOf(profile, this.ports, this.secrets);
-    writeEnvFile(profile, this.env);
-    initialiseCluster(profile, this.secrets.database, say);
-    say('Starting PostgreSQL, the object store and the mail server');
-    await startCluster(profile, this.ports.db, this.secrets.database);
-    this.clusterStarted = true;
-    if (reset) rmSync(path.join(profile.data, 's3'), { recursive: true, force: true });
-    const { s3, smtp, mailbox } = this.ports;
-    this.startChild('object-store', [
+    await this.clearLeftovers();
+    this.ports = await choosePorts(profile);
+    this.values = environmentOf(profile, this.ports, this.secrets);
+    writeEnvFile(profile, this.values);
+  }
+
+  /** PostgreSQL, the object store and the mail server, and a migrated database in the first. `anew`: all of them empty. */
+  async startServices({ anew = false } = {}) {
+    const { profile, ports, secrets } = this;
+    await initialiseCluster(profile, secrets.database, this.say);
+    this.say('Starting PostgreSQL, the object store and the mail server');
+    if (anew) rmSync(profile.objects, { recursive: true, force: true });
+    this.startChild('postgresql', serverCommand(profile, ports.db));
+    this.startNode('object-store', [
       'docker-less-s3-fake/server.mjs',
-      String(s3),
-      path.join(profile.data, 's3'),
-      this.env.S3_BUCKET,
+      ports.s3,
+      profile.objects,
+      this.values.S3_BUCKET,
     ]);
-    this.startChild('mail-server', [
-      'workers/stand-ins/smtp.mjs',
-      String(smtp),
-      String(mailbox),
-      path.join(profile.data, 'mails'),
-    ]);
-    await this.answering('object-store', s3);
-    await this.answering('mail-server', mailbox);
-    if (reset) resetDatabase(profile, this.ports.db, this.secrets.database);
-    this.migrate();
+    const mails = path.join(profile.data, 'mails');
+    this.startNode('mail-server', ['workers/stand-ins/smtp.mjs', ports.smtp, ports.mailbox, mails]);
+    await this.answering('postgresql', () => serverIsReady(profile, ports.db));
+    await this.answering('object-store', () => portAnswers(ports.s3));
+    await this.answering('mail-server', () => portAnswers(ports.mailbox));
+    await this.migrate({ anew });
   }
 
-  migrate() {
-    run(process.execPath, ['--import', 'tsx', 'workers/commands/migrate.ts'], { env: this.environment() });
+  async migrate({ anew = false } = {}) {
+    await createDatabase(this.profile, this.ports.db, this.secrets.database, { anew });
+    await run(process.execPath, script('workers/commands/migrate.ts'), { env: this.environment() });
   }
 
-  async emptyDatabase() {
-    resetDatabase(this.profile, this.ports.db, this.secrets.database);
-    this.migrate();
+  async seed() {
+    await run(process.execPath, script('workers/commands/seed.ts'), { env: this.environment() });
   }
 
-  seed() {
-    run(process.execPath, ['--import', 'tsx', 'workers/commands/seed.ts'], { env: this.environment() });
+  async startWeb(mode = 'production') {
+    const { web } = this.ports;
+    const next = ['node_modules/next/dist/bin/next', mode === 'production' ? 'start' : 'dev'];
+    this.startNode('web', [...next, '-p', web, '-H', '127.0.0.1'], mode);
+    await this.answering('web', () => portAnswers(web), 90);
+    this.note({ address: this.values.APP_URL, mailbox: this.values.MAILBOX_URL });
+  }
+
+  startWorker(mode = 'production') {
+    this.startNode('worker', script('workers/worker.ts'), mode);
   }
 
   /** The environment of everything that is started: this profile's values win over any .env file. */
   environment(mode = 'production') {
     return {
       ...process.env,
-      ...this.env,
+      ...this.values,
       NODE_ENV: mode,
       NEXT_TELEMETRY_DISABLED: '1',
       AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED: 'true',
     };
   }
 
-  startChild(name, args, env = this.environment()) {
-    const log = path.join(this.profile.logs, `${name}.log`);
-    const child = start(process.execPath, args, { env, log, append: false });
-    this.children.set(name, child);
-    this.saveState();
+  startNode(name, args, mode) {
+    this.startChild(name, { command: process.execPath, args: args.map(String), env: this.environment(mode) });
+  }
+
+  startChild(name, { command, args, stop, ...options }) {
+    if (this.stopping) return;
+    const log = this.logOf(name);
+    const child = start(command, args, { ...options, log });
+    this.children.set(name, { child, stop });
+    this.note({ children: { ...this.state.children, [name]: identityOf(child.pid) } });
+    child.once('error', (error) => this.onDeath?.(name, error.message, ''));
     child.once('exit', (code, signal) => {
-      if (!this.stopping && this.children.get(name) === child)
-        this.onDeath?.(name, code ?? signal, lastLinesOf(log, 12));
-    });
-    return child;
-  }
-
-  async answering(name, port, seconds = 60) {
-    const child = this.children.get(name);
-    await until(() => portAnswers(port), {
-      seconds,
-      failed: () => child.exitCode !== null,
-      words: () =>
-        `The ${name} does not answer on port ${port}.\n${lastLinesOf(path.join(this.profile.logs, `${name}.log`), 20)}`,
+      const ours = this.children.get(name)?.child === child;
+      if (ours && !this.stopping) this.onDeath?.(name, code ?? signal, lastLinesOf(log, 12));
     });
   }
 
-  async startWeb(mode = 'production') {
-    const next = [
-      'node_modules/next/dist/bin/next',
-      mode === 'production' ? 'start' : 'dev',
-      '-p',
-      String(this.ports.web),
-      '-H',
-      '127.0.0.1',
-    ];
-    this.startChild('web', next, this.environment(mode));
-    await this.answering('web', this.ports.web, 90);
+  logOf(name) {
+    return path.join(this.profile.logs, `${name}.log`);
   }
 
-  startWorker(mode = 'production') {
-    this.startChild('worker', ['--import', 'tsx', 'workers/worker.ts'], this.environment(mode));
+  async answering(name, check, seconds = 60) {
+    const words = () => `The ${name} does not answer.\n${lastLinesOf(this.logOf(name), 20)}`;
+    await until(check, { seconds, words, child: this.children.get(name).child });
   }
 
-  saveState() {
-    const pids = [...this.children.values()].map((child) => child.pid);
-    writeFileSync(this.profile.stateFile, JSON.stringify({ pid: process.pid, address: this.env.APP_URL, pids }));
-  }
-
-  /** What a start that was killed outright has left running: processes of this checkout that it had noted down. */
+  /** Ends what an earlier start has left running when it was killed itself. */
   async clearLeftovers() {
-    const state = readState(this.profile);
-    for (const pid of state?.pids ?? []) {
-      if (!belongsHere(pid)) continue;
-      try {
-        process.kill(-pid, 'SIGTERM');
-        await sleep(1500);
-        if (belongsHere(pid)) process.kill(-pid, 'SIGKILL');
-      } catch {
-        // Gone already.
-      }
-    }
-    stopCluster(this.profile);
+    const { postgresql: _stoppedByItsOwnProgram, ...others } = this.state.children;
+    const left = Object.values(others).filter(stillRuns);
+    for (const { pid } of left) signalGroup(pid, 'SIGTERM');
+    const end = Date.now() + 20_000;
+    while (left.some(stillRuns) && Date.now() < end) await sleep(100);
+    for (const { pid } of left.filter(stillRuns)) signalGroup(pid, 'SIGKILL');
+    await stopLeftServer(this.profile);
+    this.note({ children: {} });
   }
 
   async stop() {
     if (this.stopping) return;
     this.stopping = true;
-    const order = [...this.children.keys()].reverse();
-    for (const name of order) await stopGroup(this.children.get(name));
-    if (this.clusterStarted) stopCluster(this.profile);
-    rmSync(this.profile.stateFile, { force: true });
+    await haltSteps();
+    for (const { child, stop } of [...this.children.values()].reverse()) await stopGroup(child, stop);
+    clearState(this.profile);
   }
-}
 
-export function readState(profile) {
-  if (!existsSync(profile.stateFile)) return null;
-  try {
-    return JSON.parse(readFileSync(profile.stateFile, 'utf8'));
-  } catch {
-    return null;
-  }
-}
-
-/** True where the process still runs in this checkout: numbers of processes are given out again. */
-export function belongsHere(pid) {
-  try {
-    return readlinkSync(`/proc/${pid}/cwd`) === root;
-  } catch {
-    return false;
+  /** Tells others how far this start has come. */
+  note(news) {
+    this.state = { ...this.state, ...news };
+    writeState(this.profile, this.state);
   }
 }

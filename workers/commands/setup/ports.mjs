@@ -1,15 +1,21 @@
 import { existsSync, readFileSync, writeFileSync } from 'node:fs';
 import net from 'node:net';
+import { SetupError } from './shell.mjs';
 
 /** Services in the order of their ports, with the variable that sets each. */
 const SERVICES = { web: 'WEB', db: 'DB', s3: 'S3', smtp: 'SMTP', mailbox: 'MAILBOX' };
 
-/** True where nothing listens on the port and we could. */
-export function portIsFree(port) {
+/** True where nobody listens on the port: `localhost` may lead a browser to either of the two addresses. */
+export async function portIsFree(port) {
+  return (await canListen(port, '127.0.0.1')) && (await canListen(port, '::1'));
+}
+
+function canListen(port, host) {
   return new Promise((resolve) => {
     const probe = net.createServer();
-    probe.once('error', () => resolve(false));
-    probe.listen({ port, host: '127.0.0.1', exclusive: true }, () => probe.close(() => resolve(true)));
+    // A machine without IPv6 cannot have anybody there.
+    probe.once('error', ({ code }) => resolve(code !== 'EADDRINUSE' && code !== 'EACCES'));
+    probe.listen({ port, host, exclusive: true }, () => probe.close(() => resolve(true)));
   });
 }
 
@@ -27,33 +33,33 @@ export function portAnswers(port) {
 }
 
 /**
- * A port a service: the environment's where it names one (ELBOWROOM_WEB_PORT, …), else the one of last time, else the checkout's own;
- * moved on where somebody else holds it. `held(service)` tells that the one who listens there is our own.
+ * A port for every service: the environment's where it names one (ELBOWROOM_WEB_PORT, …), else the one of last time, else the
+ * checkout's own; moved on where somebody else listens on it.
  */
-export async function choosePorts(profile, held) {
+export async function choosePorts(profile) {
   const known = existsSync(profile.portsFile) ? JSON.parse(readFileSync(profile.portsFile, 'utf8')) : {};
   const ports = {};
-  let next = profile.firstPort;
+  let own = profile.firstPort;
   for (const [service, variable] of Object.entries(SERVICES)) {
     const name = `ELBOWROOM_${profile.isTest ? 'TEST_' : ''}${variable}_PORT`;
-    const wanted = process.env[name];
-    if (wanted !== undefined) {
-      if (!/^\d+$/.test(wanted) || Number(wanted) < 1 || Number(wanted) > 65535)
-        throw new Error(`${name}=${wanted} is no port: give a number from 1 to 65535.`);
-      ports[service] = Number(wanted);
-      if (!(await portIsFree(ports[service])) && !held(service))
-        throw new Error(`Port ${wanted} (${name}) is taken by another program. Set another one.`);
-      continue;
+    const taken = async (port) => Object.values(ports).includes(port) || !(await portIsFree(port));
+    let port = known[service] ?? own;
+    if (process.env[name]) {
+      port = readPort(name);
+      if (await taken(port))
+        throw new SetupError(`Port ${port} (${name}) is taken by another program. Set another one.`);
     }
-    let port = known[service] ?? next;
-    while (
-      Object.values(ports).includes(port) ||
-      (!(await portIsFree(port)) && !(held(service) && port === known[service]))
-    )
-      port = port >= 64000 ? 20000 : port + 17;
+    while (await taken(port)) port = port >= 64_000 ? 20_000 : port + 17;
     ports[service] = port;
-    next += 1;
+    own += 1;
   }
   writeFileSync(profile.portsFile, `${JSON.stringify(ports, null, 2)}\n`);
   return ports;
+}
+
+function readPort(name) {
+  const words = process.env[name];
+  const port = Number(words);
+  if (/^\d+$/.test(words) && port >= 1 && port <= 65_535) return port;
+  throw new SetupError(`${name}=${words} is no port: give a number from 1 to 65535.`);
 }

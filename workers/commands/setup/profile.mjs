@@ -18,20 +18,26 @@ export function makeProfile(name) {
   const logs = path.join(data, 'logs');
   mkdirSync(logs, { recursive: true });
   const asRoot = process.getuid?.() === 0;
+  // PostgreSQL refuses to run as root, and its own user cannot look into a checkout that only root may read. What belongs
+  // to the cluster goes with it, or a cleaned checkout would meet a database whose password and pictures it has lost.
+  const kept = asRoot ? `/var/lib/postgresql/elbowroom-${hash.slice(0, 10)}${isTest ? '-test' : ''}` : data;
   return {
     name,
     isTest,
+    asRoot,
+    /** Made anew at any time: logs, reports, mails, ports. */
     data,
     logs,
-    asRoot,
-    // PostgreSQL refuses to run as root, and its own user cannot look into a checkout that only root may read.
-    cluster: asRoot
-      ? `/var/lib/postgresql/elbowroom-${hash.slice(0, 10)}${isTest ? '-test' : ''}`
-      : path.join(data, 'pg'),
-    envFile: path.join(root, isTest ? '.env.test.local' : '.env.local'),
+    /** Kept for good and only whole: database, pictures, secrets. */
+    kept,
+    cluster: path.join(kept, 'pg'),
+    objects: path.join(kept, 's3'),
+    secretsFile: path.join(kept, 'secrets.json'),
     accountsFile: path.join(data, 'demo-accounts.json'),
     portsFile: path.join(data, 'ports.json'),
     stateFile: path.join(data, 'running.json'),
+    lockName: `elbowroom-${hash.slice(0, 16)}-${name}`,
+    envFile: path.join(root, isTest ? '.env.test.local' : '.env.local'),
     distDir: isTest ? '.next-test' : '.next',
     // 20000 … 29990, below the ports that systems hand out to clients.
     firstPort: 20000 + (parseInt(hash.slice(0, 8), 16) % 990) * 10 + (isTest ? 5 : 0),
