@@ -1,17 +1,17 @@
-import { mkdirSync, readdirSync, readFileSync, writeFileSync } from 'node:fs';
+import { mkdirSync } from 'node:fs';
 import http from 'node:http';
-import path from 'node:path';
 import { SMTPServer } from 'smtp-server';
-import { listPage, summaryOf } from './mail-page.mjs';
+import { keepMail, readMails, readSource } from './kept-mails.mjs';
+import { listPage } from './mail-page.mjs';
 
 /**
- * The local stand-in for the mail server: takes every mail, sends none, keeps each as an .eml file and shows them on a page.
- * Arguments: SMTP port, page port, folder. GET / is the page, GET /mails the list as JSON, GET /mails/NAME one mail as it came.
+ * The local stand-in for the mail server: takes every mail, sends none, keeps each and shows them on a page.
+ * Arguments: SMTP port, page port, folder. GET / is the page, GET /mails the list as JSON, newest first, GET /mails/NAME.eml one
+ * mail as it came.
  */
 const [smtpPort, pagePort, folder] = process.argv.slice(2);
 mkdirSync(folder, { recursive: true });
 
-let count = 0;
 const smtp = new SMTPServer({
   authOptional: true,
   disabledCommands: ['STARTTLS'],
@@ -20,29 +20,22 @@ const smtp = new SMTPServer({
     stream.on('data', (part) => parts.push(part));
     stream.on('error', done);
     stream.on('end', () => {
-      const stamp = new Date().toISOString().replace(/[:.]/g, '-');
-      const name = `${stamp}-${String(++count).padStart(4, '0')}.eml`;
-      writeFileSync(path.join(folder, name), Buffer.concat(parts));
-      console.log(`mail for ${session.envelope.rcptTo.map(({ address }) => address).join(', ')}: ${name}`);
-      done();
+      const recipients = session.envelope.rcptTo.map(({ address }) => address);
+      keepMail(folder, recipients, Buffer.concat(parts)).then(({ name }) => {
+        console.log(`mail for ${recipients.join(', ')}: ${name}`);
+        done();
+      }, done);
     });
   },
 });
 
-const names = () =>
-  readdirSync(folder)
-    .filter((name) => name.endsWith('.eml'))
-    .sort()
-    .reverse();
-const mails = () => names().map((name) => summaryOf(name, readFileSync(path.join(folder, name), 'utf8')));
-
 const page = http.createServer((request, response) => {
   const { pathname } = new URL(request.url, 'http://localhost');
   const send = (status, type, body) => response.writeHead(status, { 'content-type': type }).end(body);
-  if (pathname === '/') return send(200, 'text/html; charset=utf-8', listPage(mails()));
-  if (pathname === '/mails') return send(200, 'application/json', JSON.stringify(mails()));
-  const name = pathname.replace('/mails/', '');
-  if (names().includes(name)) return send(200, 'text/plain; charset=utf-8', readFileSync(path.join(folder, name)));
+  if (pathname === '/') return send(200, 'text/html; charset=utf-8', listPage(readMails(folder)));
+  if (pathname === '/mails') return send(200, 'application/json', JSON.stringify(readMails(folder)));
+  const source = readSource(folder, pathname.replace('/mails/', ''));
+  if (source) return send(200, 'text/plain; charset=utf-8', source);
   return send(404, 'text/plain', 'No such mail.');
 });
 
