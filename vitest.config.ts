@@ -1,8 +1,12 @@
+import nextEnv from '@next/env';
 import react from '@vitejs/plugin-react';
 import { fileURLToPath } from 'node:url';
 import { defineConfig } from 'vitest/config';
 
 const root = fileURLToPath(new URL('.', import.meta.url));
+
+// Under \`npm test\` all of it is set already; beside \`npm test -- --keep\` this finds the services that stay up.
+nextEnv.loadEnvConfig(root, false, { info: () => undefined, error: console.error });
 
 export default defineConfig({
   resolve: { alias: [{ find: /^@\//, replacement: root }] },
@@ -13,7 +17,7 @@ export default defineConfig({
         test: {
           name: 'unit',
           environment: 'node',
-          include: ['{app,lib,models,workers,tests}/**/*.test.ts', 'proxy.test.ts'],
+          include: ['{app,lib,models,workers,tests}/**/*.test.{ts,mjs}', 'proxy.test.ts'],
           exclude: ['tests/integration/**', 'tests/browser/**'],
           testTimeout: 60_000,
         },
