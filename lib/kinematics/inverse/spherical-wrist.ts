@@ -20,7 +20,7 @@ export const SHOULDER_LEFT = 1;
 export const ELBOW_DOWN = 2;
 export const WRIST_FLIPPED = 4;
 
-interface Geometry {
+export interface Geometry {
   /** Rows: the frame of axis 1 (x, y along axis 2, z along axis 1) in the base frame. */
   readonly frame: Triple[];
   readonly origin: Triple;
@@ -48,7 +48,7 @@ export function sphericalWristSolver(chain: Chain): ClosedForm | null {
   return found ? makeSolver(found) : null;
 }
 
-function recognise(chain: Chain): Geometry | null {
+export function recognise(chain: Chain): Geometry | null {
   if (chain.joints !== 6 || chain.coupling || chain.prismatic.some((flag) => flag === 1)) return null;
   const unbased: Chain = { ...chain, base: identityTransform() };
   const stance = forward(unbased, new Float64Array(6), makeStance(unbased));
