@@ -1,10 +1,12 @@
 import './load-env';
 import { availableParallelism } from 'node:os';
+import { setTimeout } from 'node:timers/promises';
 import PgBoss from 'pg-boss';
 import { sequelize } from '@/lib/server/database';
 import { env } from '@/lib/server/env';
 import { logger } from '@/lib/server/logger';
 import { QUEUE_SCHEMA } from '@/lib/server/queue';
+import { queueConnection } from './queue-connection';
 import { takeJobs } from './take-jobs';
 import { mapPool } from './threads/map-pool';
 
@@ -23,11 +25,10 @@ const log = logger.child({ process: 'worker', pid: process.pid });
 const threads = env.MAP_THREADS ?? Math.max(1, availableParallelism() - 1);
 
 const maps = mapPool(threads);
+const queue = queueConnection(env.DATABASE_URL, log);
 const boss = new PgBoss({
-  connectionString: env.DATABASE_URL,
+  db: queue,
   schema: QUEUE_SCHEMA,
-  application_name: 'elbowroom worker',
-  max: 4,
   migrate: false,
   schedule: false,
   maintenanceIntervalSeconds: MAINTENANCE_SECONDS,
@@ -38,12 +39,25 @@ boss.on('error', (error) => log.error({ err: error }, 'queue error'));
 // after its time has run out, which every handler bears; the worker itself has no reason to fall.
 process.on('unhandledRejection', (error) => log.error({ err: error }, 'unhandled rejection'));
 
+let jobInHand = (): boolean => false;
+
+/**
+ * pg-boss forgets a job that it was fetching at the moment of the stop: the job would stay with a worker that is gone until
+ * its time has run out. So the connection stays open until nothing is under way.
+ */
+async function settle(deadline: number): Promise<void> {
+  while ((jobInHand() || queue.busy()) && Date.now() < deadline) await setTimeout(20);
+}
+
 let stopping = false;
 async function stop(signal: string): Promise<void> {
   if (stopping) return;
   stopping = true;
   log.info({ signal }, 'worker stopping');
+  const deadline = Date.now() + STOP_TIMEOUT_MS;
   await boss.stop({ graceful: true, wait: true, timeout: STOP_TIMEOUT_MS });
+  await settle(deadline);
+  await queue.close();
   await maps.close();
   await sequelize.close();
   log.info('worker stopped');
@@ -53,7 +67,7 @@ for (const signal of ['SIGTERM', 'SIGINT'] as const) process.on(signal, () => vo
 
 try {
   await boss.start();
-  await takeJobs(boss, { maps, log }, threads);
+  jobInHand = await takeJobs(boss, { maps, log }, threads);
   log.info({ threads }, 'worker ready');
 } catch (error) {
   log.fatal({ err: error }, 'worker cannot start: is the database there, and has the migrate step been run?');

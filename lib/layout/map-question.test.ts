@@ -1,4 +1,6 @@
 import { describe, expect, it } from 'vitest';
+import { compileChain, forward, makeStance } from '@/lib/kinematics/chain';
+import { BUILT_IN_ARMS } from '@/lib/kinematics/library';
 import { multiplyTransforms } from '@/lib/kinematics/transforms';
 import type { Arm } from '@/lib/kinematics/types';
 import { robotSchema, type Robot } from './items';
@@ -114,6 +116,25 @@ describe('what the kernel is asked', () => {
       tool: { xyz: [0.03, 0.04, 0.2], rpy: [0, 0, 0] },
     };
     expect(reachRadius(scara)).toBeCloseTo(0.35 + 0.25 + 0.05, 12);
+  });
+
+  it('is never smaller than where any posture puts the tool point', () => {
+    // A generator of our own (Lehmer's minimal standard), so that a failure can be repeated.
+    let seed = 20251201;
+    const chance = (): number => (seed = (seed * 48271) % 2147483647) / 2147483647;
+    for (const { arm: bare } of BUILT_IN_ARMS) {
+      const arm = { ...bare, tool: { xyz: [0.05, -0.03, 0.2], rpy: [0.2, 0.4, 0] } as const };
+      const chain = compileChain(arm);
+      const stance = makeStance(chain);
+      let farthest = 0;
+      for (let count = 0; count < 5000; count += 1) {
+        const posture = arm.joints.map(({ min, max }) => min + (max - min) * chance());
+        const { tool } = forward(chain, posture, stance);
+        farthest = Math.max(farthest, Math.hypot(tool[3], tool[7]));
+      }
+      expect(farthest).toBeLessThanOrEqual(reachRadius(arm));
+      expect(farthest).toBeGreaterThan(0.85 * reachRadius(arm));
+    }
   });
 
   it('names the finest step that a limit allows', () => {

@@ -10,6 +10,8 @@ function connect(): Sequelize {
     logging: false,
     pool: { max: env.DATABASE_POOL_MAX, min: 0, idle: 10_000, acquire: 20_000 },
     define: { underscored: true },
+    // A process that stands still within a transaction would hold its rows, and everybody who waits for them, for ever.
+    dialectOptions: { idle_in_transaction_session_timeout: 60_000 },
   });
 }
 

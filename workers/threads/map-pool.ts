@@ -8,7 +8,7 @@ import type { MapComputer } from '@/lib/server/maps/computer';
  */
 export function mapPool(threads: number): MapComputer & { readonly close: () => Promise<void> } {
   const pool = new Piscina({
-    filename: fileURLToPath(new URL('./map-thread.ts', import.meta.url)),
+    filename: fileURLToPath(new URL('./map-thread.mjs', import.meta.url)),
     minThreads: 0,
     maxThreads: threads,
     idleTimeout: 60_000,

@@ -1,0 +1,7 @@
+import { register } from 'tsx/esm/api';
+
+// A thread does not take over the process's TypeScript loader, so it loads its own before anything else.
+register();
+const { computeTile, summarise } = await import('../../lib/server/maps/compute.ts');
+
+export { computeTile, summarise };

@@ -1,1 +1,0 @@
-export { computeTile, summarise } from '@/lib/server/maps/compute';
