@@ -1,19 +1,10 @@
 import { DataCell, DataRow, DataTable, HeadCell } from '@/components/ui/data-table';
-import { formatFigure } from '@/components/ui/figure';
 import { VisuallyHidden } from '@/components/ui/visually-hidden';
-import { JOINT_COLUMNS, shownPerStored, type JointColumn, type JointData } from './joint-columns';
-
-const KIND_WORDS: Record<JointData['type'], string> = { revolute: 'turns', prismatic: 'slides' };
-
-/** Whole numbers where they are whole: 450, but 12.5. */
-function shown(joint: JointData, column: JointColumn): string {
-  const value = Number((joint[column.field] * shownPerStored(column, joint.type)).toFixed(3));
-  const decimals = String(Math.abs(value)).split('.')[1]?.length ?? 0;
-  return formatFigure(value, { decimals });
-}
+import type { ArmDefinition } from '@/lib/contracts/arm';
+import { JOINT_COLUMNS, KIND_WORDS, shownText } from '@/lib/layout/arm-columns';
 
 /** The joints of an arm by Denavit-Hartenberg rows, with their limits. */
-export function JointsTable({ joints }: { joints: readonly JointData[] }) {
+export function JointsTable({ joints }: { joints: ArmDefinition['joints'] }) {
   return (
     <DataTable caption="Joints, from the base to the tool">
       <thead>
@@ -41,9 +32,9 @@ export function JointsTable({ joints }: { joints: readonly JointData[] }) {
               J{index + 1}
             </th>
             <DataCell className="h-8!">{KIND_WORDS[joint.type]}</DataCell>
-            {JOINT_COLUMNS.map((column) => (
-              <DataCell key={column.field} figures className="h-8!">
-                {shown(joint, column)}
+            {JOINT_COLUMNS.map(({ field, quantity }) => (
+              <DataCell key={field} figures className="h-8!">
+                {shownText(joint[field], quantity, joint.type)}
               </DataCell>
             ))}
           </DataRow>
