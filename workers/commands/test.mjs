@@ -3,6 +3,7 @@ import path from 'node:path';
 import { buildWeb } from './setup/build.mjs';
 import { claim } from './setup/claim.mjs';
 import { Installation } from './setup/installation.mjs';
+import { onStop } from './setup/on-stop.mjs';
 import { installDebianPackages, installNodePackages, installTestPackages } from './setup/packages.mjs';
 import { makeProfile } from './setup/profile.mjs';
 import { Halted, SetupError } from './setup/shell.mjs';
@@ -32,11 +33,11 @@ const reports = path.join(profile.data, 'reports');
 rmSync(reports, { recursive: true, force: true });
 mkdirSync(reports, { recursive: true });
 
-for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'])
-  process.on(signal, async () => {
-    await installation.stop();
-    process.exit(130);
-  });
+onStop(async () => {
+  if (installation.stopping) return;
+  await installation.stop();
+  process.exit(130);
+});
 
 installation.onDeath = (name, how, words) => {
   total.failed += 1;

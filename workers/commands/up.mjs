@@ -2,6 +2,7 @@ import { existsSync, readFileSync } from 'node:fs';
 import { buildWeb } from './setup/build.mjs';
 import { claim } from './setup/claim.mjs';
 import { Installation } from './setup/installation.mjs';
+import { onStop } from './setup/on-stop.mjs';
 import { installDebianPackages, installNodePackages } from './setup/packages.mjs';
 import { makeProfile } from './setup/profile.mjs';
 import { Halted, SetupError, sleep } from './setup/shell.mjs';
@@ -34,7 +35,7 @@ async function end(code) {
   await installation.stop();
   process.exit(code);
 }
-for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, () => void end(0));
+onStop(() => end(0));
 
 let falls = 0;
 let workerStarted = 0;
