@@ -1,15 +1,16 @@
 import { z } from 'zod';
+import type { Target } from '@/lib/kinematics/types';
 import { armSchema } from './arm';
 
 /** The one-shot `analyse` command and its programs' interface: SI units, see README. */
 
 const coordinate = z.number('Write a number.').min(-1e6).max(1e6);
-const triple = z.tuple([coordinate, coordinate, coordinate]);
+const triple = z.tuple([coordinate, coordinate, coordinate], 'Write three numbers: [x, y, z].');
 const direction = triple.refine(([x, y, z]) => Math.hypot(x, y, z) > 1e-9, 'A direction needs a length above zero.');
-const poseRow = z.tuple([coordinate, coordinate, coordinate, coordinate]);
+const poseRow = z.tuple([coordinate, coordinate, coordinate, coordinate], 'Write four numbers a row.');
 
 const poseSchema = z
-  .tuple([poseRow, poseRow, poseRow, poseRow])
+  .tuple([poseRow, poseRow, poseRow, poseRow], 'A pose has four rows of four numbers.')
   .refine(
     (rows) => isRigid(rows),
     'A pose is a rotation and a shift: three unit rows at right angles, last row 0 0 0 1.',
@@ -29,13 +30,20 @@ function isRigid(rows: number[][]): boolean {
   return determinant > 0 && last[0] === 0 && last[1] === 0 && last[2] === 0 && last[3] === 1;
 }
 
-export const targetSchema = z.union(
-  [
-    z.strictObject({ pose: poseSchema }),
-    z.strictObject({ position: triple, direction, roll: z.union([coordinate, z.literal('free')]) }),
-  ],
-  'A target is { "pose": 4 × 4 rows } or { "position", "direction", "roll" }.',
-);
+const roll = z.union([coordinate, z.literal('free')], 'A roll is a number (rad) or "free".');
+const wholePose = z.strictObject({ pose: poseSchema });
+const pointAndDirection = z.strictObject({ position: triple, direction, roll });
+
+/** One of the two by its members, so that a refusal names the field that is wrong rather than both shapes. */
+export const targetSchema = z
+  .looseObject({}, 'A target is { "pose": 4 × 4 rows } or { "position", "direction", "roll" }.')
+  .transform((value, context): Target => {
+    const checked = ('pose' in value ? wholePose : pointAndDirection).safeParse(value);
+    if (checked.success) return checked.data;
+    for (const { path, message } of checked.error.issues)
+      context.addIssue({ code: 'custom', path: [...path], message, input: value });
+    return z.NEVER;
+  });
 
 /** At most a million cells: finer grids are a job for the server. */
 const MAX_CELLS = 1_000_000;
@@ -56,7 +64,7 @@ export const mapRequestSchema = z
         z.object({ kind: z.literal('vector'), vector: direction }),
       ])
       .default({ kind: 'down' }),
-    roll: z.union([coordinate, z.literal('free')]).default('free'),
+    roll: roll.default('free'),
     wrist: z.enum(['held', 'free']).default('held'),
     branch: z.string().default('best'),
   })
