@@ -12,7 +12,7 @@ export function CalibrationResult({ result }: { result: Calibration | null }) {
   return (
     <section aria-label="Result" aria-live="polite" className="border-b border-rule px-3.5 py-3">
       <h2 className="pb-1 font-semibold">Result</h2>
-      <dl className="grid grid-cols-[minmax(0,1fr)_auto] gap-x-4 gap-y-1">
+      <dl className="grid grid-cols-[minmax(0,1fr)_auto] gap-x-4 gap-y-1 [&>dd]:text-right">
         <dt>Scale</dt>
         <dd data-testid="scale">
           <Figure value={result?.mmPerPx} decimals={4} unit="mm/px" />

@@ -26,9 +26,14 @@ interface Drag {
   /** From the press to the point: the point does not jump under the finger. */
   offset: ScreenPoint;
   start: PicturePoint;
+  /** False while the press may still turn out to be a click that places another point on the same spot. */
+  holds: boolean;
 }
 
 const TAP_SLACK_PX = 5;
+
+const isTap = (from: ScreenPoint | null, to: ScreenPoint): boolean =>
+  from !== null && Math.hypot(to.x - from.x, to.y - from.y) <= TAP_SLACK_PX;
 
 /** Placing the selected point by a click and dragging points that are there. */
 export function usePointing({ container, viewport, calibration, gesture }: PointingOptions) {
@@ -44,7 +49,7 @@ export function usePointing({ container, viewport, calibration, gesture }: Point
 
   return {
     aim,
-    isDragging: drag !== null,
+    isDragging: drag?.holds ?? false,
     handlers: {
       onPointerDown(event: PointerEvent<HTMLDivElement>) {
         if (event.button !== 0) return;
@@ -55,13 +60,16 @@ export function usePointing({ container, viewport, calibration, gesture }: Point
         const start = handle && pointOf(draft, handle);
         if (!handle || !start) return;
         const there = pictureToScreen(viewport, start);
-        deeds.select(handle);
-        setDrag({ handle, offset: { x: there.x - at.x, y: there.y - at.y }, start });
-        setAim({ screen: at, point: start, handle });
+        if (!isPicking) {
+          deeds.select(handle);
+          setAim({ screen: at, point: start, handle });
+        }
+        setDrag({ handle, offset: { x: there.x - at.x, y: there.y - at.y }, start, holds: !isPicking });
       },
       onPointerMove(event: PointerEvent<HTMLDivElement>) {
         const at = placeOf(event);
-        if (drag) {
+        if (drag && (drag.holds || !isTap(pressedAt.current, at))) {
+          if (!drag.holds) setDrag({ ...drag, holds: true });
           const point = screenToPicture(viewport, { x: at.x + drag.offset.x, y: at.y + drag.offset.y });
           deeds.move(drag.handle, point);
           setAim({ screen: at, point, handle: drag.handle });
@@ -76,15 +84,13 @@ export function usePointing({ container, viewport, calibration, gesture }: Point
       const at = placeOf(event);
       const from = pressedAt.current;
       pressedAt.current = null;
-      if (drag) {
-        setDrag(null);
-      } else if (isPicking && from && event.button === 0 && Math.hypot(at.x - from.x, at.y - from.y) <= TAP_SLACK_PX) {
+      setDrag(null);
+      if (!drag?.holds && isPicking && event.button === 0 && isTap(from, at))
         deeds.place(screenToPicture(viewport, at));
-      }
       if (event.pointerType === 'touch') setAim(null);
     },
     onPointerCancel() {
-      if (drag) deeds.move(drag.handle, drag.start);
+      if (drag?.holds) deeds.move(drag.handle, drag.start);
       pressedAt.current = null;
       setDrag(null);
       setAim(null);
