@@ -11,14 +11,20 @@ const MAX_JOINTS = 12;
 const MAX_LENGTH_M = 100;
 const MAX_ANGLE_RAD = 100 * Math.PI;
 
-const length = z.number('Write a number (m).').min(-MAX_LENGTH_M).max(MAX_LENGTH_M);
-const angle = z.number('Write a number (rad).').min(-MAX_ANGLE_RAD).max(MAX_ANGLE_RAD);
-const limit = z.number('Write a number.').min(-1000).max(1000);
-const speed = z.number('Write a speed.').positive('A joint needs a speed above zero.').max(1000);
+/** At least and at most, with the same words for both. */
+const within = (most: number, missing: string, words: string) => z.number(missing).min(-most, words).max(most, words);
+
+const length = within(MAX_LENGTH_M, 'Write a number (m).', `Lengths go up to ${MAX_LENGTH_M} m.`);
+const angle = within(MAX_ANGLE_RAD, 'Write a number (rad).', 'Angles go up to 50 full turns.');
+const limit = within(1000, 'Write a number.', 'Limits go up to 1000 rad or 1000 m.');
+const speed = z
+  .number('Write a speed.')
+  .positive('A joint needs a speed above zero.')
+  .max(1000, 'Speeds go up to 1000 rad/s or 1000 m/s.');
 const acceleration = z
   .number('Write an acceleration.')
   .positive('A joint needs an acceleration above zero.')
-  .max(100_000);
+  .max(100_000, 'Accelerations go up to 100 000 rad/s² or m/s².');
 
 const vec3 = z.tuple([length, length, length]);
 const frameSchema = z.object({ xyz: vec3, rpy: z.tuple([angle, angle, angle]) });
@@ -58,7 +64,7 @@ export const armSchema = z
       .min(1, 'Name at least one freedom, or leave the field out.')
       .max(6)
       .optional(),
-    coupling: z.array(z.array(z.number().min(-1000).max(1000))).optional(),
+    coupling: z.array(z.array(within(1000, 'Write a number.', 'Shares go up to 1000.'))).optional(),
     actuators: z.array(actuatorSchema).min(1).max(MAX_JOINTS).optional(),
   })
   .superRefine((arm, context) => {
