@@ -39,6 +39,8 @@ export const C5 = 15;
 export const TOOL = 0;
 export const OFFSET = 3;
 export const LAST_AXIS = 6;
+/** Cosine and sine of joint 6 in the plain flip, after `fillSixth`. */
+export const SIXTH = 9;
 
 /** What `solve` answers in place of a number of pairs. */
 export const DOUBTFUL = -1;
@@ -66,10 +68,15 @@ export interface BranchPairs {
   readonly codes: Uint8Array;
   readonly inside: Uint8Array;
   readonly shared: Float64Array;
+  /** Cosine and sine of the angle at which each joint stands mid-range, counted as in `pairs` (joint 3: by the elbow, times `turn3`). */
+  readonly windows: Float64Array;
+  readonly turn3: number;
   /** Takes the rotation of a tool pose; call it before `solve` whenever the rotation changed. */
   orient(tool: Transform): void;
   /** Number of pairs for the position of a tool pose, or DOUBTFUL, TOO_FAR, TOO_NEAR. */
   solve(tool: Transform): number;
+  /** Joint 6 of a pair's plain flip, into `shared`. */
+  fillSixth(pair: number): void;
 }
 
 /** Squared sine of the elbow, share of reach², under which the elbow counts as doubtful: stretched or folded. */
@@ -77,7 +84,7 @@ const ELBOW_EDGE = 1e-11;
 const ELBOW_CLAMP = 1e-13;
 /** m: wrist centre this near to axis 1 is doubtful. Sine: wrist this near to aligned is. */
 const AXIS_EDGE = 1e-6;
-const WRIST_EDGE = 1e-7;
+const WRIST_EDGE = 1e-5;
 /** Difference of cosines within which a limit is left to the reference. */
 const LIMIT_EDGE = 1e-7;
 
@@ -102,7 +109,7 @@ export function makeBranchPairs(chain: Chain, lastIsFree: boolean): BranchPairs 
   const pairs = new Float64Array(4 * PAIR);
   const codes = new Uint8Array(4);
   const inside = new Uint8Array(4);
-  const shared = new Float64Array(9);
+  const shared = new Float64Array(11);
   const rotated = new Float64Array(9);
 
   const { toAxis, toWrist, wristInTool } = constants(chain, g);
@@ -120,6 +127,7 @@ export function makeBranchPairs(chain: Chain, lastIsFree: boolean): BranchPairs 
   const four = windowOf(chain, 3, 0);
   const five = windowOf(chain, 4, g.wristZero);
   const six = windowOf(chain, 5, 0);
+  const windows = Float64Array.from([one, two, three, four, five, six].flatMap(({ c, s }) => [c, s]));
   const six360 = lastIsFree || six.edge === -2;
 
   function orient(tool: Transform) {
@@ -259,7 +267,27 @@ export function makeBranchPairs(chain: Chain, lastIsFree: boolean): BranchPairs 
     return count > 0 ? count : shortfall;
   }
 
-  return { lengths: g, pairs, codes, inside, shared, orient, solve };
+  function fillSixth(pair: number) {
+    const at = pair * PAIR;
+    const c1 = pairs[at + C1];
+    const s1 = pairs[at + S1];
+    const cl = pairs[at + C_LEAN];
+    const sl = pairs[at + S_LEAN];
+    const c4 = pairs[at + C4];
+    const s4 = pairs[at + S4];
+    for (let column = 0; column < 2; column++) {
+      const x = c1 * rotated[column] + s1 * rotated[3 + column];
+      const y = c1 * rotated[3 + column] - s1 * rotated[column];
+      const lx = cl * x - sl * rotated[6 + column];
+      const lz = sl * x + cl * rotated[6 + column];
+      const w3 = w[1] * lx + w[4] * y + w[7] * lz;
+      const w0 = w[0] * lx + w[3] * y + w[6] * lz;
+      // Column 0 gives the sine, column 1 the cosine.
+      shared[SIXTH + 1 - column] = c4 * w3 - s4 * w0;
+    }
+  }
+
+  return { lengths: g, pairs, codes, inside, shared, windows, turn3: g.turn3, orient, solve, fillSixth };
 }
 
 const near = (value: number): boolean => value < LIMIT_EDGE && value > -LIMIT_EDGE;

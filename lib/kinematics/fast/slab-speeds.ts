@@ -1,9 +1,10 @@
 import { subsets } from '../measures/small-matrix';
 import { MAXIMUM, SURE } from './zonotope-speeds';
 
-/** As in measures/velocity-set: slack of the test whether a crossing of bounds is a corner, and pivots that count as none. */
+/** Slack of the test whether a crossing of bounds is a corner, as in measures/velocity-set. */
 const CORNER_SLACK = 1e-9;
-const SINGULAR = 1e-12;
+/** Squared determinant of three unit vectors below which their planes count as meeting nowhere. */
+const SINGULAR_SQUARE = 1e-24;
 
 /**
  * Farthest corner and nearest facet of {v : |a_i · v| ≤ 1} for six vectors in space. A corner lies where three bounds cross; whether the other
@@ -14,11 +15,13 @@ export function makeSlabSpeeds(vectors: Float64Array, out: Float64Array): () => 
   const lookup = determinantTable(triples);
   /** The determinants, then their negatives. */
   const det = new Float64Array(40);
+  const squares = new Float64Array(6);
 
   return () => {
     let longest = 0;
     for (let i = 0; i < 18; i += 3) {
       const square = vectors[i] * vectors[i] + vectors[i + 1] * vectors[i + 1] + vectors[i + 2] * vectors[i + 2];
+      squares[i / 3] = square;
       if (square > longest) longest = square;
     }
     out[SURE] = 1 / Math.sqrt(longest);
@@ -36,7 +39,8 @@ export function makeSlabSpeeds(vectors: Float64Array, out: Float64Array): () => 
     let farthest = 0;
     for (let t = 0; t < 20; t++) {
       const limit = Math.abs(det[t]) * (1 + CORNER_SLACK);
-      if (limit <= SINGULAR * longest * Math.sqrt(longest)) continue;
+      const size = squares[triples[3 * t]] * squares[triples[3 * t + 1]] * squares[triples[3 * t + 2]];
+      if (!(det[t] * det[t] > SINGULAR_SQUARE * size)) continue;
       let at = 9 * t;
       // Bit s is set while the corner of sign pattern s holds: signs (+ + +), (+ − +), (+ + −), (+ − −).
       let open = 15;
