@@ -2,8 +2,8 @@ import type { Chain } from './chain';
 import type { LimitMargin } from './types';
 
 /**
- * Least distance to a limit over all actuators (and the chain joints where a coupling gives them limits of their own), compared as shares
- * of each range. `joint` counts actuators from zero.
+ * Least distance to a limit over all actuators, compared as shares of each range; `joint` counts them from zero. Limits that a coupling's
+ * chain joints have of their own decide whether a posture counts as inside (withinLimits), but have no margin of their own.
  */
 export function limitMargin(chain: Chain, actuators: ArrayLike<number>): LimitMargin {
   let joint = 0;
