@@ -4,7 +4,7 @@ import { clearState, identityOf, readState, stillRuns, writeState } from './clai
 import { environmentOf, readSecrets, writeEnvFile } from './environment.mjs';
 import { choosePorts, portAnswers } from './ports.mjs';
 import { createDatabase, initialiseCluster, serverCommand, serverIsReady, stopLeftServer } from './postgres.mjs';
-import { haltSteps, lastLinesOf, run, signalGroup, sleep, start, stopGroup, until } from './shell.mjs';
+import { haltSteps, lastLinesOf, run, signalGroup, sleep, start, stopGroup, tellOfSteps, until } from './shell.mjs';
 
 const script = (file) => ['--import', 'tsx', file];
 
@@ -21,8 +21,8 @@ export class Installation {
     };
     this.children = new Map();
     this.stopping = false;
-    // What an earlier start has left behind stays noted until it is gone.
-    this.state = { children: readState(profile)?.children ?? {} };
+    this.state = { left: leftBy(readState(profile)), children: {} };
+    tellOfSteps((pids) => this.note({ steps: pids.map(identityOf) }));
     this.note({ step: 'Starting' });
   }
 
@@ -118,14 +118,13 @@ export class Installation {
 
   /** Ends what an earlier start has left running when it was killed itself. */
   async clearLeftovers() {
-    const { postgresql: _stoppedByItsOwnProgram, ...others } = this.state.children;
-    const left = Object.values(others).filter(stillRuns);
+    const left = this.state.left.filter(stillRuns);
     for (const { pid } of left) signalGroup(pid, 'SIGTERM');
     const end = Date.now() + 20_000;
     while (left.some(stillRuns) && Date.now() < end) await sleep(100);
     for (const { pid } of left.filter(stillRuns)) signalGroup(pid, 'SIGKILL');
     await stopLeftServer(this.profile);
-    this.note({ children: {} });
+    this.note({ left: [] });
   }
 
   async stop() {
@@ -133,12 +132,21 @@ export class Installation {
     this.stopping = true;
     await haltSteps();
     for (const { child, stop } of [...this.children.values()].reverse()) await stopGroup(child, stop);
+    this.ended = true;
     clearState(this.profile);
   }
 
   /** Tells others how far this start has come. */
   note(news) {
+    if (this.ended) return;
     this.state = { ...this.state, ...news };
     writeState(this.profile, this.state);
   }
+}
+
+/** What a start that was killed itself may have left running; its PostgreSQL is found and stopped by other means. */
+function leftBy(state) {
+  if (!state) return [];
+  const { postgresql: _, ...children } = state.children ?? {};
+  return [...(state.left ?? []), ...(state.steps ?? []), ...Object.values(children)];
 }

@@ -10,6 +10,12 @@ export class Halted extends Error {}
 
 let halted = false;
 const steps = new Map();
+let tell = () => {};
+
+/** `listener` is told the numbers of the processes that run as steps, whenever they change. */
+export function tellOfSteps(listener) {
+  tell = () => listener([...steps].filter(([, mustFinish]) => !mustFinish).map(([child]) => child.pid));
+}
 
 export function has(command) {
   return spawnSync('sh', ['-c', `command -v ${command}`], { stdio: 'ignore' }).status === 0;
@@ -23,6 +29,7 @@ export async function step(command, args, { env = process.env, cwd = root, user,
   if (halted) throw new Halted();
   const child = spawn(command, args, { cwd, env, ...user, detached: true, stdio: ['ignore', 'pipe', 'pipe'] });
   steps.set(child, mustFinish);
+  tell();
   let stdout = '';
   let output = '';
   child.stdout.setEncoding('utf8').on('data', (part) => {
@@ -38,6 +45,7 @@ export async function step(command, args, { env = process.env, cwd = root, user,
     child.once('close', (exitCode, signal) => resolve(exitCode ?? signal));
   });
   steps.delete(child);
+  tell();
   if (halted) throw new Halted();
   return { code, stdout, output };
 }
