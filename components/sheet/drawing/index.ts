@@ -1,3 +1,4 @@
+export { Crosshair } from './crosshair';
 export { DifferenceLayer } from './difference-layer';
 export { FloorPlanLayer, pictureWidthFor } from './floor-plan-layer';
 export { GridLayer } from './grid-layer';

@@ -1,0 +1,17 @@
+import type { SheetDocument } from '@/lib/client/sheet-document';
+import type { Review } from '@/lib/client/use-review';
+import type { StoredMap } from '@/lib/client/use-stored-maps';
+
+/** What a review page shows, whether it was opened by a link or by somebody signed in. */
+export interface ReviewSubject {
+  readonly document: SheetDocument;
+  readonly note: string;
+  readonly maps: ReadonlyMap<string, StoredMap> | null;
+  readonly mapsError: Error | undefined;
+  /** Must keep its identity between renders. */
+  readonly pictureUrl: (widthPx: number) => string;
+  readonly review: Review;
+  readonly mayRemark: boolean;
+  /** Guests give name and e-mail address with what they write. */
+  readonly asGuest: boolean;
+}

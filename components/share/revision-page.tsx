@@ -1,0 +1,84 @@
+'use client';
+
+import { useCallback, useMemo, useState } from 'react';
+import { ShareLinkDialog } from '@/components/forms/share-link-dialog';
+import { STATE_WORDS } from '@/components/projects/state-words';
+import { SubjectFault } from '@/components/shell/subject-fault';
+import { Button } from '@/components/ui/button';
+import { LinkButton } from '@/components/ui/link-button';
+import { LoadingLine } from '@/components/ui/loading-line';
+import { Moment } from '@/components/ui/moment';
+import { TitleBlock } from '@/components/ui/title-block';
+import { useMayActAs } from '@/lib/client/account-context';
+import { documentOfRevision } from '@/lib/client/sheet-document';
+import { useRevision, useRevisionReview } from '@/lib/client/use-review';
+import { useStoredMaps } from '@/lib/client/use-stored-maps';
+import type { Revision } from '@/lib/contracts/revisions';
+import { Review } from './review';
+
+/** An issued revision for those who are signed in: the customer's view, with what a member may do besides. */
+export default function RevisionPage({ revisionId }: { readonly revisionId: string }) {
+  const { data, error, mutate } = useRevision(revisionId);
+  if (error && !data) return <SubjectFault error={error} what="This revision" onRetry={() => void mutate()} />;
+  return data ? <Opened revision={data} /> : <LoadingLine label="Opening the revision" />;
+}
+
+function Opened({ revision }: { readonly revision: Revision }) {
+  const { id, layoutId, projectId, snapshot, number, issuedAt, issuedBy, state } = revision;
+  const mayShare = useMayActAs('integrator');
+  const mayEdit = useMayActAs('planner');
+  const [isSharing, setSharing] = useState(false);
+  const document = useMemo(() => documentOfRevision(revision), [revision]);
+  const maps = useStoredMaps('/api/maps', snapshot.maps);
+  const review = useRevisionReview(id, mayEdit);
+  const planId = snapshot.floorPlan?.id ?? '';
+  const pictureUrl = useCallback((width: number) => `/api/floor-plans/${planId}/picture?width=${width}`, [planId]);
+  return (
+    <div className="flex min-h-dvh flex-col bg-sheet lg:h-dvh">
+      <TitleBlock
+        cells={[
+          { label: 'Project', value: snapshot.projectName, href: `/projects/${projectId}`, wideOnly: true },
+          { label: 'Variant', value: `${snapshot.letter} · ${snapshot.name}`, heading: true },
+          { label: 'Revision', value: number, kind: 'figure' },
+          { label: 'State', value: STATE_WORDS[state].name, tone: 'petrol' },
+          {
+            label: 'Issued',
+            value: (
+              <>
+                <Moment iso={issuedAt} /> by {issuedBy}
+              </>
+            ),
+            wideOnly: true,
+          },
+        ]}
+        actions={
+          <>
+            {mayEdit && <LinkButton href={`/projects/${projectId}/layouts/${layoutId}`}>Open the sheet</LinkButton>}
+            {mayShare && (
+              <Button variant="action" onClick={() => setSharing(true)}>
+                Share
+              </Button>
+            )}
+          </>
+        }
+      />
+      <main className="flex min-h-0 flex-1 flex-col">
+        <Review
+          subject={{
+            document,
+            note: revision.note,
+            maps: maps.data ?? null,
+            mapsError: maps.error,
+            pictureUrl,
+            review,
+            mayRemark: true,
+            asGuest: false,
+          }}
+        />
+      </main>
+      {isSharing && (
+        <ShareLinkDialog revisionId={id} revisionName={`revision ${number}`} onClose={() => setSharing(false)} />
+      )}
+    </div>
+  );
+}
