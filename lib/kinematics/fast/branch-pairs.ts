@@ -71,6 +71,10 @@ export interface BranchPairs {
   /** Cosine and sine of the angle at which each joint stands mid-range, counted as in `pairs` (joint 3: by the elbow, times `turn3`). */
   readonly windows: Float64Array;
   readonly turn3: number;
+  /** Cosine of half of each joint's range; −2 where any angle will do. */
+  readonly edges: Float64Array;
+  /** Tool position in the frame of axis 1 from the frame that the base is given in: 3 × 4, row after row. */
+  readonly toAxis: Float64Array;
   /** Takes the rotation of a tool pose; call it before `solve` whenever the rotation changed. */
   orient(tool: Transform): void;
   /** Number of pairs for the position of a tool pose, or DOUBTFUL, TOO_FAR, TOO_NEAR. */
@@ -128,6 +132,7 @@ export function makeBranchPairs(chain: Chain, lastIsFree: boolean): BranchPairs 
   const five = windowOf(chain, 4, g.wristZero);
   const six = windowOf(chain, 5, 0);
   const windows = Float64Array.from([one, two, three, four, five, six].flatMap(({ c, s }) => [c, s]));
+  const edges = Float64Array.from([one, two, three, four, five, six], ({ edge }) => edge);
   const six360 = lastIsFree || six.edge === -2;
 
   function orient(tool: Transform) {
@@ -287,7 +292,7 @@ export function makeBranchPairs(chain: Chain, lastIsFree: boolean): BranchPairs 
     }
   }
 
-  return { lengths: g, pairs, codes, inside, shared, windows, turn3: g.turn3, orient, solve, fillSixth };
+  return { lengths: g, pairs, codes, inside, shared, windows, turn3: g.turn3, edges, toAxis, orient, solve, fillSixth };
 }
 
 const near = (value: number): boolean => value < LIMIT_EDGE && value > -LIMIT_EDGE;

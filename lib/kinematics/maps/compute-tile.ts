@@ -2,6 +2,8 @@ import { makeSolver } from '../solver';
 import type { Arm, MapRequest, MapTile } from '../types';
 import { write } from './cell';
 import { makeFullGrid } from './full-grid';
+import { makeRadialRows } from './radial/radial-rows';
+import { symmetryOf } from './radial/symmetry';
 import { makeMapTile } from './tile-codec';
 
 /** Computes rows of one map; made once, it can be called for many rows. Nothing is allocated per cell for closed-form arms. */
@@ -11,7 +13,10 @@ export interface MapComputer {
 }
 
 /** How a map is computed. `auto` takes the quickest that holds; the others are there to be compared with it. */
-export type MapRoute = 'auto' | 'full grid' | 'reference';
+export type MapRoute = 'auto' | 'symmetry' | 'full grid' | 'reference';
+
+/** Cells from which on a radial profile costs less than judging each cell. */
+const SYMMETRY_PAYS = 2000;
 
 /** Throws a RangeError where the request names a branch that the arm does not have. */
 export function makeMapComputer(arm: Arm, request: MapRequest, route: MapRoute = 'auto'): MapComputer {
@@ -23,10 +28,20 @@ export function makeMapComputer(arm: Arm, request: MapRequest, route: MapRoute =
   if (request.branch !== 'best' && wanted < 0) throw new RangeError(`This arm has no branch "${request.branch}".`);
 
   const grid = makeFullGrid(solver, request, wanted, route !== 'reference');
-  const { columns } = request.grid;
+  const { columns, rows } = request.grid;
+
+  const bySymmetry = route === 'symmetry' || (route === 'auto' && columns * rows >= SYMMETRY_PAYS);
+  const symmetry = bySymmetry ? symmetryOf(solver, request, wanted) : null;
+  /** Made with the first tile, since some callers only want the classes. */
+  let fill: ((out: MapTile) => void) | null = null;
 
   function tile(rowFrom: number, rowTo: number): MapTile {
     const out = makeMapTile(rowFrom, rowTo, columns);
+    if (symmetry) {
+      fill ??= makeRadialRows(symmetry, request, grid);
+      fill(out);
+      return out;
+    }
     grid.start();
     for (let row = rowFrom; row < rowTo; row++)
       for (let column = 0; column < columns; column++) {

@@ -2,7 +2,6 @@ import { missBy } from '../inverse/turns';
 import type { Gauge } from '../measures/gauge';
 import { middleCopy } from '../reach';
 import type { Solver } from '../solver';
-import type { Transform } from '../transforms';
 import { CLEARLY_BETTER, CODE, note, type Cell } from './cell';
 import type { Judge } from './roll-search';
 
