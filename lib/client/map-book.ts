@@ -46,7 +46,6 @@ export class MapBook {
   private wanted = new Set<string>();
   private readonly timers = new Map<string, () => void>();
   private readonly listeners = new Set<() => void>();
-  private stopped = false;
 
   constructor(private readonly ports: MapBookPorts) {}
 
@@ -84,8 +83,9 @@ export class MapBook {
     else await this.command(key, this.ports.retry);
   }
 
+  /** Follows nothing more until something is wanted again. */
   stop(): void {
-    this.stopped = true;
+    this.wanted = new Set();
     for (const cancel of this.timers.values()) cancel();
     this.timers.clear();
   }
@@ -151,7 +151,7 @@ export class MapBook {
   private later(key: string, afterMs: number, action: () => Promise<void>): void {
     this.timers.get(key)?.();
     this.timers.delete(key);
-    if (this.stopped || !this.wanted.has(key)) return;
+    if (!this.wanted.has(key)) return;
     const cancel = this.ports.timer(() => {
       this.timers.delete(key);
       void action();
@@ -160,7 +160,6 @@ export class MapBook {
   }
 
   private set(entry: MapEntry): void {
-    if (this.stopped) return;
     const entries = new Map(this.entries);
     // The newest stand last, so that the oldest are the first to be forgotten.
     entries.delete(entry.key);

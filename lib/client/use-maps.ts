@@ -46,29 +46,18 @@ function useRested<T>(value: T): T {
  * alike, ask nothing new.
  */
 export function useMaps(robots: readonly Robot[], settings: MapSettings): SheetMaps {
-  const [book, setBook] = useState<MapBook | null>(null);
-  useEffect(() => {
-    const next = serverBook();
-    setBook(next);
-    return () => next.stop();
-  }, []);
+  const [book] = useState(serverBook);
+  useEffect(() => () => book.stop(), [book]);
 
   const wantedText = useMemo(
     () => JSON.stringify(robots.map((robot) => [robot.id, questionOfRobot(robot, settings)])),
     [robots, settings],
   );
   const restedText = useRested(wantedText);
-  const wanted = useMemo(
-    () => JSON.parse(restedText) as [string, ReturnType<typeof questionOfRobot>][],
-    [restedText],
-  );
-  useEffect(() => book?.want(wanted.map(([, question]) => question)), [book, wanted]);
+  const wanted = useMemo(() => JSON.parse(restedText) as [string, ReturnType<typeof questionOfRobot>][], [restedText]);
+  useEffect(() => book.want(wanted.map(([, question]) => question)), [book, wanted]);
 
-  const entries = useSyncExternalStore(
-    book?.subscribe ?? noSubscription,
-    book?.getEntries ?? noEntries,
-    book?.getEntries ?? noEntries,
-  );
+  const entries = useSyncExternalStore(book.subscribe, book.getEntries, book.getEntries);
   const byRobot = useMemo(() => {
     const pairs = wanted.map(([robotId, question]) => [robotId, entries.get(keyOf(question))] as const);
     return new Map(pairs.filter((pair): pair is readonly [string, MapEntry] => pair[1] !== undefined));
@@ -77,13 +66,9 @@ export function useMaps(robots: readonly Robot[], settings: MapSettings): SheetM
   return useMemo(
     () => ({
       byRobot,
-      cancel: (key) => void book?.cancel(key),
-      retry: (key) => void book?.retry(key),
+      cancel: (key) => void book.cancel(key),
+      retry: (key) => void book.retry(key),
     }),
     [byRobot, book],
   );
 }
-
-const NO_ENTRIES: ReadonlyMap<string, MapEntry> = new Map();
-const noEntries = () => NO_ENTRIES;
-const noSubscription = () => () => {};

@@ -8,6 +8,7 @@ import { Palette } from '@/components/sheet/panels/palette';
 import { PlumbPanel } from '@/components/sheet/panels/plumb-panel';
 import { RemarksPanel } from '@/components/sheet/panels/remarks-panel';
 import { VerdictTable } from '@/components/sheet/panels/verdict-table';
+import { ShareDialog } from '@/components/share/share-dialog';
 import { useBoard } from './board-context';
 import { Canvas } from './canvas';
 import { ConflictDialog } from './conflict-dialog';
@@ -92,6 +93,7 @@ export function BoardFrame() {
         )}
       </div>
       <ConflictDialog {...dialogProps('conflict')} />
+      <ShareDialog layoutId={layout.id} {...dialogProps('share')} />
       <IssueDialog {...dialogProps('issue')} />
       <ShortcutsDialog {...dialogProps('shortcuts')} />
       <LiveRegion />

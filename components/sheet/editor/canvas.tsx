@@ -14,16 +14,13 @@ import {
 } from '@/components/sheet/drawing';
 import type { Remark } from '@/lib/contracts/remarks';
 import { inOrder } from '@/lib/editor/order';
-import { boundsOfItems } from '@/lib/editor/place-in-view';
 import { shownItems } from '@/lib/editor/sheet';
-import type { Item } from '@/lib/layout/items';
-import { unionBounds } from '@/lib/layout/viewport';
 import { useBoard, useBoardSettings, useBoardSheet, useView } from './board-context';
 import { DraftMarks } from './draft-marks';
 import { useFloor } from './floor-context';
-import { floorPlanBounds } from './floor-plan-bounds';
 import { PlumbMarks } from './plumb-marks';
 import { useReadings } from './readings-context';
+import { sheetBounds } from './sheet-bounds';
 import { useMapLook } from './use-map-look';
 import { useToolPointer } from './use-tool-pointer';
 
@@ -82,7 +79,7 @@ export function Canvas({ remarks, chosenRemarkId, onRemark }: CanvasProps) {
           width={size.width}
           height={size.height}
           viewport={viewport}
-          onViewportChange={(next) => view.set({ viewport: next })}
+          onViewportChange={(next) => view.look(next)}
           label={`Drawing of ${layout.name}. The list on the left holds everything on it.`}
           dragPans={tool.name === 'pan'}
           cursor={CURSORS[tool.name] ?? 'crosshair'}
@@ -139,24 +136,19 @@ export function Canvas({ remarks, chosenRemarkId, onRemark }: CanvasProps) {
 
 const CURSORS: Partial<Record<string, string>> = { select: 'default', pan: 'grab' };
 
-/** Keeps the canvas at the size of its box, and shows the whole sheet once at the start. */
+/** Keeps the canvas at the size of its box, and shows the whole sheet at the start. */
 function useMeasuredAndFitted(box: React.RefObject<HTMLDivElement | null>): void {
-  const { view, sheet, floorPlan } = useBoard();
-  const fitted = useRef(false);
+  const { view, sheet, floorPlan, arms } = useBoard();
+  const isFitted = useRef(false);
   useEffect(() => {
     const element = box.current;
     if (!element) return;
-    const measure = () => {
-      const { clientWidth: width, clientHeight: height } = element;
-      view.set({ size: { width, height } });
-      if (fitted.current || width === 0 || height === 0) return;
-      fitted.current = true;
-      const items: ReadonlyMap<string, Item> = sheet.getState().items;
-      view.fit(unionBounds(boundsOfItems(items), floorPlanBounds(floorPlan)));
-    };
+    const measure = () => view.set({ size: { width: element.clientWidth, height: element.clientHeight } });
     const observer = new ResizeObserver(measure);
     observer.observe(element);
     measure();
+    if (!isFitted.current) view.fit(sheetBounds(sheet.getState().items, arms, floorPlan));
+    isFitted.current = true;
     return () => observer.disconnect();
-  }, [box, view, sheet, floorPlan]);
+  }, [box, view, sheet, floorPlan, arms]);
 }

@@ -1,12 +1,16 @@
 'use client';
 
+import { ChevronDown } from 'lucide-react';
+import Link from 'next/link';
 import { Button } from '@/components/ui/button';
 import { LinkButton } from '@/components/ui/link-button';
+import { Menu, MenuItem } from '@/components/ui/menu';
 import { TitleBlock } from '@/components/ui/title-block';
 import { useMayActAs } from '@/lib/client/account-context';
 import { drawingRatio } from '@/lib/layout/viewport';
 import { useBoard, useView } from './board-context';
 import { SaveState } from './save-state';
+import { useMedia } from './use-media';
 
 interface SheetTitleBlockProps {
   readonly onConflict: () => void;
@@ -18,6 +22,8 @@ interface SheetTitleBlockProps {
 export function SheetTitleBlock({ onConflict, onShare, onIssue }: SheetTitleBlockProps) {
   const { layout, projectId } = useBoard();
   const mayIssue = useMayActAs('integrator');
+  const isNarrow = useMedia('(max-width: 1023px)');
+  const compareHref = `/projects/${projectId}/compare?left=layout:${layout.id}`;
   const { letter, name, projectName, latestRevision } = layout;
   return (
     <TitleBlock
@@ -29,23 +35,58 @@ export function SheetTitleBlock({ onConflict, onShare, onIssue }: SheetTitleBloc
         { label: 'State', value: <SaveState onConflict={onConflict} /> },
       ]}
       actions={
-        <>
-          <LinkButton variant="quiet" size="small" href={`/projects/${projectId}/compare?left=layout:${layout.id}`}>
-            Compare
-          </LinkButton>
-          {mayIssue && (
-            <>
-              <Button variant="quiet" size="small" onClick={onShare}>
-                Share
-              </Button>
-              <Button variant="action" onClick={onIssue}>
-                Issue for review
-              </Button>
-            </>
-          )}
-        </>
+        isNarrow ? (
+          <NarrowActions
+            compareHref={compareHref}
+            onShare={mayIssue ? onShare : null}
+            onIssue={mayIssue ? onIssue : null}
+          />
+        ) : (
+          <>
+            <LinkButton variant="quiet" size="small" href={compareHref}>
+              Compare
+            </LinkButton>
+            {mayIssue && (
+              <>
+                <Button variant="quiet" size="small" onClick={onShare}>
+                  Share
+                </Button>
+                <Button variant="action" onClick={onIssue}>
+                  Issue for review
+                </Button>
+              </>
+            )}
+          </>
+        )
       }
     />
+  );
+}
+
+interface NarrowActionsProps {
+  readonly compareHref: string;
+  /** Null where the reader may not. */
+  readonly onShare: (() => void) | null;
+  readonly onIssue: (() => void) | null;
+}
+
+/** On a phone the actions fold into one button. */
+function NarrowActions({ compareHref, onShare, onIssue }: NarrowActionsProps) {
+  return (
+    <Menu
+      trigger={
+        <Button size="small">
+          Sheet
+          <ChevronDown aria-hidden className="size-4" />
+        </Button>
+      }
+    >
+      <MenuItem asChild>
+        <Link href={compareHref}>Compare</Link>
+      </MenuItem>
+      {onShare && <MenuItem onSelect={onShare}>Share</MenuItem>}
+      {onIssue && <MenuItem onSelect={onIssue}>Issue for review</MenuItem>}
+    </Menu>
   );
 }
 

@@ -5,28 +5,27 @@ import type { ReactNode } from 'react';
 import { Button } from '@/components/ui/button';
 import { Select } from '@/components/ui/select';
 import { Tooltip } from '@/components/ui/tooltip';
-import { boundsOfItems } from '@/lib/editor/place-in-view';
 import type { Snapping } from '@/lib/editor/snapping';
 import { selectTool } from '@/lib/editor/tools/select';
 import { panTool } from '@/lib/editor/tools/place';
-import { unionBounds, zoomAt } from '@/lib/layout/viewport';
+import { zoomAt } from '@/lib/layout/viewport';
 import { useBoard, useBoardSheet } from './board-context';
 import { FloorPlanChoice } from './floor-plan-choice';
-import { floorPlanBounds } from './floor-plan-bounds';
+import { sheetBounds } from './sheet-bounds';
 
 const GRID_CHOICES = [10, 25, 50, 100, 250] as const;
 const ZOOM = 1.25;
 
 /** The strip over the canvas: hand and arrow, history, snapping, the floor plan, and the view. */
 export function Toolbar({ onShortcuts }: { readonly onShortcuts: () => void }) {
-  const { sheet, view, floorPlan } = useBoard();
+  const { sheet, view, floorPlan, arms } = useBoard();
   const toolName = useBoardSheet((state) => state.tool.name);
   const history = useBoardSheet((state) => state.history);
   const zoom = (factor: number) => {
     const { viewport, size } = view.get();
-    view.set({ viewport: zoomAt(viewport, { x: size.width / 2, y: size.height / 2 }, factor) });
+    view.look(zoomAt(viewport, { x: size.width / 2, y: size.height / 2 }, factor));
   };
-  const fit = () => view.fit(unionBounds(boundsOfItems(sheet.getState().items), floorPlanBounds(floorPlan)));
+  const fit = () => view.fit(sheetBounds(sheet.getState().items, arms, floorPlan));
   const lastDone = history.past.at(-1)?.label;
   const lastUndone = history.future.at(-1)?.label;
   return (
@@ -121,7 +120,7 @@ function SnapChoice() {
       aria-label="Snapping"
       value={snapping.gridMm === null ? 'off' : String(snapping.gridMm)}
       onValueChange={choose}
-      className="min-h-8 w-auto border-transparent text-sm"
+      className="min-h-8 w-36! flex-none border-transparent text-sm"
       options={[
         ...GRID_CHOICES.map((step) => ({ value: String(step), label: `Snap to ${step} mm` })),
         { value: 'off', label: 'Snap to nothing' },

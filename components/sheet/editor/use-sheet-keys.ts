@@ -1,11 +1,9 @@
 'use client';
 
 import { useEffect } from 'react';
-import { boundsOfItems } from '@/lib/editor/place-in-view';
 import { commandOf, type Command } from '@/lib/editor/shortcuts';
-import { unionBounds } from '@/lib/layout/viewport';
 import { useBoard } from './board-context';
-import { floorPlanBounds } from './floor-plan-bounds';
+import { sheetBounds } from './sheet-bounds';
 import { usePlace } from './use-place';
 import { useSelectionCommands } from './use-selection-commands';
 
@@ -30,7 +28,7 @@ function isForControl(event: KeyboardEvent): boolean {
 
 /** Keys of the whole page while a sheet is on the board. */
 export function useSheetKeys(onHelp: () => void): void {
-  const { sheet, view, floorPlan } = useBoard();
+  const { sheet, view, floorPlan, arms } = useBoard();
   const commands = useSelectionCommands();
   const { take } = usePlace();
 
@@ -52,7 +50,7 @@ export function useSheetKeys(onHelp: () => void): void {
         case 'finish':
           return sheet.finish();
         case 'fit':
-          return view.fit(unionBounds(boundsOfItems(sheet.getState().items), floorPlanBounds(floorPlan)));
+          return view.fit(sheetBounds(sheet.getState().items, arms, floorPlan));
         case 'help':
           return onHelp();
         case 'tool':
@@ -72,5 +70,5 @@ export function useSheetKeys(onHelp: () => void): void {
     };
     window.addEventListener('keydown', onKeyDown);
     return () => window.removeEventListener('keydown', onKeyDown);
-  }, [sheet, view, floorPlan, commands, take, onHelp]);
+  }, [sheet, view, floorPlan, arms, commands, take, onHelp]);
 }

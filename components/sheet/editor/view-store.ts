@@ -21,6 +21,8 @@ export class ViewStore {
     coveredPx: 0,
     mapScale: 'tide',
   };
+  /** What was last fitted; undefined once somebody looks elsewhere. */
+  private fitted: FloorBounds | null | undefined = undefined;
   private readonly listeners = new Set<() => void>();
 
   readonly get = (): View => this.view;
@@ -30,17 +32,31 @@ export class ViewStore {
     return () => this.listeners.delete(listener);
   };
 
-  set(change: Partial<View>): void {
-    this.view = { ...this.view, ...change };
-    for (const listener of [...this.listeners]) listener();
+  set(change: Partial<Omit<View, 'viewport'>>): void {
+    this.change(change);
+    // Until somebody looks elsewhere, the whole sheet stays in view while the page finds its sizes.
+    if (this.fitted !== undefined) this.fit(this.fitted);
+  }
+
+  /** Somebody moved the view. */
+  look(viewport: Viewport): void {
+    this.fitted = undefined;
+    this.change({ viewport });
   }
 
   /** Shows the whole of `bounds` in the part of the canvas that nothing covers. */
   fit(bounds: FloorBounds | null): void {
+    this.fitted = bounds;
     const { size, coveredPx } = this.view;
+    if (size.width === 0) return;
     const free = { width: size.width, height: Math.max(size.height - coveredPx, 80) };
-    const margin = Math.min(48, size.width / 12);
-    this.set({ viewport: fitBounds(bounds ?? EMPTY_FLOOR, free, margin) });
+    const margin = Math.min(36, size.width / 14);
+    this.change({ viewport: fitBounds(bounds ?? EMPTY_FLOOR, free, margin) });
+  }
+
+  private change(change: Partial<View>): void {
+    this.view = { ...this.view, ...change };
+    for (const listener of [...this.listeners]) listener();
   }
 
   /** The floor in the middle of what is seen. */

@@ -95,7 +95,7 @@ function RobotChoice() {
       aria-label="Robot that is read"
       value={chosenRobotId ?? BEST}
       onValueChange={(value) => chooseRobot(value === BEST ? null : value)}
-      className="min-h-7 w-auto border-transparent px-1.5 text-sm"
+      className="min-h-7 max-w-32 border-transparent px-1.5 text-sm"
       options={[{ value: BEST, label: bestWords }, ...robots.map(({ id, name }) => ({ value: id, label: name }))]}
     />
   );
@@ -119,7 +119,7 @@ function PostureReadings({ reading, posture }: PostureReadingsProps) {
               aria-label="Posture"
               value={posture.branch || String(postures.indexOf(posture))}
               onValueChange={chooseBranch}
-              className="min-h-7 w-auto max-w-52 border-transparent px-1.5 text-sm"
+              className="-mr-2.5 min-h-7 max-w-60 border-transparent px-1.5 text-sm"
               options={postures.map(({ branch, inverseConditionNumber }, index) => ({
                 value: branch || String(index),
                 label: branch || `Posture ${index + 1}`,

@@ -3,7 +3,7 @@ import { printedFixed } from '@/lib/editor/measure-text';
 
 /** Readings one under the other, figures at the right. */
 export function ReadingList({ children }: { readonly children: ReactNode }) {
-  return <dl className="mt-1.5 text-[0.9375rem] leading-[1.6rem]">{children}</dl>;
+  return <dl className="mt-1.5 text-[0.9375rem] leading-[1.5rem]">{children}</dl>;
 }
 
 interface ReadingProps {

@@ -26,8 +26,9 @@ export function RobotFields({ robot }: { readonly robot: Robot }) {
   const choices = libraryArms.some(({ id }) => id === robot.armId) || !own ? libraryArms : [own, ...libraryArms];
   return (
     <>
-      <Field label="Arm" className="mt-2">
+      <Field label="Arm" inline className="mt-2 grid-cols-[2.5rem_minmax(0,1fr)]!">
         <Select
+          className="min-h-7 text-sm"
           value={robot.armId}
           disabled={robot.locked}
           onValueChange={(armId) => edit('Arm', { armId })}

@@ -44,6 +44,8 @@ export function SideElevation({ reading, posture, arm, settings }: SideElevation
   const [plateRight] = px([plate, riserMm]);
   const link = Math.max(5, (SIDE_WIDTH_PX / (view.toMm[0] - view.fromMm[0])) * reachMm * 0.055);
   const height = printed(spot[1], 0);
+  // The words stand where the arm is not.
+  const isAtRight = spotX > SIDE_WIDTH_PX * 0.74;
 
   return (
     <div
@@ -69,9 +71,9 @@ export function SideElevation({ reading, posture, arm, settings }: SideElevation
         />
         <path d={`M0 ${toolY}H${SIDE_WIDTH_PX}`} stroke="var(--red)" strokeWidth="1" strokeDasharray="5 3.5" />
         <text
-          x={SIDE_WIDTH_PX - 4}
+          x={isAtRight ? 4 : SIDE_WIDTH_PX - 4}
           y={toolY - 5}
-          textAnchor="end"
+          textAnchor={isAtRight ? 'start' : 'end'}
           className="font-mono"
           fontSize="12"
           fill="var(--red)"

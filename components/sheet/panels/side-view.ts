@@ -7,14 +7,14 @@ export interface SideView {
 }
 
 export const SIDE_WIDTH_PX = 298;
-export const SIDE_HEIGHT_PX = 176;
+export const SIDE_HEIGHT_PX = 184;
 
 /** Fits an arm of this reach on this riser into the picture, floor line included, both axes at one scale. */
 export function sideView(reachMm: number, riserMm: number): SideView {
-  const below = reachMm * 0.09;
-  const heightMm = riserMm + reachMm * 1.08 + below;
+  const below = reachMm * 0.07;
+  const heightMm = riserMm + reachMm * 0.88 + below;
   const widthMm = (heightMm * SIDE_WIDTH_PX) / SIDE_HEIGHT_PX;
-  const left = Math.min(widthMm * 0.34, widthMm - reachMm * 1.04);
+  const left = Math.max(widthMm * 0.16, widthMm - reachMm * 1.12);
   return { fromMm: [-left, -below], toMm: [widthMm - left, heightMm - below] };
 }
 
