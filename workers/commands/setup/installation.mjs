@@ -97,7 +97,7 @@ export class Installation {
   startChild(name, { command, args, stop, ...options }) {
     if (this.stopping) return;
     const log = this.logOf(name);
-    const child = start(command, args, { ...options, log });
+    const child = start(command, args, { ...options, log, append: this.children.has(name) });
     this.children.set(name, { child, stop });
     this.note({ children: { ...this.state.children, [name]: identityOf(child.pid) } });
     child.once('error', (error) => this.onDeath?.(name, error.message, ''));

@@ -75,8 +75,8 @@ export function lastLinesOf(file, count) {
 }
 
 /** Starts a process in a group of its own with its output in a file, so that stopping it stops its children too. */
-export function start(command, args, { env, log, cwd = root, user }) {
-  const out = openSync(log, 'w');
+export function start(command, args, { env, log, append = false, cwd = root, user }) {
+  const out = openSync(log, append ? 'a' : 'w');
   const child = spawn(command, args, { cwd, env, ...user, detached: true, stdio: ['ignore', out, out] });
   closeSync(out);
   return child;
