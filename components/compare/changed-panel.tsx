@@ -28,11 +28,11 @@ export function ChangedPanel({ changed }: { readonly changed: readonly ChangedIt
           <tbody>
             {changed.map((difference) => (
               <DataRow key={`${difference.itemId} ${difference.what}`}>
-                <DataCell className="h-9!">{difference.what}</DataCell>
-                <DataCell figures className="h-9! text-[0.875rem]">
+                <DataCell className="h-7.5! py-0.5!">{difference.what}</DataCell>
+                <DataCell figures className="h-7.5! py-0.5! text-[0.875rem]">
                   {difference.change}
                 </DataCell>
-                <DataCell className="h-9! text-right">
+                <DataCell className="h-7.5! py-0.5! text-right">
                   {difference.effects.slice(0, SHOWN_EFFECTS).map(({ words, direction }) => (
                     <span key={words} className={classNames('block leading-snug', TONES[direction])}>
                       {words}

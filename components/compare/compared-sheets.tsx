@@ -2,7 +2,6 @@
 
 import { useMemo, useState } from 'react';
 import { MeasureChoice } from '@/components/sheet/map-key/measure-choice';
-import { WorkLine } from '@/components/sheet/map-key/work-line';
 import { EmptyState } from '@/components/ui/empty-state';
 import { LinkButton } from '@/components/ui/link-button';
 import { LoadingLine } from '@/components/ui/loading-line';
@@ -73,17 +72,8 @@ export function ComparedSheets({ projectId, leftRef, left, right, isEmpty, mayAs
   if (!comparison) return <LoadingLine label="Laying the two sheets side by side" />;
 
   const [leftName, rightName] = shortNames(comparison.left.document, comparison.right.document);
-  const waiting = [comparison.left, comparison.right].filter(({ work }) => work.kind !== 'none');
   return (
     <div className="grid gap-3.5">
-      {waiting.map(({ document, work, cancel, retry }) => (
-        <div key={`${document.letter} ${document.mark}`} className="border border-rule bg-sheet px-3.5 py-2">
-          <p className="text-[0.8125rem] text-ink-soft">
-            {document.letter} · {document.name}, {document.mark}
-          </p>
-          <WorkLine work={work} onCancel={cancel} onRetry={retry} />
-        </div>
-      ))}
       <SheetTrio
         comparison={comparison}
         scale={scale}

@@ -51,20 +51,20 @@ function FigureRow({ figure }: { readonly figure: ComparedFigure }) {
   const change = left === null || right === null ? null : right - left;
   return (
     <DataRow>
-      <th scope="row" className="h-9 px-3 py-1 pl-3.5 text-left font-normal">
+      <th scope="row" className="h-7.5 px-3 py-0.5 pl-3.5 text-left font-normal">
         {label}
       </th>
-      <DataCell figures className="h-9!">
+      <DataCell figures className="h-7.5! py-0.5!">
         {figureText(left, leftOf)}
       </DataCell>
-      <DataCell figures className="h-9!">
+      <DataCell figures className="h-7.5! py-0.5!">
         {figureText(right, rightOf)}
       </DataCell>
-      <DataCell className="h-9! pl-0! text-sm text-ink-soft">{unit}</DataCell>
-      <DataCell className="h-9!">
+      <DataCell className="h-7.5! py-0.5! pl-0! text-sm text-ink-soft">{unit}</DataCell>
+      <DataCell className="h-7.5! py-0.5!">
         <Bars {...barsOf(figure)} verdict={verdict} />
       </DataCell>
-      <DataCell figures className={classNames('h-9! font-medium', TONES[verdict])}>
+      <DataCell figures className={classNames('h-7.5! py-0.5! font-medium', TONES[verdict])}>
         {formatFigure(change, { decimals, signed: true })}
         <span className="sr-only"> {WORDS[verdict]}</span>
       </DataCell>

@@ -12,6 +12,7 @@ import {
   SheetStage,
 } from '@/components/sheet/drawing';
 import { useMedia } from '@/components/sheet/editor/use-media';
+import { WorkLine } from '@/components/sheet/map-key/work-line';
 import { SheetReader } from '@/components/sheet/reader/sheet-reader';
 import { SegmentedControl } from '@/components/ui/segmented-control';
 import { useSize } from '@/components/ui/use-size';
@@ -64,7 +65,15 @@ export function SheetTrio({ comparison, scale, leftRemarks, measureChoice }: She
       key={which}
       title={`${side.document.letter} · ${side.document.name}`}
       aside={<span className="font-mono text-ink">{side.document.mark}</span>}
-      foot={<ScaleKey measure={comparison.measure} scale={scale} range={comparison.range} />}
+      foot={
+        side.work.kind === 'none' ? (
+          <ScaleKey measure={comparison.measure} scale={scale} range={comparison.range} />
+        ) : (
+          <div className="min-w-0 flex-1">
+            <WorkLine work={side.work} onCancel={side.cancel} onRetry={side.retry} />
+          </div>
+        )
+      }
       // All three are of one size; only one of those that are there needs to be measured.
       measure={which === 'left' || isNarrow ? boxRef : undefined}
       height={size?.height}

@@ -23,7 +23,7 @@ export function TrioPanel({ title, aside, foot, measure, height, children }: Tri
       <div ref={measure} style={{ height: height ?? LEAST_HEIGHT_PX }}>
         {children}
       </div>
-      <div className="flex h-8 items-center gap-2.5 border-t border-hair px-3 text-[0.8125rem] text-ink-soft">
+      <div className="flex min-h-8 items-center gap-2.5 border-t border-hair px-3 py-1 text-[0.8125rem] text-ink-soft">
         {foot}
       </div>
     </section>

@@ -48,7 +48,7 @@ export function ReviewDrawing(props: ReviewDrawingProps) {
           height={size.height}
           viewport={viewport}
           onViewportChange={setMoved}
-          label={`Drawing of ${letter} · ${name}. Remarks and task points are listed beside it.`}
+          label={`Drawing of ${letter} · ${name}. All that is pinned to it is listed beside it.`}
           pictureUrl={subject.pictureUrl}
           map={reviewMap.map}
           scale="tide"

@@ -53,7 +53,7 @@ export function Review({ subject }: { readonly subject: ReviewSubject }) {
       </div>
       <div className="bg-sheet lg:w-[26rem] lg:flex-none lg:overflow-y-auto lg:border-l lg:border-rule">
         {spot && (
-          <section aria-label="New remark" className="grid gap-2 border-b border-rule px-3.5 py-3">
+          <div className="grid gap-2 border-b border-rule px-3.5 py-3">
             <div className="flex flex-wrap items-baseline justify-between gap-2">
               <h2 className="font-semibold">Remark on this spot</h2>
               <p className="font-mono text-sm text-ink-soft">
@@ -70,7 +70,7 @@ export function Review({ subject }: { readonly subject: ReviewSubject }) {
               }}
               onCancel={() => setSpot(null)}
             />
-          </section>
+          </div>
         )}
         <MapLine settings={document.settings} reviewMap={reviewMap} absence={absenceOf(subject)} />
         <p className="flex flex-wrap justify-between gap-x-4 border-y border-hair px-3.5 py-2.5 font-semibold">

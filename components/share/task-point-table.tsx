@@ -37,15 +37,15 @@ export function TaskPointTable({ verdicts, robots }: TaskPointTableProps) {
       <tbody>
         {ordered.map(({ pointId, pointName, best }) => (
           <DataRow key={pointId}>
-            <DataCell className="h-9!">
+            <DataCell className="h-7.5! py-0.5!">
               {pointName}
               {best?.reason && <span className="block text-[0.8125rem] leading-snug text-ink-soft">{best.reason}</span>}
             </DataCell>
-            <DataCell className="h-9!">{(best?.reached && names.get(best.robotId)) || '–'}</DataCell>
-            <DataCell figures className="h-9!">
+            <DataCell className="h-7.5! py-0.5!">{(best?.reached && names.get(best.robotId)) || '–'}</DataCell>
+            <DataCell figures className="h-7.5! py-0.5!">
               {best?.posture ? `${formatFigure(best.posture.sureSpeedMmS / 1000, { decimals: 2 })} m/s` : '–'}
             </DataCell>
-            <DataCell className="h-9! text-right">
+            <DataCell className="h-7.5! py-0.5! text-right">
               <Tag tone={best?.band ?? 'neutral'}>{best ? BAND_NAMES[best.band] : 'No robot'}</Tag>
             </DataCell>
           </DataRow>

@@ -34,7 +34,7 @@ const LEAST_LABELLED_MM = 600;
  */
 export function isoLines(map: ValueGrid, levels: readonly number[]): IsoLine[] {
   const trace = contours().size([map.grid.columns, map.grid.rows]);
-  const values = map.value as unknown as number[];
+  const values = spread(map);
   return levels.map((level) => {
     const lines = trace
       .contour(values, level)
@@ -45,14 +45,20 @@ export function isoLines(map: ValueGrid, levels: readonly number[]): IsoLine[] {
   });
 }
 
-/** Outlines of the reached floor: rings in floor mm, holes wound the other way. */
+/** Outlines of the reached floor, halfway between reached and other cells: rings in floor mm, holes wound the other way. */
 export function reachOutline(map: ValueGrid): PointMm[][] {
-  return outlineOf(map, (value) => (Number.isNaN(value) ? -Infinity : 1));
+  return outlineOf(map.grid, Array.from(map.value, (value) => (Number.isNaN(value) ? -1 : 1)));
 }
 
-/** Outlines of the reached floor whose value is below the threshold; its inner edges follow the line of that value. */
+/**
+ * Outlines of the floor whose value is below the threshold; where reached floor meets reached floor they follow the line of
+ * that value. They reach a little beyond the reached floor: clip what is drawn with `reachOutline`.
+ */
 export function belowOutline(map: ValueGrid, threshold: number): PointMm[][] {
-  return outlineOf(map, (value) => (Number.isNaN(value) ? -Infinity : threshold - value));
+  return outlineOf(
+    map.grid,
+    spread(map).map((value) => threshold - value),
+  );
 }
 
 /**
@@ -77,13 +83,33 @@ export function realmEdges(map: ValueGrid, owner: Uint8Array): Float32Array {
   return Float32Array.from(edges);
 }
 
-function outlineOf(map: ValueGrid, inside: (value: number) => number): PointMm[][] {
-  const field = Array.from(map.value, inside);
+function outlineOf(grid: FloorGrid, field: number[]): PointMm[][] {
   return contours()
-    .size([map.grid.columns, map.grid.rows])
+    .size([grid.columns, grid.rows])
     .contour(field, 0)
     .coordinates.flat()
-    .map((ring) => ring.map((point) => onFloor(map.grid, point as unknown as PointMm)));
+    .map((ring) => ring.map((point) => onFloor(grid, point as unknown as PointMm)));
+}
+
+/**
+ * The values with one ring of cells round the reached floor that carries the mean of its reached neighbours. Without it a
+ * line would bend at the edge and run along it, for a contour cannot pass between a value and none.
+ */
+function spread({ grid: { columns, rows }, value }: ValueGrid): number[] {
+  return Array.from(value, (here, cell) => {
+    if (!Number.isNaN(here)) return here;
+    const [column, row] = [cell % columns, Math.floor(cell / columns)];
+    let [sum, count] = [0, 0];
+    for (let y = Math.max(0, row - 1); y <= Math.min(rows - 1, row + 1); y += 1) {
+      for (let x = Math.max(0, column - 1); x <= Math.min(columns - 1, column + 1); x += 1) {
+        const near = value[y * columns + x];
+        if (Number.isNaN(near)) continue;
+        sum += near;
+        count += 1;
+      }
+    }
+    return count === 0 ? NaN : sum / count;
+  });
 }
 
 /** d3 counts cell corners from zero; the first cell's centre is at (½, ½). */

@@ -50,8 +50,8 @@ export const MapLayer = memo(function MapLayer(props: MapLayerProps) {
         ink.save();
         ink.clip(reached, 'evenodd');
         drawGroundImage(ink, image.canvas, image.grid, px);
-        ink.restore();
         if (hatched) drawHatched(ink, palette, px, hatched, palette.red);
+        ink.restore();
         drawRealmEdges(ink, palette, px, edges);
         if (lines) drawIsoLines(ink, palette, px, lines);
         drawHatchEdge(ink, palette, px, reached, image.grid);

@@ -66,6 +66,11 @@ export function drawWalkway(ink: Ink, palette: Palette, px: number, walkway: Wal
   ink.setLineDash([]);
 }
 
+/** The name, and the clear width where the name does not say it already. */
+function walkwayWords({ name, widthMm }: Walkway): string {
+  return name.includes(String(widthMm)) ? name : `${name}, keep ${widthMm} mm clear`;
+}
+
 /** What a walkway asks for, on its middle line near the beginning. */
 export function drawWalkwayName(ink: Ink, palette: Palette, px: number, walkway: Walkway): void {
   const [[x1, y1], [x2, y2]] = walkway.pointsMm;
@@ -74,7 +79,7 @@ export function drawWalkwayName(ink: Ink, palette: Palette, px: number, walkway:
   const { angleRad, flipped } = uprightAngle(along + turn);
   if (Math.hypot(x2 - x1, y2 - y1) < 80 * px) return;
   letter(ink, palette, px, {
-    text: `${walkway.name}, keep ${walkway.widthMm} mm clear`,
+    text: walkwayWords(walkway),
     xMm: flipped ? x2 : x1,
     yMm: flipped ? y2 : y1,
     angleRad: angleRad - turn,
