@@ -29,6 +29,7 @@ export function MembersPage() {
     <>
       <SectionHeader current="/members" />
       <Page>
+        <h1 className="sr-only">Members</h1>
         <Notice tone="caution">Members are kept by the admins of your organisation. Ask one of them.</Notice>
       </Page>
     </>

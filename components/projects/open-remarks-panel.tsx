@@ -12,11 +12,13 @@ import type { Remark } from '@/lib/contracts/remarks';
 import { DataPart } from '@/components/ui/data-part';
 
 /** The remarks that wait for an answer, each leading to its spot on the revision. */
-export function OpenRemarksPanel({ projectId, count }: { projectId: string; count: number }) {
+export function OpenRemarksPanel({ projectId, count }: { projectId: string; count: number | undefined }) {
   const answer = useLayouts(projectId);
   return (
     <Panel title="Open remarks" aside={<span className="font-mono font-medium text-ink">{count}</span>}>
-      {count === 0 ? (
+      {count === undefined ? (
+        <LoadingLine label="Loading the remarks" />
+      ) : count === 0 ? (
         <p className="px-3.5 py-3 text-ink-soft">None. Remarks that customers pin to a revision appear here.</p>
       ) : (
         <DataPart answer={answer} loading="Loading the remarks">

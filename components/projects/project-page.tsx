@@ -71,7 +71,7 @@ export function ProjectPage({ projectId }: { projectId: string }) {
           <div className="contents min-w-0 gap-4 lg:flex lg:flex-col">
             {mayPlan && <FloorPlansPanel projectId={projectId} />}
             <div className="order-4 min-w-0">
-              <OpenRemarksPanel projectId={projectId} count={project?.openRemarkCount ?? 0} />
+              <OpenRemarksPanel projectId={projectId} count={project?.openRemarkCount} />
             </div>
           </div>
         </div>

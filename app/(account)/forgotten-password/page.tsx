@@ -6,7 +6,7 @@ export const metadata: Metadata = { title: 'Forgotten password' };
 
 export default function ForgottenPasswordPage() {
   return (
-    <Panel title="Forgotten password" padded>
+    <Panel title="Forgotten password" level={1} padded>
       <ForgottenPasswordForm />
     </Panel>
   );

@@ -15,7 +15,7 @@ export default async function SignInPage({ searchParams }: { searchParams: Query
   const returnTo = localPath(Array.isArray(asked) ? asked[0] : asked);
   if (await readMember()) redirect(returnTo);
   return (
-    <Panel title="Sign in" padded>
+    <Panel title="Sign in" level={1} padded>
       <SignInForm returnTo={returnTo} />
     </Panel>
   );

@@ -8,7 +8,7 @@ export const metadata: Metadata = { title: 'Invitation', referrer: 'no-referrer'
 export default async function InvitationPage({ params }: { params: Promise<{ token: string }> }) {
   const { token } = await params;
   return (
-    <Panel title="Invitation" padded>
+    <Panel title="Invitation" level={1} padded>
       <InvitationForm token={token} />
     </Panel>
   );

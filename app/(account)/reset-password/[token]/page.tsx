@@ -8,7 +8,7 @@ export const metadata: Metadata = { title: 'New password', referrer: 'no-referre
 export default async function ResetPasswordPage({ params }: { params: Promise<{ token: string }> }) {
   const { token } = await params;
   return (
-    <Panel title="Set a new password" padded>
+    <Panel title="Set a new password" level={1} padded>
       <ResetPasswordForm token={token} />
     </Panel>
   );
