@@ -31,13 +31,15 @@ function workingPosture(arm: Arm, reachM: number): ArrayLike<number> {
     const [first] = answer.postures;
     if (first) return first.posture;
   }
-  const { min, max } = solver.chain;
-  return min.map((value, index) => (value + max[index]) / 2);
+  const { min, max, prismatic, coupling } = solver.chain;
+  // Slides stand off their middle, or a gantry would hide behind its own base.
+  const share = (index: number): number => (!coupling && prismatic[index] ? 0.75 : 0.5);
+  return min.map((value, index) => value + share(index) * (max[index] - value));
 }
 
 const TOGETHER_MM = 1;
 
-/** The arm in a posture with the tool pointing down, or in the middle of its ranges where it cannot point down. */
+/** The arm in a posture with the tool pointing down, or resting where it cannot point down. */
 export function sectionPosture(arm: Arm, reachMm: number): SectionPosture {
   const chain = compileChain(arm);
   const {

@@ -128,7 +128,7 @@ describe('what the kernel is asked', () => {
       const stance = makeStance(chain);
       let farthest = 0;
       for (let count = 0; count < 5000; count += 1) {
-        const posture = arm.joints.map(({ min, max }) => min + (max - min) * chance());
+        const posture = (arm.actuators ?? arm.joints).map(({ min, max }) => min + (max - min) * chance());
         const { tool } = forward(chain, posture, stance);
         farthest = Math.max(farthest, Math.hypot(tool[3], tool[7]));
       }

@@ -106,7 +106,8 @@ export const OTHER_CHAINS: readonly ReferenceArm[] = [
   },
 ];
 
-const freedomsOf = (arm: Arm): readonly Freedom[] => (arm.joints.length === 4 ? ['x', 'y', 'z', 'rz'] : ALL);
+const freedomsOf = (arm: Arm): readonly Freedom[] =>
+  (arm.actuators ?? arm.joints).length === 4 ? ['x', 'y', 'z', 'rz'] : ALL;
 
 export const BUILT_IN: readonly ReferenceArm[] = BUILT_IN_ARMS.map(({ name, arm }) => ({
   name,

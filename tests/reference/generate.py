@@ -90,7 +90,7 @@ class Reference:
         gains = np.linalg.svd(generators, compute_uv=False)
         rows = matrix[self.linear + held]
         corners = corners_of(generators, basis)
-        sure = None if enumerate_facets else sure_by_formula(generators, basis)
+        sure = None if enumerate_facets else sure_by_formula(generators, basis, corners)
         return {
             "gains": gains.tolist(),
             "manipulability": float(np.prod(np.linalg.svd(rows, compute_uv=False))),
@@ -120,13 +120,14 @@ def corners_of(generators, basis):
     return np.vstack(found)
 
 
-def sure_by_formula(generators, basis):
-    """Zonotope: facet normals are cross products of generators; square set: 1 / the longest row of the inverse; else None."""
+def sure_by_formula(generators, basis, corners):
+    """Zonotope: facet normals are cross products of generators; square set: 1 / the longest row of the inverse; one coordinate
+    more than dimensions: a facet's normal n has generators.T @ n in the span of two bounds; else None."""
     dimensions, free = generators.shape
     if dimensions == free:
         return float(1 / np.linalg.norm(basis @ np.linalg.inv(generators), axis=1).max())
     if free != len(basis):
-        return None
+        return sure_by_pairs(generators, basis, corners) if free == dimensions + 1 else None
     if dimensions == 2:
         normals = np.stack([-generators[1], generators[0]], axis=1)
     elif dimensions == 3:
@@ -137,6 +138,20 @@ def sure_by_formula(generators, basis):
     lengths = np.linalg.norm(normals, axis=1)
     normals = normals[lengths > 1e-12] / lengths[lengths > 1e-12, None]
     return float(np.abs(normals @ generators).sum(axis=1).min())
+
+
+def sure_by_pairs(generators, basis, corners):
+    """Every pair of bounds at once: the null direction of [generators.T, first bound, second bound] starts with a normal."""
+    first, second = np.array(list(itertools.combinations(range(len(basis)), 2))).T
+    systems = np.concatenate(
+        [np.broadcast_to(generators.T, (len(first), *generators.T.shape)), basis[first, :, None], basis[second, :, None]], axis=2
+    )
+    _, values, vt = np.linalg.svd(systems)
+    normals = vt[:, -1, : len(generators)]
+    lengths = np.linalg.norm(normals, axis=1)
+    usable = (values[:, -1] > 1e-9 * values[:, 0]) & (lengths > 1e-9)
+    normals = normals[usable] / lengths[usable, None]
+    return float(np.abs(normals @ corners.T).max(axis=1).min())
 
 
 def least_facet(corners):

@@ -29,7 +29,7 @@ const withRow = (arm: Arm, index: number, row: Partial<Arm['joints'][number]>): 
 });
 
 const ARMS: [string, Arm][] = [
-  ...BUILT_IN_ARMS.filter(({ arm }) => arm.joints.length === 6).map(({ slug, arm }): [string, Arm] => [slug, arm]),
+  ...BUILT_IN_ARMS.filter(({ slug }) => slug.startsWith('six-axis')).map(({ slug, arm }): [string, Arm] => [slug, arm]),
   ['the workload arm', WORKLOAD_ARM],
   ['a crooked tool', { ...medium, tool: { xyz: [0.15, 0.02, 0.1], rpy: [0.1, 0.2, 0.3] } }],
   ['hung from a wall', { ...medium, base: { xyz: [0.4, -0.2, 1.1], rpy: [0.2, Math.PI / 2, 0.5] } }],
@@ -120,6 +120,6 @@ describe.each(ARMS)('the six-axis path agrees with the general one to 1e-9: %s',
 });
 
 it('knows no other chains', () => {
-  for (const { arm } of BUILT_IN_ARMS.filter(({ arm }) => arm.joints.length !== 6))
+  for (const { arm } of BUILT_IN_ARMS.filter(({ slug }) => !slug.startsWith('six-axis')))
     expect(makeSixAxisGauge(makeSolver(arm).chain, 'held', false)).toBeNull();
 });
