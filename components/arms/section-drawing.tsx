@@ -1,64 +1,72 @@
 'use client';
 
-import { useMemo } from 'react';
-import type { LibraryArm } from '@/lib/contracts/arms';
-import { sectionGrid, sectionPosture } from '@/lib/layout/arm-section';
+import type { SectionGrid } from '@/lib/layout/arm-section';
 import { SectionMap } from './section-map';
+import type { ArmStudy } from './use-arm-study';
 
-/** Drawing units a cell of the map; the lettering counts in them too. */
-const CELL = 4;
-const FOOT = 24;
-const GRID_MM = 500;
+/** Drawing units across; the lettering counts in them. */
+const WIDTH = 430;
+const FOOT = 22;
+/** Distances between upright lines to choose from, mm: about four come to stand in the drawing. */
+const MARKS_MM = [50, 100, 200, 250, 500, 1000, 2000, 5000, 10_000, 20_000];
 
-/** The arm cut along its first axis, to scale: the map of the cut, half-metre lines, and the arm with its tool down. */
-export function SectionDrawing({ arm }: { arm: LibraryArm }) {
-  const { definition, reachMm } = arm;
-  const grid = useMemo(() => sectionGrid(reachMm), [reachMm]);
-  const posture = useMemo(() => sectionPosture(definition, reachMm), [definition, reachMm]);
-  const width = grid.columns * CELL;
-  const height = grid.rows * CELL;
-  const x = (xMm: number): number => ((xMm - grid.originXMm) / grid.stepMm + 0.5) * CELL;
-  const y = (zMm: number): number => height - ((zMm - grid.originZMm) / grid.stepMm + 0.5) * CELL;
+interface SectionDrawingProps {
+  study: ArmStudy;
+  /** Read aloud as what is drawn. */
+  name: string;
+}
+
+/** The arm cut along its first axis, to scale: the map of the cut, upright lines, and the arm with its tool down. */
+export function SectionDrawing({ study: { facts, map }, name }: SectionDrawingProps) {
+  if (!facts) return <div className="aspect-square" aria-hidden />;
+  const { grid, posture, reachMm } = facts;
+  const { left, bottom, widthMm, heightMm } = frameOf(grid);
+  const unit = WIDTH / widthMm;
+  const height = heightMm * unit;
+  const x = (xMm: number): number => (xMm - left) * unit;
+  const y = (zMm: number): number => height - (zMm - bottom) * unit;
   const path = posture.body
     .map(([xMm, zMm], at) => `${at ? 'L' : 'M'}${x(xMm).toFixed(1)} ${y(zMm).toFixed(1)}`)
     .join('');
   const [toolXMm, toolZMm] = posture.body[posture.body.length - 1];
-  const marks = Array.from({ length: Math.floor((1.05 * reachMm) / GRID_MM) + 1 }, (_, index) => index * GRID_MM);
+  const stepMm = MARKS_MM.find((mm) => mm * 4 >= reachMm) ?? 50_000;
+  const marks = Array.from({ length: Math.floor((left + widthMm) / stepMm) + 1 }, (_, index) => index * stepMm);
   return (
-    <div className="relative">
-      <SectionMap arm={definition} grid={grid} className="absolute inset-x-0 top-0 w-full" />
+    <div className="relative overflow-hidden">
+      {map && <SectionMap map={map} style={placeOf(map.fineGrid, grid, height)} />}
       <svg
-        viewBox={`0 0 ${width} ${height + FOOT}`}
+        viewBox={`0 0 ${WIDTH} ${height + FOOT}`}
         role="img"
-        aria-label={`${arm.name} from the side with its tool down. The darker the spot, the more evenly it moves there.`}
+        aria-label={`${name || 'The arm'} from the side with its tool down. The darker the spot, the more evenly it moves there.`}
         className="relative block w-full"
       >
-        <g stroke="var(--ink)" strokeOpacity="0.13">
+        <g stroke="var(--ink)" strokeOpacity="0.1">
           {marks.map((mm) => (
             <path key={mm} d={`M${x(mm)} 0V${height}`} />
           ))}
         </g>
-        <g className="font-mono text-[12px]" fill="var(--ink-soft)" textAnchor="middle">
-          {marks.map((mm) => (
-            <text key={mm} x={x(mm)} y={height + 16}>
-              {mm}
-            </text>
-          ))}
+        <g className="font-mono text-[11px]" fill="var(--ink-soft)" textAnchor="middle">
+          {marks
+            .filter((mm) => x(mm) < WIDTH - 16)
+            .map((mm) => (
+              <text key={mm} x={x(mm)} y={height + 16}>
+                {mm}
+              </text>
+            ))}
         </g>
-        <path d={`M0 ${y(0)}H${width}`} stroke="var(--ink)" strokeWidth="1.3" />
+        <path d={`M0 ${y(0)}H${WIDTH}`} stroke="var(--ink)" strokeWidth="1.3" />
         <g fill="none" strokeLinecap="round" strokeLinejoin="round">
-          <path d={path} stroke="var(--ink)" strokeWidth="13" />
-          <path d={path} stroke="var(--sheet)" strokeWidth="9.8" />
+          <path d={path} stroke="var(--ink)" strokeWidth="12" />
+          <path d={path} stroke="var(--sheet)" strokeWidth="9" />
         </g>
         {posture.joints.map(({ number, at: [xMm, zMm] }, index) => (
           <g key={number}>
-            <circle cx={x(xMm)} cy={y(zMm)} r="6.5" fill="var(--sheet)" stroke="var(--ink)" strokeWidth="1.7" />
+            <circle cx={x(xMm)} cy={y(zMm)} r="6" fill="var(--sheet)" stroke="var(--ink)" strokeWidth="1.6" />
             <text
-              x={x(xMm) + (index === posture.joints.length - 1 ? 11 : -10)}
-              y={y(zMm) - 8}
-              // Beside the arm, not on it: the forearm comes down on the right of the others.
-              textAnchor={index === posture.joints.length - 1 ? 'start' : 'end'}
-              className="text-[13px] font-semibold"
+              x={x(xMm) + 10}
+              // Beside the arm, not on it: the first one's upper arm rises to its right.
+              y={y(zMm) + (index === 0 && posture.joints.length > 1 ? 13 : -9)}
+              className="text-[12px] font-semibold"
               fill="var(--ink)"
               stroke="var(--sheet)"
               strokeWidth="3.5"
@@ -72,4 +80,27 @@ export function SectionDrawing({ arm }: { arm: LibraryArm }) {
       </svg>
     </div>
   );
+}
+
+function frameOf({ originXMm, originZMm, stepMm, columns, rows }: SectionGrid) {
+  return {
+    left: originXMm - stepMm / 2,
+    bottom: originZMm - stepMm / 2,
+    widthMm: columns * stepMm,
+    heightMm: rows * stepMm,
+  };
+}
+
+/** Where a map lies in the drawing, in shares of it: one of the arm before may still be on show. */
+function placeOf(map: SectionGrid, drawing: SectionGrid, height: number) {
+  const [own, whole] = [frameOf(map), frameOf(drawing)];
+  const percent = (share: number): string => `${(100 * share).toFixed(4)}%`;
+  const withFoot = (height + FOOT) / height;
+  const top = whole.bottom + whole.heightMm - own.bottom - own.heightMm;
+  return {
+    left: percent((own.left - whole.left) / whole.widthMm),
+    width: percent(own.widthMm / whole.widthMm),
+    top: percent(top / whole.heightMm / withFoot),
+    height: percent(own.heightMm / whole.heightMm / withFoot),
+  };
 }

@@ -1,40 +1,44 @@
 'use client';
 
-import { useEffect, useRef } from 'react';
-import type { ArmDefinition } from '@/lib/contracts/arm';
-import type { SectionGrid } from '@/lib/layout/arm-section';
+import { useEffect, useRef, type CSSProperties } from 'react';
 import { scaleTable, shareOf, TABLE_SIZE, valueRange } from '@/lib/layout/scales';
-import { useSectionMap } from './use-section-map';
+import type { ArmStudy } from './use-arm-study';
 
-/** The map of the cut, one canvas pixel a cell, to be stretched over its place by the caller. */
-export function SectionMap({ arm, grid, className }: { arm: ArmDefinition; grid: SectionGrid; className?: string }) {
+/** The map of the cut, one canvas pixel a small cell, to be stretched over its place by the caller. */
+export function SectionMap({ map, style }: { map: NonNullable<ArmStudy['map']>; style: CSSProperties }) {
   const canvas = useRef<HTMLCanvasElement>(null);
-  const rows = useSectionMap(arm, grid);
+  const { coarse, fine, fineGrid } = map;
+  const { columns, rows } = fineGrid;
   useEffect(() => {
     const ink = canvas.current?.getContext('2d');
     if (!ink) return;
-    const image = ink.createImageData(grid.columns, grid.rows);
+    const image = ink.createImageData(columns, rows);
     const pixels = new Uint32Array(image.data.buffer);
     const colours = scaleTable('tide');
-    const range = valueRange('inverseConditionNumber', ...rows);
-    rows.forEach((values, row) => {
-      const start = (grid.rows - 1 - row) * grid.columns;
-      values.forEach((value, column) => {
+    // Of the large cells alone, so that no colour changes while the small ones come in.
+    const range = valueRange('inverseConditionNumber', ...coarse.rows);
+    for (let row = 0; row < rows; row++) {
+      const start = (rows - 1 - row) * columns;
+      const small = fine[row];
+      const large = coarse.rows[row >> 2];
+      for (let column = 0; column < columns; column++) {
+        const value = small ? small[column] : large[column >> 2];
         // Not reached is bare paper, never a colour of the scale.
-        if (Number.isNaN(value)) return;
-        pixels[start + column] = colours[Math.min(TABLE_SIZE - 1, Math.floor(shareOf(range, value) * TABLE_SIZE))];
-      });
-    });
+        if (!Number.isNaN(value))
+          pixels[start + column] = colours[Math.min(TABLE_SIZE - 1, Math.floor(shareOf(range, value) * TABLE_SIZE))];
+      }
+    }
     ink.putImageData(image, 0, 0);
-  }, [rows, grid]);
+  }, [coarse, fine, columns, rows]);
   return (
     <canvas
       ref={canvas}
-      width={grid.columns}
-      height={grid.rows}
+      width={columns}
+      height={rows}
       aria-hidden
-      className={className}
-      style={{ imageRendering: 'pixelated' }}
+      data-section-rows={fine.length}
+      className="absolute"
+      style={{ imageRendering: 'pixelated', ...style }}
     />
   );
 }

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { BUILT_IN_ARMS } from '@/lib/kinematics/library';
-import { sectionGrid, sectionPosture, sectionRow } from './arm-section';
+import { coarsened, sectionGrid, sectionPosture, sectionRow } from './arm-section';
 
 const arm = BUILT_IN_ARMS.find(({ slug }) => slug === 'six-axis-12kg')!.arm;
 /** Shoulder offset, upper arm and the straight elbow-to-flange line, added up by hand from the library's data, mm. */
@@ -29,13 +29,24 @@ describe('the section through an arm', () => {
   });
 
   it('maps what lies within reach and nothing beyond', () => {
-    const grid = sectionGrid(REACH_MM);
+    const grid = sectionGrid(arm, REACH_MM, 72);
     const row = Math.round((300 - grid.originZMm) / grid.stepMm);
-    const values = sectionRow(arm, grid, row);
+    const values = sectionRow(arm, grid, row).inverseConditionNumber;
     const at = (xMm: number): number => values[Math.round((xMm - grid.originXMm) / grid.stepMm)];
     expect(values).toHaveLength(grid.columns);
     expect(at(900)).toBeGreaterThan(0);
     expect(at(900)).toBeLessThanOrEqual(1);
     expect(at(REACH_MM + 80)).toBeNaN();
+  });
+
+  it('lays large cells over four times four small ones', () => {
+    const fine = sectionGrid(arm, REACH_MM, 72);
+    const coarse = coarsened(fine);
+    expect([coarse.columns * 4, coarse.rows * 4]).toEqual([fine.columns, fine.rows]);
+    // The left and lower edge of both.
+    expect(coarse.originXMm - coarse.stepMm / 2).toBeCloseTo(fine.originXMm - fine.stepMm / 2, 6);
+    expect(coarse.originZMm - coarse.stepMm / 2).toBeCloseTo(fine.originZMm - fine.stepMm / 2, 6);
+    // The first axis and the base fall on edges of cells.
+    expect((fine.originXMm / fine.stepMm + 0.5) % 1).toBeCloseTo(0, 6);
   });
 });

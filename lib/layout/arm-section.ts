@@ -3,6 +3,8 @@ import { makeMapComputer } from '@/lib/kinematics/maps/compute-tile';
 import { reach } from '@/lib/kinematics/reach';
 import { makeSolver } from '@/lib/kinematics/solver';
 import type { Arm } from '@/lib/kinematics/types';
+import { armHeightsMm } from './arm-reach';
+import { reachRadius } from './reach-radius';
 
 /** A vertical cut through an arm's first axis: mm, x away from the axis, z up from the base. */
 
@@ -77,24 +79,46 @@ export interface SectionGrid {
   readonly rows: number;
 }
 
-/** Cells from the first axis to the reach, so that a section takes about a second. */
-const CELLS_OUT = 72;
-
-/** A grid round everything that the arm may reach in the cut, and a little behind its first axis. */
-export function sectionGrid(reachMm: number): SectionGrid {
-  const stepMm = reachMm / CELLS_OUT;
-  const cells = (share: number): number => Math.round(share * CELLS_OUT);
+/** A grid round everything that the arm may reach in the cut, and a little behind its first axis; `cellsOut` from there to the reach. */
+export function sectionGrid(arm: Arm, reachMm: number, cellsOut: number): SectionGrid {
+  const stepMm = reachMm / cellsOut;
+  const { topMm, bottomMm } = armHeightsMm(arm);
+  // Held down, the tool ends below the wrist centre by what lies between the two.
+  const toolMm = Math.min(0.4 * reachMm, Math.max(0, 1000 * reachRadius(arm) - reachMm));
+  const top = Math.max(topMm, 0.5 * reachMm) + 0.08 * reachMm;
+  const bottom = Math.max(Math.min(0, bottomMm - toolMm), -0.4 * reachMm) - 0.08 * reachMm;
+  const [left, right] = [-0.42 * reachMm, 1.38 * reachMm];
+  // Whole cells either way from the axis and the base, so that coarse and fine cells share their edges.
+  const cells = (mm: number): number => 4 * Math.ceil(Math.abs(mm) / stepMm / 4);
   return {
-    originXMm: -cells(0.35) * stepMm,
-    originZMm: -cells(0.6) * stepMm,
+    originXMm: (0.5 - cells(left)) * stepMm,
+    originZMm: (0.5 - cells(bottom)) * stepMm,
     stepMm,
-    columns: cells(0.35 + 1.1),
-    rows: cells(0.6 + 1.15),
+    columns: cells(left) + cells(right),
+    rows: cells(bottom) + cells(top),
   };
 }
 
-/** Inverse condition number along one row of the cut with the tool down and the wrist held; NaN where it is not reached. */
-export function sectionRow(arm: Arm, grid: SectionGrid, row: number): Float32Array {
+/** The same place in cells four times as large. */
+export function coarsened({ originXMm, originZMm, stepMm, columns, rows }: SectionGrid): SectionGrid {
+  return {
+    originXMm: originXMm + 1.5 * stepMm,
+    originZMm: originZMm + 1.5 * stepMm,
+    stepMm: 4 * stepMm,
+    columns: columns / 4,
+    rows: rows / 4,
+  };
+}
+
+export interface SectionRow {
+  /** NaN where the tool does not reach. */
+  readonly inverseConditionNumber: Float32Array;
+  /** m/s. */
+  readonly maximumToolSpeed: Float32Array;
+}
+
+/** One row of the cut with the tool down and the wrist held. */
+export function sectionRow(arm: Arm, grid: SectionGrid, row: number): SectionRow {
   const computer = makeMapComputer(arm, {
     grid: { origin: [grid.originXMm / 1000, 0], step: grid.stepMm / 1000, columns: grid.columns, rows: 1 },
     toolHeight: (grid.originZMm + row * grid.stepMm) / 1000,
@@ -103,5 +127,5 @@ export function sectionRow(arm: Arm, grid: SectionGrid, row: number): Float32Arr
     wrist: 'held',
     branch: 'best',
   });
-  return computer.tile(0, 1).inverseConditionNumber;
+  return computer.tile(0, 1);
 }
