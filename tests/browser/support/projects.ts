@@ -24,7 +24,7 @@ export async function openProject(page: Page, name: string): Promise<void> {
 export async function openVariant(page: Page, project: string, variant: string | RegExp): Promise<void> {
   await openProject(page, project);
   await page.getByRole('link', { name: variant }).first().click();
-  await expect(page.locator('[data-canvas]')).toBeVisible();
+  await expect(page.locator('[data-canvas]')).toBeVisible({ timeout: 30_000 });
 }
 
 export const planFile = (name: string) => path.join('tests', 'fixtures', 'floor-plans', name);
