@@ -1,4 +1,5 @@
-import { missBy } from '../inverse/turns';
+import { worstMiss } from '../inverse/turns';
+import { limitShare } from '../limits';
 import type { Gauge } from '../measures/gauge';
 import { middleCopy } from '../reach';
 import type { Solver } from '../solver';
@@ -17,10 +18,10 @@ export function makeReferenceJudge(
   cell: Cell,
 ): Judge {
   const { chain, closedForm } = solver;
-  const n = chain.joints;
+  const n = chain.actuators;
   const posture = new Float64Array(chain.actuators);
   return (target) => {
-    const branches = closedForm!.solve(solver.flangeOf(target));
+    const branches = closedForm!.solve(solver.flangeOf(target), 0);
     if (branches.count === 0 && branches.shortfall !== 'none') note(cell, CODE[branches.shortfall], 0, branches.by);
     for (let b = 0; b < branches.count; b++) {
       if (wanted >= 0 && branches.codes[b] !== wanted) continue;
@@ -44,17 +45,11 @@ export function makeNumericalJudge(solver: Solver, gauge: Gauge, freeRoll: boole
   };
 }
 
-function noteLimit({ chain }: Solver, values: Float64Array, at: number, cell: Cell) {
-  let joint = 0;
-  let by = 0;
-  for (let i = 0; i < chain.joints; i++) {
-    const miss = missBy(chain, i, values[at + i]);
-    if (miss > by) {
-      by = miss;
-      joint = i + 1;
-    }
-  }
-  note(cell, CODE['joint limit'], joint, by);
+const miss = new Float64Array(2);
+
+export function noteLimit({ chain }: Solver, values: Float64Array, at: number, cell: Cell) {
+  worstMiss(chain, values, at, miss);
+  note(cell, CODE['joint limit'], miss[0] + 1, miss[1]);
 }
 
 function keepIfBetter(solver: Solver, gauge: Gauge, posture: Float64Array, code: number, cell: Cell) {
@@ -67,14 +62,5 @@ function keepIfBetter(solver: Solver, gauge: Gauge, posture: Float64Array, code:
   cell.maximumToolSpeed = reading.maximumToolSpeed;
   cell.sureSpeed = reading.sureSpeed;
   cell.branch = code;
-  cell.limitShare = leastShare(solver, posture);
-}
-
-function leastShare({ chain }: Solver, posture: Float64Array): number {
-  let share = Infinity;
-  for (let i = 0; i < chain.actuators; i++) {
-    const left = Math.min(posture[i] - chain.min[i], chain.max[i] - posture[i]);
-    share = Math.min(share, left / (chain.max[i] - chain.min[i]));
-  }
-  return Math.max(0, share);
+  cell.limitShare = Math.max(0, limitShare(solver.chain, posture));
 }

@@ -1,4 +1,4 @@
-import { DOUBTFUL, FLIPPED, PAIR, PLAIN, TOO_FAR, SIXTH, C1 } from '../../fast/branch-pairs';
+import { DOUBTFUL, C1, C4, FLIPPED, PAIR, PLAIN, SIXTH, TOO_FAR } from '../../fast/branch-pairs';
 import { makeLimitMargins, makeWorstMiss } from '../../fast/limit-margins';
 import { makeLimitShare } from '../../fast/limit-share';
 import { ICN, makeSixAxisGauge, MAXIMUM_SPEED, SURE_SPEED } from '../../fast/six-axis-gauge';
@@ -81,7 +81,8 @@ export function makeKnotReader(symmetry: Symmetry): KnotReader {
       readMargins(pair);
       out[at + MARGINS + plain] = asked(plain) ? margins[0] : 1;
       out[at + MARGINS + (plain | WRIST_FLIPPED)] = asked(plain | WRIST_FLIPPED) ? margins[1] : 1;
-      signature = 4 * signature + inside[pair];
+      // Where the wrist passes through straight, joint 4 turns over at once.
+      signature = 8 * signature + 2 * inside[pair] + (pairs[pair * PAIR + C4] > 0 ? 1 : 0);
       judge(pair, out, at + (plain & 1) * SIDE);
     }
     const [left, right] = [out[at + VALUE], out[at + SIDE + VALUE]];

@@ -24,17 +24,17 @@ export interface Profile {
   /** KNOT numbers a radius, ascending; piece i lies between knots i and i + 1. */
   readonly knots: Float64Array;
   readonly pieces: number;
-  /** 1 where a limit, a shortfall or the lead of a branch changes within the piece: its few cells are judged one by one. */
+  /** 1 where a limit, a shortfall or the lead of a branch changes within the piece, or a value is too steep: its few cells are judged one by one. */
   readonly changes: Uint8Array;
 }
 
-/** Even pieces at the start; each is halved until it fits. */
+/** Even pieces at the start, within the arm's reach; each is halved until it fits. */
 const START = 48;
 /**
  * Largest error of a straight line at the middle of a piece, as a share of the scale. The piece is then kept as two halves, whose
  * own error is a quarter of it where the curve is smooth.
  */
-const FIT = 1e-3;
+const FIT = 5e-4;
 /** rad; decides only which of two joints is named. */
 const MISS_FIT = 1e-3;
 
@@ -57,7 +57,9 @@ export function makeProfile(symmetry: Symmetry, farthest: number, finest: number
   };
 
   const start: number[] = [];
-  for (let k = 0; k <= START; k++) start.push(readAt(((farthest * k) / START) ** 2));
+  const inner = Math.min(farthest, symmetry.reach);
+  for (let k = 0; k <= START; k++) start.push(readAt(((inner * k) / START) ** 2));
+  if (farthest > inner) start.push(readAt(farthest ** 2));
   const scales = [VALUE, MAXIMUM, SURE, REST].map((offset) => {
     let most = 0;
     for (const at of start)
@@ -70,7 +72,7 @@ export function makeProfile(symmetry: Symmetry, farthest: number, finest: number
     const from = knots[left + SQUARE];
     const to = knots[right + SQUARE];
     const same = knots[left + SIGNATURE] === knots[right + SIGNATURE] && knots[left + SIGNATURE] !== -1;
-    if (Math.sqrt(to) - Math.sqrt(from) < finest) return keep(left, same ? 0 : 1);
+    if (Math.sqrt(to) - Math.sqrt(from) < finest) return keep(left, 1);
     const half = ((Math.sqrt(from) + Math.sqrt(to)) / 2) ** 2;
     const middle = readAt(half);
     if (same && fits(room.knots, left, middle, right, scales)) {
@@ -82,8 +84,8 @@ export function makeProfile(symmetry: Symmetry, farthest: number, finest: number
     split(middle, right);
   }
 
-  for (let k = 0; k < START; k++) split(start[k], start[k + 1]);
-  order.push(start[START]);
+  for (let k = 1; k < start.length; k++) split(start[k - 1], start[k]);
+  order.push(start[start.length - 1]);
   const knots = new Float64Array(order.length * KNOT);
   order.forEach((at, i) => knots.set(room.knots.subarray(at, at + KNOT), i * KNOT));
   return { knots, pieces: changes.length, changes: Uint8Array.from(changes) };

@@ -1,154 +1,130 @@
 import type { MapRequest, MapTile } from '../../types';
 import { CODE, write } from '../cell';
 import type { FullGrid } from '../full-grid';
+import { CANNOT_TELL, makeLimitNamer } from './name-limit';
 import {
-  ABSENT,
-  C6,
-  CLASS,
-  FACING,
-  FIRST,
-  INSIDE,
-  KNOT,
-  MAXIMUM,
-  MISS,
-  REASON,
-  REST,
-  S6,
-  SIDE,
-  SQUARE,
-  STATUS,
-  SURE,
-  VALUE,
-} from './knot';
-import { makeProfile, type Profile } from './profile';
+  CHANGING,
+  makePieces,
+  REACHING,
+  SHORT,
+  SLOT,
+  SLOT_C6,
+  SLOT_CLASS,
+  SLOT_FACING,
+  SLOT_GUARD,
+  SLOT_LINES,
+  SLOT_S6,
+} from './pieces';
+import { makeProfile } from './profile';
 import type { Symmetry } from './symmetry';
 
 /** Cells nearer to axis 1 than this (m) have no bearing. */
 const ON_AXIS = 1e-6;
 /** Difference of cosines within which the limit of joint 1 is left to the single cell. */
 const LIMIT_EDGE = 1e-7;
-/** Two joints or sides that miss by less than this apart (rad): which one to name is left to the single cell. */
-const TIE = 3e-3;
-/** Squared radii are looked up in even buckets, several a piece. */
-const BUCKETS = 2048;
 
 /** Fills the rows of a tile from a profile over the radius; cells where something changes are judged one by one. */
-export function makeRadialRows(symmetry: Symmetry, request: MapRequest, grid: FullGrid) {
+export function makeRadialRows(symmetry: Symmetry, request: MapRequest, grid: FullGrid): (out: MapTile) => void {
   const { origin, step, columns, rows } = request.grid;
   const { toPlane, halfRanges, first, lastIsFree, turn6 } = symmetry;
-  const [firstC, firstS, firstEdge] = first;
-  const [half1, half6] = [halfRanges[0], halfRanges[5]];
-  const perRange1 = 1 / (2 * half1);
-  const perRange6 = 1 / (2 * half6);
-  const placeX = (column: number, row: number) =>
-    toPlane[0] * (origin[0] + column * step) + toPlane[1] * (origin[1] + row * step) + toPlane[2];
-  const placeY = (column: number, row: number) =>
-    toPlane[3] * (origin[0] + column * step) + toPlane[4] * (origin[1] + row * step) + toPlane[5];
-  const corners = [0, columns - 1].flatMap((c) => [0, rows - 1].map((r) => Math.hypot(placeX(c, r), placeY(c, r))));
-  const farthest = Math.max(...corners) + step;
-  // A piece this wide holds about two cells of the map, no more than finding its change would cost.
-  const { knots, pieces, changes }: Profile = makeProfile(symmetry, farthest, (2 * farthest) / (columns * rows));
-  const outermost = knots[pieces * KNOT + SQUARE];
-  const perBucket = BUCKETS / outermost;
-  const bucketStart = new Uint16Array(BUCKETS + 1);
-  for (let bucket = 0, piece = 0; bucket <= BUCKETS; bucket++) {
-    while (piece < pieces - 1 && knots[(piece + 1) * KNOT + SQUARE] * perBucket <= bucket) piece++;
-    bucketStart[bucket] = piece;
-  }
+  const [middleC, middleS, firstEdge] = first;
+  const perRange1 = 1 / (2 * halfRanges[0]);
+  const perRange6 = 1 / (2 * halfRanges[5]);
+  const [xByX, xByY, shiftX, yByX, yByY, shiftY] = toPlane;
+
+  const farthest = Math.max(
+    ...[0, columns - 1].flatMap((column) =>
+      [0, rows - 1].map((row) => {
+        const x = origin[0] + column * step;
+        const y = origin[1] + row * step;
+        return Math.hypot(xByX * x + xByY * y + shiftX, yByX * x + yByY * y + shiftY);
+      }),
+    ),
+  );
+  // A piece this wide holds about two cells of the map, which cost no more than halving it once more would.
+  const profile = makeProfile(symmetry, farthest + step, (2 * farthest) / (columns * rows));
+  const { kinds, reasons, slots, starts, ends, perBucket } = makePieces(profile, symmetry);
+  const spot = new Float64Array(2);
+  const nameLimit = makeLimitNamer(profile, symmetry, spot);
 
   function single(out: MapTile, at: number, column: number, row: number) {
     grid.judge(column, row);
     write(out, at, grid.cell);
   }
 
-  return (out: MapTile) => {
+  function beyondLimits(out: MapTile, at: number, piece: number, column: number, row: number) {
+    const joint = nameLimit(piece);
+    if (joint === CANNOT_TELL) return single(out, at, column, row);
+    out.reason[at] = CODE['joint limit'];
+    out.bindingJoint[at] = joint;
+  }
+
+  return (out) => {
     grid.start();
-    const { reason, bindingJoint, branch, inverseConditionNumber, maximumToolSpeed, sureSpeed, limitShare } = out;
-    for (let row = out.rowFrom; row < out.rowTo; row++)
-      for (let column = 0; column < columns; column++) {
-        const at = (row - out.rowFrom) * columns + column;
-        const x = placeX(column, row);
-        const y = placeY(column, row);
+    const { reason, branch, inverseConditionNumber, maximumToolSpeed, sureSpeed, limitShare } = out;
+    let at = 0;
+    for (let row = out.rowFrom; row < out.rowTo; row++) {
+      const rowY = origin[1] + row * step;
+      const fromX = xByY * rowY + shiftX;
+      const fromY = yByY * rowY + shiftY;
+      for (let column = 0; column < columns; column++, at++) {
+        const columnX = origin[0] + column * step;
+        const x = fromX + xByX * columnX;
+        const y = fromY + yByX * columnX;
         const square = x * x + y * y;
-        let piece = bucketStart[(square * perBucket) | 0];
-        while (knots[(piece + 1) * KNOT + SQUARE] <= square) piece++;
-        if (changes[piece] === 1 || square < ON_AXIS * ON_AXIS) {
+        let piece = starts[(square * perBucket) | 0];
+        while (ends[piece] <= square) piece++;
+        const kind = kinds[piece];
+        if (kind === SHORT) {
+          reason[at] = reasons[piece];
+          continue;
+        }
+        if (kind === CHANGING || square < ON_AXIS * ON_AXIS) {
           single(out, at, column, row);
           continue;
         }
-        const knot = piece * KNOT;
-        const next = knot + KNOT;
-        const radius = Math.sqrt(square);
-        const t = (square - knots[knot + SQUARE]) / (knots[next + SQUARE] - knots[knot + SQUARE]);
+        spot[0] = x;
+        spot[1] = y;
         // Bearing from the middle of joint 1's range, times the radius.
-        const ahead = x * firstC + y * firstS;
+        const radius = Math.sqrt(square);
+        const ahead = x * middleC + y * middleS;
         const edge = radius * firstEdge;
         const doubt = radius * LIMIT_EDGE;
-        let side = knots[knot + FIRST] === 0 ? knot : knot + SIDE;
-        let state = 0;
-        for (let turn = 0; turn < 2; turn++) {
-          if (turn === 1) side = side === knot ? knot + SIDE : knot;
-          if (knots[side + STATUS] !== INSIDE) continue;
-          const beyond = knots[side + FACING] * ahead - edge;
-          if (beyond > doubt) {
-            state = 1;
-            break;
-          }
-          if (beyond > -doubt) {
-            state = 2;
-            break;
-          }
-        }
-        if (state === 1) {
-          const far = side + KNOT;
-          const facing = knots[side + FACING];
-          let share = knots[side + REST] + t * (knots[far + REST] - knots[side + REST]);
-          const off1 = Math.atan2(Math.abs(y * firstC - x * firstS), facing * ahead);
-          share = Math.min(share, 0.5 - off1 * perRange1);
-          if (!lastIsFree) {
-            const c6 = knots[side + C6];
-            const s6 = knots[side + S6];
-            const off6 = Math.atan2(Math.abs(s6 * x + turn6 * c6 * y), c6 * x - turn6 * s6 * y);
-            share = Math.min(share, 0.5 - off6 * perRange6);
-          }
-          reason[at] = 0;
-          bindingJoint[at] = 0;
-          branch[at] = knots[side + CLASS];
-          inverseConditionNumber[at] = knots[side + VALUE] + t * (knots[far + VALUE] - knots[side + VALUE]);
-          maximumToolSpeed[at] = knots[side + MAXIMUM] + t * (knots[far + MAXIMUM] - knots[side + MAXIMUM]);
-          sureSpeed[at] = knots[side + SURE] + t * (knots[far + SURE] - knots[side + SURE]);
-          limitShare[at] = Math.max(0, share);
-        } else if (state === 2) single(out, at, column, row);
-        else {
-          const left = knots[knot + STATUS];
-          const right = knots[knot + SIDE + STATUS];
-          if (left === ABSENT && right === ABSENT) {
-            reason[at] = knots[knot + REASON];
+        let slot = 2 * SLOT * piece;
+        let beyond = kind === REACHING ? slots[slot + SLOT_FACING] * ahead - edge : -1;
+        if (beyond < -doubt) {
+          slot += SLOT;
+          if (slots[slot + SLOT_FACING] === 0) {
+            beyondLimits(out, at, piece, column, row);
             continue;
           }
-          const aside = Math.abs(y * firstC - x * firstS);
-          let joint = 0;
-          let least = Infinity;
-          for (let s = knot; s <= knot + SIDE; s += SIDE) {
-            if (knots[s + STATUS] === ABSENT) continue;
-            const rest = knots[s + MISS] + t * (knots[s + KNOT + MISS] - knots[s + MISS]);
-            const miss1 = firstEdge === -2 ? 0 : Math.max(0, Math.atan2(aside, knots[s + FACING] * ahead) - half1);
-            const by = Math.max(rest, miss1);
-            const named = miss1 >= rest ? 1 : knots[s + CLASS];
-            // Too close to tell, unless both would name the same joint.
-            if (Math.abs(miss1 - rest) < TIE || (named !== joint && Math.abs(by - least) < TIE)) joint = -1;
-            if (joint === -1) break;
-            if (by < least) {
-              least = by;
-              joint = named;
-            }
-          }
-          if (joint === -1) single(out, at, column, row);
-          else {
-            reason[at] = CODE['joint limit'];
-            bindingJoint[at] = joint;
+          beyond = slots[slot + SLOT_FACING] * ahead - edge;
+          if (beyond < -doubt) {
+            beyondLimits(out, at, piece, column, row);
+            continue;
           }
         }
+        if (beyond <= doubt) {
+          single(out, at, column, row);
+          continue;
+        }
+        const line = slot + SLOT_LINES;
+        let share = slots[line + 6] + slots[line + 7] * square;
+        const facing = slots[slot + SLOT_FACING] * ahead;
+        if (facing < radius * slots[slot + SLOT_GUARD])
+          share = Math.min(share, 0.5 - perRange1 * Math.atan2(Math.abs(y * middleC - x * middleS), facing));
+        if (!lastIsFree) {
+          const c6 = slots[slot + SLOT_C6];
+          const s6 = slots[slot + SLOT_S6];
+          const off6 = Math.atan2(Math.abs(s6 * x + turn6 * c6 * y), c6 * x - turn6 * s6 * y);
+          share = Math.min(share, 0.5 - perRange6 * off6);
+        }
+        branch[at] = slots[slot + SLOT_CLASS];
+        inverseConditionNumber[at] = slots[line] + slots[line + 1] * square;
+        maximumToolSpeed[at] = slots[line + 2] + slots[line + 3] * square;
+        sureSpeed[at] = slots[line + 4] + slots[line + 5] * square;
+        limitShare[at] = Math.max(0, share);
       }
+    }
   };
 }

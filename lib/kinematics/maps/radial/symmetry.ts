@@ -1,5 +1,5 @@
 import type { Chain } from '../../chain';
-import { makeBranchPairs } from '../../fast/branch-pairs';
+import { LAST_AXIS, makeBranchPairs, OFFSET } from '../../fast/branch-pairs';
 import type { Solver } from '../../solver';
 import { orient } from '../../target';
 import { identityTransform, type Transform } from '../../transforms';
@@ -20,6 +20,8 @@ export interface Symmetry {
   readonly halfRanges: Float64Array;
   /** Where joint 1 stands mid-range (cosine, sine), cosine of half its range, −2 where any angle will do. */
   readonly first: readonly [number, number, number];
+  /** Distance from axis 1 beyond which nothing is reached (m). */
+  readonly reach: number;
   /** +1 or −1: joint 6 turns with or against the bearing. */
   readonly turn6: number;
 }
@@ -53,6 +55,8 @@ export function symmetryOf(solver: Solver, request: MapRequest, wanted: number):
     orient([c * t[0], c * t[1], Math.sin(direction.tilt)], roll, pose);
   } else orient(direction.kind === 'vector' ? direction.vector : [0, 0, -1], roll, pose);
   branches.orient(pose);
+  const { shoulderX, upper, fore } = branches.lengths;
+  const hand = Math.hypot(branches.shared[OFFSET], branches.shared[OFFSET + 1]);
   return {
     chain,
     wrist: request.wrist,
@@ -63,7 +67,8 @@ export function symmetryOf(solver: Solver, request: MapRequest, wanted: number):
     toPlane: Float64Array.of(t[0], t[1], t[2] * toolHeight + t[3], t[4], t[5], t[6] * toolHeight + t[7]),
     halfRanges: Float64Array.from(chain.min, (low, i) => (chain.max[i] - low) / 2),
     first: [branches.windows[0], branches.windows[1], branches.edges[0]],
-    turn6: branches.shared[8] > 0 ? -1 : 1,
+    reach: Math.abs(shoulderX) + upper + fore + hand,
+    turn6: branches.shared[LAST_AXIS + 2] > 0 ? -1 : 1,
   };
 }
 
