@@ -2,7 +2,7 @@ import net from 'node:net';
 
 /** Says at once what to start where the services are away, instead of a hundred refused connections. */
 export default async function setup(): Promise<void> {
-  for (const name of ['DATABASE_URL', 'S3_ENDPOINT', 'SMTP_URL']) {
+  for (const name of ['DATABASE_URL', 'S3_ENDPOINT', 'SMTP_URL', 'MAILBOX_URL']) {
     const value = process.env[name];
     if (!value)
       throw new Error(`${name} is not set. Run "npm test -- integration", which starts what these tests need.`);

@@ -115,7 +115,7 @@ try {
   await installNodePackages(installation.say);
   await installDebianPackages(installation.say, { database: plan.wantsServices, browser: plan.wants('browser') });
   if (plan.wantsTests) await installTestPackages(installation.say);
-  await installation.prepare();
+  await installation.prepare({ services: plan.wantsServices });
   if (plan.wantsServices) await installation.startServices({ anew: true });
   // Two cores: what reads the sources runs beside the tests that mostly wait.
   const [built] = await Promise.all([readSources().then(() => plan.wants('browser') && build()), runVitest()]);

@@ -21,17 +21,19 @@ export class Installation {
     };
     this.children = new Map();
     this.stopping = false;
+    this.values = { NEXT_DIST_DIR: profile.distDir };
     this.state = { left: leftBy(readState(profile)), children: {} };
     tellOfSteps((pids) => this.note({ steps: pids.map(identityOf) }));
     this.note({ step: 'Starting' });
   }
 
-  /** Secrets, ports and the environment made of them. Starts nothing. */
-  async prepare() {
+  /** Secrets, ports and the environment made of them, where services are wanted. Starts nothing. */
+  async prepare({ services = true } = {}) {
     const { profile } = this;
+    await this.clearLeftovers();
+    if (!services) return;
     mkdirSync(profile.kept, { recursive: true, mode: profile.asRoot ? 0o711 : 0o700 });
     this.secrets = readSecrets(profile);
-    await this.clearLeftovers();
     this.ports = await choosePorts(profile);
     this.values = environmentOf(profile, this.ports, this.secrets);
     writeEnvFile(profile, this.values);
