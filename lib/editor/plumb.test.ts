@@ -48,7 +48,8 @@ describe('the plumb', () => {
       const reading = readPlumb(robot, ARM, plumbOnFloor(spot, settings), settings);
       const stored = tile.inverseConditionNumber[column];
       if (Number.isNaN(stored)) expect(reading.postures).toHaveLength(0);
-      else expect(reading.postures[0].inverseConditionNumber).toBeCloseTo(stored, 5);
+      // A map may be made from a radial profile, which is within 0.003 of the spot itself (measured, with the kernel).
+      else expect(Math.abs((reading.postures[0].inverseConditionNumber ?? NaN) - stored)).toBeLessThan(0.003);
     }
   });
 
@@ -112,7 +113,7 @@ describe('the plumb', () => {
       const [best] = readPlumb(robot, ARM, spot, settings).postures;
       const cut = value[row * columns + column];
       if (!best) expect(cut).toBeNaN();
-      else expect(cut).toBeCloseTo(best.inverseConditionNumber ?? NaN, 4);
+      else expect(Math.abs(cut - (best.inverseConditionNumber ?? NaN))).toBeLessThan(0.003);
     }
   });
 });

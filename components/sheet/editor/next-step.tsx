@@ -14,8 +14,8 @@ export function NextStep() {
   const items = useBoardSheet((state) => state.items);
   const toolName = useBoardSheet((state) => state.tool.name);
   const { placeAtOnce } = usePlace();
-  const plans = data?.floorPlans ?? [];
-  if (toolName !== 'select' || items.size > 0) return null;
+  if (!data || toolName !== 'select' || items.size > 0) return null;
+  const plans = data.floorPlans;
 
   if (floorPlan && !floorPlan.calibration) {
     return (

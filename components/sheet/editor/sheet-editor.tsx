@@ -62,7 +62,9 @@ function OnBoard({ opened, projectId }: { readonly opened: LayoutOnBoard; readon
       projectId,
       view,
       typeValues,
-      libraryArms: library.filter(({ latest }) => latest).sort((one, other) => one.name.localeCompare(other.name)),
+      libraryArms: library
+        .filter(({ latest, archivedAt }) => latest && !archivedAt)
+        .sort((one, other) => one.name.localeCompare(other.name)),
       arms: new Map([...opened.layout.arms, ...library].map((arm) => [arm.id, arm])),
     };
   }, [opened, projectId, view, data]);

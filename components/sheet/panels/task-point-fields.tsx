@@ -34,7 +34,7 @@ export function TaskPointFields({ fixture }: { readonly fixture: Fixture }) {
         </Button>
       </div>
       {points.length === 0 && <p className="text-sm text-ink-soft">None yet. Add one, or place it with the tool.</p>}
-      <ol className="border-t border-hair">
+      <ol className={points.length > 0 ? 'border-t border-hair' : undefined}>
         {points.map((point) => (
           <li key={point.id} className="border-b border-hair">
             <button
