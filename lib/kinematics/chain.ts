@@ -20,6 +20,8 @@ export interface Chain {
   /** Limits of the chain joints. */
   readonly jointMin: Float64Array;
   readonly jointMax: Float64Array;
+  /** 1 for actuators of which a whole turn leaves the chain standing as it stood. */
+  readonly wholeTurns: Uint8Array;
   /** Limits, speeds and accelerations of the actuators. */
   readonly min: Float64Array;
   readonly max: Float64Array;
@@ -46,11 +48,20 @@ export function compileChain(arm: Arm): Chain {
     coupling: arm.coupling ? Float64Array.from(arm.coupling.flat()) : null,
     jointMin: numbers(joints, (joint) => joint.min),
     jointMax: numbers(joints, (joint) => joint.max),
+    wholeTurns: Uint8Array.from(driven, (_, k) => (turnsWholly(arm, k) ? 1 : 0)),
     min: numbers(driven, (row) => row.min),
     max: numbers(driven, (row) => row.max),
     maxSpeed: numbers(driven, (row) => row.maxSpeed),
     maxAcceleration: numbers(driven, (row) => row.maxAcceleration),
   };
+}
+
+function turnsWholly({ joints, coupling }: Arm, actuator: number): boolean {
+  if (!coupling) return joints[actuator].type === 'revolute';
+  return joints.every(({ type }, j) => {
+    const share = coupling[j][actuator];
+    return share === 0 || (type === 'revolute' && Number.isInteger(share));
+  });
 }
 
 /** A twist of 90° typed as π/2 has a cosine of 6e-17; it means a right angle, and zero keeps parallel axes parallel. */

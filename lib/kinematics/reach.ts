@@ -1,8 +1,9 @@
+import { isNearer, reachFamily } from './inverse/family';
+import { nearestToMiddle, posturesInside, worstMiss } from './inverse/turns';
+import { LIMIT_SLACK, limitShare, withinJointLimits } from './limits';
 import type { Solver } from './solver';
-import { posturesInside, missBy, nearestToMiddle } from './inverse/turns';
 import { hasFreeRoll, rolled, transformOfTarget } from './target';
 import { identityTransform, type Transform } from './transforms';
-import { LIMIT_SLACK } from './limits';
 import type { Reason, Target } from './types';
 
 /** A posture that reaches, and the class of branch that it belongs to ('' where the chain has no classes). */
@@ -26,74 +27,67 @@ export interface ReachAnswer {
 
 /** Rolls tried where the roll is free and matters. */
 export const ROLL_SAMPLES = 48;
+/** The same for redundant chains, which have a family of postures for each. */
+const FAMILY_ROLL_SAMPLES = 16;
 
-/** All postures that put the tool where the target says, or why there are none. */
-export function reach(solver: Solver, target: Target): ReachAnswer {
+/** What a posture is worth (more is better), for choosing along the family of a redundant chain. */
+export type Score = (posture: ArrayLike<number>) => number;
+
+/**
+ * All postures that put the tool where the target says, or why there are none. Of the endless postures of a redundant chain: even samples of its
+ * family, and of each class of branch the best by `score`, refined (without a score: the one with the most room to its limits).
+ */
+export function reach(solver: Solver, target: Target, score?: Score): ReachAnswer {
   const pose = transformOfTarget(target);
   const free = hasFreeRoll(target);
   if (!solver.closedForm) return reachNumerically(solver, pose, free);
-  if (!free) return reachPose(solver, pose, 0);
-  if (solver.toolOnLastAxis) return reachOnAxis(solver, pose);
-  return bestOf(
-    Array.from({ length: ROLL_SAMPLES }, (_, k) => {
-      const roll = (2 * Math.PI * k) / ROLL_SAMPLES;
-      return reachPose(solver, rolled(pose, roll, identityTransform()), roll);
-    }),
-  );
+  if (!free) return reachPose(solver, pose, 0, false, score);
+  if (solver.toolOnLastAxis) return reachPose(solver, pose, 0, true, score);
+  const samples = solver.closedForm.family ? FAMILY_ROLL_SAMPLES : ROLL_SAMPLES;
+  const answers = Array.from({ length: samples }, (_, k) => {
+    const roll = (2 * Math.PI * k) / samples;
+    const answer = reachPose(solver, rolled(pose, roll, identityTransform()), roll, false, score);
+    return solver.closedForm!.family ? bestOfEachClass(solver, answer, score) : answer;
+  });
+  return bestOf(answers);
 }
 
-function reachPose(solver: Solver, pose: Transform, roll: number): ReachAnswer {
-  const { chain, closedForm } = solver;
-  const branches = closedForm!.solve(solver.flangeOf(pose));
-  const n = chain.joints;
-  const postures: ReachingPosture[] = [];
-  let joint = -1;
-  let by = Infinity;
-  for (let b = 0; b < branches.count; b++) {
-    const values = branches.values.subarray(b * n, (b + 1) * n);
-    const branch = closedForm!.nameOf(branches.codes[b]);
-    for (const posture of posturesInside(chain, values)) postures.push({ posture, branch, roll });
-    const worst = worstMiss(solver, values);
-    if (worst.by < by) ({ joint, by } = worst);
-  }
-  if (postures.length > 0) return { reached: true, reason: 'reached', joint: -1, by: 0, postures };
-  if (branches.count > 0) return { reached: false, reason: 'joint limit', joint, by, postures };
-  const reason = branches.shortfall === 'none' ? 'not found' : branches.shortfall;
-  return { reached: false, reason, joint: -1, by: branches.by, postures };
+/** `lastIsFree`: any value of the last joint will do, since it only rolls the tool, so it is laid in the middle of its range. */
+function reachPose(solver: Solver, pose: Transform, roll: number, lastIsFree: boolean, score?: Score): ReachAnswer {
+  const { family } = solver.closedForm!;
+  const flange = Float64Array.from(solver.flangeOf(pose));
+  const look = (parameter: number) => collect(solver, flange, parameter, roll, lastIsFree);
+  return family ? reachFamily(family, look, score ?? roomOf(solver)) : look(0);
 }
 
-/** The joint that misses its limits by most in one posture. */
-function worstMiss({ chain }: Solver, values: ArrayLike<number>): { joint: number; by: number } {
-  let joint = -1;
-  let by = 0;
-  for (let i = 0; i < chain.joints; i++) {
-    const miss = missBy(chain, i, values[i]);
-    if (miss > by) {
-      by = miss;
-      joint = i;
-    }
-  }
-  return { joint, by };
-}
+const roomOf =
+  ({ chain }: Solver): Score =>
+  (posture) =>
+    limitShare(chain, posture);
 
-/** A free roll about the last axis: any value of the last joint will do, so it is laid in the middle of its range. */
-function reachOnAxis(solver: Solver, pose: Transform): ReachAnswer {
-  const { chain, closedForm } = solver;
-  const last = chain.joints - 1;
+const miss = new Float64Array(2);
+
+/** Every branch of one flange pose, at one place of the family where the chain has one. */
+function collect(solver: Solver, flange: Transform, parameter: number, roll: number, lastIsFree: boolean): ReachAnswer {
+  const { chain } = solver;
+  const closedForm = solver.closedForm!;
+  const n = chain.actuators;
+  const last = n - 1;
   const middle = (chain.min[last] + chain.max[last]) / 2;
-  const branches = closedForm!.solve(solver.flangeOf(pose));
+  const branches = closedForm.solve(flange, parameter);
   const postures: ReachingPosture[] = [];
   let joint = -1;
   let by = Infinity;
   for (let b = 0; b < branches.count; b++) {
-    const values = Array.from(branches.values.subarray(b * chain.joints, (b + 1) * chain.joints));
-    const roll = middle - values[last];
-    values[last] = middle;
-    const branch = closedForm!.nameOf(branches.codes[b]);
+    const values = branches.values.slice(b * n, (b + 1) * n);
+    const turn = lastIsFree ? middle - values[last] : 0;
+    if (lastIsFree) values[last] = middle;
+    const branch = closedForm.nameOf(branches.codes[b]);
     for (const posture of posturesInside(chain, values))
-      if (Math.abs(posture[last] - middle) < LIMIT_SLACK) postures.push({ posture, branch, roll });
-    const worst = worstMiss(solver, values);
-    if (worst.by < by) ({ joint, by } = worst);
+      if (!lastIsFree || Math.abs(posture[last] - middle) < LIMIT_SLACK)
+        postures.push({ posture, branch, roll: roll + turn });
+    worstMiss(chain, values, 0, miss);
+    if (miss[1] < by) [joint, by] = miss;
   }
   if (postures.length > 0) return { reached: true, reason: 'reached', joint: -1, by: 0, postures };
   if (branches.count > 0) return { reached: false, reason: 'joint limit', joint, by, postures };
@@ -101,24 +95,20 @@ function reachOnAxis(solver: Solver, pose: Transform): ReachAnswer {
   return { reached: false, reason, joint: -1, by: branches.by, postures };
 }
 
-/** Which refusal comes nearest to an answer, so that it is the one to tell. */
-const NEARNESS: readonly Reason[] = [
-  'joint limit',
-  'direction',
-  'too near',
-  'too far',
-  'not found',
-  'obstacle',
-  'reached',
-];
+function bestOfEachClass(solver: Solver, answer: ReachAnswer, score: Score = roomOf(solver)): ReachAnswer {
+  const best = new Map<string, { posture: ReachingPosture; worth: number }>();
+  for (const posture of answer.postures) {
+    const worth = score(posture.posture);
+    const known = best.get(posture.branch);
+    if (!known || worth > known.worth) best.set(posture.branch, { posture, worth });
+  }
+  return { ...answer, postures: Array.from(best.values(), ({ posture }) => posture) };
+}
 
 function bestOf(answers: ReachAnswer[]): ReachAnswer {
   const postures = withoutTwins(answers.flatMap((answer) => answer.postures));
   if (postures.length > 0) return { reached: true, reason: 'reached', joint: -1, by: 0, postures };
-  return answers.reduce((best, answer) => {
-    const order = NEARNESS.indexOf(answer.reason) - NEARNESS.indexOf(best.reason);
-    return order < 0 || (order === 0 && answer.by < best.by) ? answer : best;
-  });
+  return answers.reduce((best, answer) => (isNearer(answer, best) ? answer : best));
 }
 
 /** Arms that take no roll answer every roll with the same postures. */
@@ -140,10 +130,10 @@ function reachNumerically(solver: Solver, pose: Transform, freeRoll: boolean): R
 /** The copy of a closed-form posture that maps show: every joint as near to the middle of its range as whole turns allow. */
 export function middleCopy(solver: Solver, values: Float64Array, at: number, out: Float64Array): boolean {
   const { chain } = solver;
-  for (let i = 0; i < chain.joints; i++) {
+  for (let i = 0; i < chain.actuators; i++) {
     const value = nearestToMiddle(chain, i, values[at + i]);
     if (value < chain.min[i] - LIMIT_SLACK || value > chain.max[i] + LIMIT_SLACK) return false;
     out[i] = value;
   }
-  return true;
+  return withinJointLimits(chain, out);
 }

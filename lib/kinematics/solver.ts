@@ -1,14 +1,37 @@
 import { compileChain, forward, jacobian, makeStance, type Chain, type Stance } from './chain';
 import { controlledFreedoms, rowsToMatch } from './freedoms';
 import type { ClosedForm } from './inverse/closed-form';
+import { gantrySolver } from './inverse/gantry';
 import { makeNumericalSolver, type NumericalSolver } from './inverse/numerical';
+import { palletiserSolver } from './inverse/palletiser';
 import { parallelAxesSolver } from './inverse/parallel-axes';
+import { sevenAxisSolver } from './inverse/seven-axis';
 import { sphericalWristSolver } from './inverse/spherical-wrist';
+import { trackSolver } from './inverse/track';
 import { identityTransform, invertTransform, multiplyTransforms, type Transform } from './transforms';
 import type { Arm } from './types';
 
 /** How a chain is solved, in words for people. */
-export type SolutionMethod = 'spherical wrist' | 'parallel axes' | 'numerical';
+export type SolutionMethod =
+  'spherical wrist' | 'parallel axes' | 'palletiser' | 'gantry' | 'arm angle' | 'track' | 'numerical';
+
+/** Every closed form that the kernel knows, tried in this order: each recognises its own kind of chain. */
+const CLOSED_FORMS: readonly (readonly [SolutionMethod, (chain: Chain) => ClosedForm | null])[] = [
+  ['spherical wrist', sphericalWristSolver],
+  ['parallel axes', parallelAxesSolver],
+  ['palletiser', palletiserSolver],
+  ['gantry', gantrySolver],
+  ['arm angle', sevenAxisSolver],
+  ['track', trackSolver],
+];
+
+function closedFormOf(chain: Chain): { method: SolutionMethod; closedForm: ClosedForm | null } {
+  for (const [method, recognise] of CLOSED_FORMS) {
+    const closedForm = recognise(chain);
+    if (closedForm) return { method, closedForm };
+  }
+  return { method: 'numerical', closedForm: null };
+}
 
 /** An arm made ready: its chain, what it controls, how it is solved, and scratch space shared by one user at a time. */
 export interface Solver {
@@ -30,8 +53,7 @@ export interface Solver {
 
 export function makeSolver(arm: Arm): Solver {
   const chain = compileChain(arm);
-  const spherical = sphericalWristSolver(chain);
-  const closedForm = spherical ?? parallelAxesSolver(chain);
+  const { method, closedForm } = closedFormOf(chain);
   const fromBase = invertTransform(chain.base, identityTransform());
   const fromTool = invertTransform(chain.tool, identityTransform());
   const flange = identityTransform();
@@ -41,7 +63,7 @@ export function makeSolver(arm: Arm): Solver {
   return {
     chain,
     freedoms,
-    method: spherical ? 'spherical wrist' : closedForm ? 'parallel axes' : 'numerical',
+    method,
     closedForm,
     solveNumerically: makeNumericalSolver(chain, rowsToMatch(arm, chain, freedoms)),
     toolOnLastAxis: toolOnLastAxis(chain),
@@ -57,11 +79,23 @@ const ON_AXIS = 1e-9;
 
 function toolOnLastAxis(chain: Chain): boolean {
   const last = chain.joints - 1;
-  if (chain.prismatic[last] || chain.coupling) return false;
+  if (chain.prismatic[last] || !drivenAlone(chain, last)) return false;
   const { axes, origins, tool } = forward(chain, new Float64Array(chain.actuators), makeStance(chain));
   const [x, y, z] = axes.subarray(3 * last, 3 * last + 3);
   const [dx, dy, dz] = [tool[3] - origins[3 * last], tool[7] - origins[3 * last + 1], tool[11] - origins[3 * last + 2]];
   const aside = Math.hypot(y * dz - z * dy, z * dx - x * dz, x * dy - y * dx);
   const tilted = Math.hypot(y * tool[10] - z * tool[6], z * tool[2] - x * tool[10], x * tool[6] - y * tool[2]);
   return aside < ON_AXIS && tilted < ON_AXIS;
+}
+
+/** The last actuator drives the last joint one to one and nothing else. */
+function drivenAlone({ coupling, joints, actuators }: Chain, last: number): boolean {
+  if (!coupling) return true;
+  for (let j = 0; j < joints; j++)
+    for (let k = 0; k < actuators; k++) {
+      const share = coupling[j * actuators + k];
+      if (j === last && k === actuators - 1 ? share !== 1 : (j === last || k === actuators - 1) && share !== 0)
+        return false;
+    }
+  return true;
 }

@@ -34,8 +34,11 @@ export function makeSpotReader(arm: Arm, wrist: WristMode): SpotReader {
   const scoreOf = (spot: SpotPosture) =>
     (wrist === 'held' ? spot.wristHeld : spot.wristFree).inverseConditionNumber ?? -1;
 
+  const gauge = wrist === 'held' ? held : free;
+  const worthOf = (posture: ArrayLike<number>) => gauge.readGains(solver.stand(posture)).inverseConditionNumber;
+
   return (target) => {
-    const { reached, reason, joint, by, postures } = reach(solver, target);
+    const { reached, reason, joint, by, postures } = reach(solver, target, worthOf);
     const read = postures
       .map(({ posture, branch }): SpotPosture => {
         const matrix = solver.stand(posture);

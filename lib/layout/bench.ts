@@ -1,6 +1,6 @@
 import { limitMargin } from '@/lib/kinematics/limits';
 import { makeGauge, type Gauge } from '@/lib/kinematics/measures/gauge';
-import type { ReachAnswer, ReachingPosture } from '@/lib/kinematics/reach';
+import type { ReachAnswer, ReachingPosture, Score } from '@/lib/kinematics/reach';
 import { makeSolver, type Solver } from '@/lib/kinematics/solver';
 import type { Arm, LimitMargin, WristMode } from '@/lib/kinematics/types';
 import type { Robot } from './items';
@@ -17,6 +17,12 @@ export function makeBench(robot: Robot, arm: Arm, wrist: WristMode): Bench {
   const solver = makeSolver(armWithTool(arm, robot.tool));
   return { robot, solver, gauge: makeGauge(solver.chain, solver.freedoms, wrist) };
 }
+
+/** What a posture counts for where a redundant arm has a choice of them: its inverse condition number, as in the maps. */
+export const worthOn =
+  ({ solver, gauge }: Bench): Score =>
+  (posture) =>
+    gauge.readGains(solver.stand(posture)).inverseConditionNumber;
 
 /** One way to reach a point, with what it is worth. */
 export interface Candidate extends ReachingPosture {

@@ -5,6 +5,12 @@ import type { Arm, Freedom } from '@/lib/kinematics/types';
 const METHOD_WORDS: Record<SolutionMethod, string> = {
   'spherical wrist': 'Spherical wrist on a level base: solved in closed form, up to eight postures a point.',
   'parallel axes': 'Parallel axes with a quill: solved in closed form, up to two postures a point.',
+  palletiser: 'Palletiser with a level flange: solved in closed form, up to four postures a point.',
+  gantry: 'Three slides and a spherical wrist: solved in closed form, up to two postures a point.',
+  'arm angle':
+    'Seven axes: solved in closed form for each swing of the elbow, which is sampled and refined; up to eight postures a point and swing.',
+  track:
+    'Six axes on a slide: solved in closed form for each place of the slide, which is sampled and refined; up to eight postures a point and place.',
   numerical: 'No closed form is known for this chain: solved by iteration from several starts.',
 };
 

@@ -1,6 +1,6 @@
 import { reach, type ReachAnswer } from '@/lib/kinematics/reach';
 import type { Arm, WristMode } from '@/lib/kinematics/types';
-import { bestOf, candidatesOf, makeBench, type Bench } from './bench';
+import { bestOf, candidatesOf, makeBench, worthOn, type Bench } from './bench';
 import type { Item } from './items';
 import { floorTaskPoints, targetInBase, type FloorTaskPoint } from './task-points';
 import { bandOf, shortfallWords, singularWords, slowWords, type VerdictBand } from './verdict-words';
@@ -88,7 +88,7 @@ function betterOf(best: RobotVerdict, next: RobotVerdict): RobotVerdict {
 }
 
 function judge(bench: Bench, point: FloorTaskPoint): RobotVerdict {
-  const answer = reach(bench.solver, targetInBase(point, bench.robot));
+  const answer = reach(bench.solver, targetInBase(point, bench.robot), worthOn(bench));
   const wanted = point.point.speedMmS;
   const candidates = candidatesOf(bench, answer);
   if (candidates.length === 0) return refused(bench, answer);

@@ -3,7 +3,7 @@ import type { Transform } from '../transforms';
 /** Postures that put the flange on a pose, before limits and modulo 2π; the next call overwrites them. */
 export interface Branches {
   count: number;
-  /** Posture b at b × joints. */
+  /** Posture b at b × actuators. */
   readonly values: Float64Array;
   /** Class of posture b; what the number means is told by `ClosedForm.nameOf`. */
   readonly codes: Uint8Array;
@@ -12,18 +12,36 @@ export interface Branches {
   by: number;
 }
 
+/**
+ * What a redundant chain leaves free once its flange is placed: one number, such as where a track stands or how far the elbow is swung
+ * about the line from shoulder to wrist. For each value of it the chain has branches as others have.
+ */
+export interface Family {
+  readonly from: number;
+  readonly to: number;
+  /** The end is the beginning again. */
+  readonly closed: boolean;
+  /** Even samples that find the ranges of a common arm; the best of them are refined. */
+  readonly samples: number;
+}
+
 /** A chain solved in closed form. Poses are of the flange in the frame of the chain's base. */
 export interface ClosedForm {
   readonly branches: Branches;
   readonly classes: number;
-  solve(flange: Transform): Branches;
+  /** Null where the flange leaves nothing free. */
+  readonly family: Family | null;
+  /** `parameter` is of the family, where there is one. */
+  solve(flange: Transform, parameter?: number): Branches;
   nameOf(code: number): string;
+  /** Classes of one shape hold the axes on the same lines, so their measures are equal. */
+  shapeOf(code: number): number;
 }
 
-export function makeBranches(capacity: number, joints: number): Branches {
+export function makeBranches(capacity: number, actuators: number): Branches {
   return {
     count: 0,
-    values: new Float64Array(capacity * joints),
+    values: new Float64Array(capacity * actuators),
     codes: new Uint8Array(capacity),
     shortfall: 'none',
     by: 0,

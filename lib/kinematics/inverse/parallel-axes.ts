@@ -2,7 +2,7 @@ import { forward, makeStance, type Chain } from '../chain';
 import { identityTransform, type Transform } from '../transforms';
 import { elbowAngle, makeBranches, type Branches, type ClosedForm } from './closed-form';
 import { cross, dot, length, minus, type Triple } from './lines';
-import { wrapped } from './spherical-wrist';
+import { wrapped } from './wrapped';
 
 /**
  * Two or three turning joints about parallel axes, with or without one stroke along them: SCARA and planar arms, in any order of the
@@ -105,8 +105,10 @@ export function parallelAxesSolver(chain: Chain): ClosedForm | null {
   return {
     branches,
     classes: 2,
+    family: null,
     solve,
     // Seen along the first axis: an elbow that bends counter-clockwise leaves the elbow to the right of the line to the tool.
     nameOf: (code) => (code === 0 ? 'elbow right' : 'elbow left'),
+    shapeOf: (code) => code,
   };
 }

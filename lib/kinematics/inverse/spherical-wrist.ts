@@ -2,6 +2,7 @@ import { forward, makeStance, type Chain } from '../chain';
 import { identityTransform, type Transform } from '../transforms';
 import { elbowAngle, makeBranches, type Branches, type ClosedForm } from './closed-form';
 import { along, cross, distanceToLine, dot, length, minus, nearestOnFirst, type Triple } from './lines';
+import { wrapped } from './wrapped';
 
 /**
  * Six turning joints with a spherical wrist on an ortho-parallel base (axis 2 at right angles to axis 1, axis 3 parallel to axis
@@ -235,7 +236,7 @@ function makeSolver(g: Geometry): ClosedForm {
     codes[branches.count++] = code;
   }
 
-  return { branches, classes: 8, solve, nameOf };
+  return { branches, classes: 8, family: null, solve, nameOf, shapeOf: (code) => code & ~WRIST_FLIPPED };
 }
 
 function nameOf(code: number): string {
@@ -243,9 +244,4 @@ function nameOf(code: number): string {
   const elbow = code & ELBOW_DOWN ? 'elbow down' : 'elbow up';
   const wrist = code & WRIST_FLIPPED ? 'wrist flipped' : 'wrist plain';
   return `${shoulder}, ${elbow}, ${wrist}`;
-}
-
-/** The same angle within −π … π. */
-export function wrapped(angle: number): number {
-  return angle - 2 * Math.PI * Math.round(angle / (2 * Math.PI));
 }

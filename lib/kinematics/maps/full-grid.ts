@@ -4,6 +4,7 @@ import { orient } from '../target';
 import { identityTransform, type Transform } from '../transforms';
 import type { MapRequest, Vec3 } from '../types';
 import { emptyCell, resetCell, type Cell } from './cell';
+import { makeFamilyJudge } from './family-judge';
 import { makeNumericalJudge, makeReferenceJudge } from './reference-judge';
 import { makeRollSearch, type Judge } from './roll-search';
 import { makeSixAxisJudge } from './six-axis-judge';
@@ -31,9 +32,11 @@ export function makeFullGrid(solver: Solver, request: MapRequest, wanted: number
   const searches = freeRoll && solver.closedForm !== null && !lastIsFree;
   const outward = direction.kind === 'outward';
   const gauge = makeGauge(solver.chain, solver.freedoms, request.wrist);
-  const general = solver.closedForm
-    ? makeReferenceJudge(solver, gauge, wanted, lastIsFree, cell)
-    : makeNumericalJudge(solver, gauge, freeRoll, cell);
+  const general = !solver.closedForm
+    ? makeNumericalJudge(solver, gauge, freeRoll, cell)
+    : solver.closedForm.family
+      ? makeFamilyJudge(solver, gauge, wanted, lastIsFree, searches, cell)
+      : makeReferenceJudge(solver, gauge, wanted, lastIsFree, cell);
   const six =
     quick && solver.method === 'spherical wrist' && solver.freedoms.length === 6
       ? makeSixAxisJudge(solver.chain, request.wrist, wanted, lastIsFree, outward || searches, cell)

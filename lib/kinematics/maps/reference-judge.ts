@@ -21,7 +21,7 @@ export function makeReferenceJudge(
   const n = chain.actuators;
   const posture = new Float64Array(chain.actuators);
   return (target) => {
-    const branches = closedForm!.solve(solver.flangeOf(target), 0);
+    const branches = closedForm!.solve(solver.flangeOf(target));
     if (branches.count === 0 && branches.shortfall !== 'none') note(cell, CODE[branches.shortfall], 0, branches.by);
     for (let b = 0; b < branches.count; b++) {
       if (wanted >= 0 && branches.codes[b] !== wanted) continue;

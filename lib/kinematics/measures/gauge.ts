@@ -38,6 +38,8 @@ export interface Gauge {
   readonly reading: Reading;
   /** `jacobian`: 6 × actuators, row after row, unscaled. */
   read(jacobian: Float64Array): Reading;
+  /** The gains and the inverse condition number alone, for choosing among many postures; the other fields keep what they were. */
+  readGains(jacobian: Float64Array): Reading;
   /** The velocity set of the posture last read, and its corners (one of each ± pair) as m numbers each. */
   velocitySet(): VelocitySet;
   corners(): Float64Array;
@@ -88,12 +90,17 @@ export function makeGauge(chain: Chain, freedoms: readonly number[], mode: Wrist
     measuredRows.forEach((row, index) => {
       for (let i = 0; i < n; i++) unscaled[index * n + i] = jacobian[row * n + i];
     });
+    readGains(jacobian);
+    readManipulability();
+    readSpeeds();
+    return reading;
+  }
+
+  function readGains(jacobian: Float64Array): Reading {
     for (let r = 0; r < m; r++)
       for (let i = 0; i < n; i++) linear[r * n + i] = jacobian[linearRows[r] * n + i] * chain.maxSpeed[i];
     current = heldRows.length === 0 ? freeSet() : heldSet(jacobian);
-    readGains();
-    readManipulability();
-    readSpeeds();
+    measureGains();
     return reading;
   }
 
@@ -118,7 +125,7 @@ export function makeGauge(chain: Chain, freedoms: readonly number[], mode: Wrist
     return box;
   }
 
-  function readGains() {
+  function measureGains() {
     const { map, coordinates: k } = current.set;
     for (let i = 0; i < m * k; i++) turned[i] = map[i];
     if (k === 0) reading.gains.fill(0);
@@ -178,6 +185,7 @@ export function makeGauge(chain: Chain, freedoms: readonly number[], mode: Wrist
     linearRows,
     reading,
     read,
+    readGains,
     speedAlong,
     velocitySet: () => current.set,
     corners: () => current.corners.points.subarray(0, current.cornerCount * m),

@@ -11,8 +11,13 @@ const SPOT_LIMIT = 1_000_000;
 const WORK_LIMIT = 30_000_000;
 const SECONDS_PER_WORK = 50e-6;
 
-/** Measured against a plain spot: a roll that has to be searched takes dozens of solutions, an arm without a closed form iterates. */
+/**
+ * Measured against a plain spot: a roll that has to be searched takes dozens of solutions, and so do the postures of a redundant arm; an arm without
+ * a closed form iterates.
+ */
 const SEARCHED_ROLL_WORK = 80;
+const FAMILY_WORK = 8;
+const SEARCHED_FAMILY_WORK = 100;
 const NUMERICAL_WORK = 800;
 
 interface Question {
@@ -23,7 +28,9 @@ interface Question {
 function workPerSpot({ arm, request }: Question): number {
   const { closedForm, toolOnLastAxis } = makeSolver(arm);
   if (!closedForm) return NUMERICAL_WORK;
-  return request.roll === 'free' && !toolOnLastAxis ? SEARCHED_ROLL_WORK : 1;
+  const searches = request.roll === 'free' && !toolOnLastAxis;
+  if (closedForm.family) return searches ? SEARCHED_FAMILY_WORK : FAMILY_WORK;
+  return searches ? SEARCHED_ROLL_WORK : 1;
 }
 
 /** Spots that a map of this arm may have. */

@@ -1,0 +1,4 @@
+/** The same angle within −π … π. */
+export function wrapped(angle: number): number {
+  return angle - 2 * Math.PI * Math.round(angle / (2 * Math.PI));
+}
