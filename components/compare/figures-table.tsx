@@ -1,7 +1,7 @@
 import { classNames } from '@/components/ui/class-names';
 import { DataCell, DataRow, DataTable, HeadCell } from '@/components/ui/data-table';
 import { formatFigure } from '@/components/ui/figure';
-import { verdictOf, type ComparedFigure } from '@/lib/layout/compared-figures';
+import { changeOf, verdictOf, type ComparedFigure } from '@/lib/layout/compared-figures';
 
 interface FiguresTableProps {
   readonly figures: readonly ComparedFigure[];
@@ -48,7 +48,7 @@ function FigureRow({ figure }: { readonly figure: ComparedFigure }) {
   const verdict = verdictOf(figure);
   const figureText = (value: number | null, of: number | undefined) =>
     `${formatFigure(value, { decimals })}${of === undefined ? '' : ` of ${of}`}`;
-  const change = left === null || right === null ? null : right - left;
+  const change = changeOf(figure);
   return (
     <DataRow>
       <th scope="row" className="h-7.5 px-3 py-0.5 pl-3.5 text-left font-normal">

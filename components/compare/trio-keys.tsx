@@ -2,7 +2,7 @@ import { ScaleBar } from '@/components/sheet/map-key/scale-bar';
 import { formatFigure } from '@/components/ui/figure';
 import type { MapMeasure } from '@/lib/layout/map-settings';
 import { MEASURE_WORDS, measureText } from '@/lib/layout/measure-words';
-import { DIVERGING_STOPS, type MapScale, type ValueRange } from '@/lib/layout/scales';
+import { divergingColour, type MapScale, type ValueRange } from '@/lib/layout/scales';
 import type { Comparison } from './use-comparison';
 
 interface ScaleKeyProps {
@@ -45,19 +45,22 @@ export function DifferenceKey({ comparison }: { readonly comparison: Comparison 
   );
 }
 
+const STEPS = 21;
+const SHARES = Array.from({ length: STEPS }, (_, step) => (2 * step) / (STEPS - 1) - 1);
+
 function DivergingBar() {
   // Both boards are drawn; the stylesheet shows the one that is in use.
   return (['day', 'night'] as const).map((board) => (
     <svg
       key={board}
-      viewBox={`0 0 ${DIVERGING_STOPS[board].length} 1`}
+      viewBox={`0 0 ${STEPS} 1`}
       preserveAspectRatio="none"
       shapeRendering="crispEdges"
       aria-hidden
       className={`h-2.5 min-w-10 flex-1 ${board === 'day' ? 'dark:hidden' : 'hidden dark:block'}`}
     >
-      {DIVERGING_STOPS[board].map((colour, index) => (
-        <rect key={colour} x={index} width="1.02" height="1" fill={colour} />
+      {SHARES.map((share, step) => (
+        <rect key={share} x={step} width="1.02" height="1" fill={divergingColour(share, board)} />
       ))}
     </svg>
   ));

@@ -20,13 +20,23 @@ interface RemarkFormProps {
   readonly onSend: (body: string, guest: Guest | null) => Promise<void>;
   readonly onCancel?: () => void;
   readonly rows?: number;
+  /** For those who came here by the keyboard; on a phone it would throw the screen keyboard over the drawing. */
+  readonly takesFocus?: boolean;
 }
 
 const memberForm = replyRequestSchema;
 const guestForm = z.object({ body: replyRequestSchema.shape.body, guest: guestSchema });
 
 /** What somebody wants to say; a guest also says who they are, once a browser. */
-export function RemarkForm({ label, sendLabel, asGuest, onSend, onCancel, rows = 3 }: RemarkFormProps) {
+export function RemarkForm({
+  label,
+  sendLabel,
+  asGuest,
+  onSend,
+  onCancel,
+  rows = 3,
+  takesFocus = false,
+}: RemarkFormProps) {
   const { guest, keepGuest } = useGuest();
   const form = useForm<{ body: string; guest?: Guest }>({
     resolver: zodResolver(asGuest ? guestForm : memberForm),
@@ -48,7 +58,7 @@ export function RemarkForm({ label, sendLabel, asGuest, onSend, onCancel, rows =
     <form onSubmit={send} noValidate className="grid gap-2.5">
       {errors.root && <Notice tone="trouble">{errors.root.message}</Notice>}
       <Field label={label} error={errors.body?.message} required>
-        <TextArea {...form.register('body')} rows={rows} maxLength={4000} />
+        <TextArea {...form.register('body')} rows={rows} maxLength={4000} autoFocus={takesFocus} />
       </Field>
       {asGuest && !known && (
         <div className="grid gap-2.5 sm:grid-cols-2">

@@ -63,6 +63,7 @@ export function Review({ subject }: { readonly subject: ReviewSubject }) {
             <RemarkForm
               label="Your remark"
               sendLabel="Pin the remark"
+              takesFocus={spot.itemId !== null}
               asGuest={asGuest}
               onSend={async (body, guest) => {
                 await review.pin({ ...spot, body }, guest);

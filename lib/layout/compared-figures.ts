@@ -97,10 +97,15 @@ export function comparedFigures(
   ];
 }
 
-/** Whether right is better than left, as far as it would be written: what rounds to no change is none. */
-export function verdictOf({ left, right, better, decimals }: ComparedFigure): 'better' | 'worse' | 'none' {
-  if (left === null || right === null || better === 'neither') return 'none';
-  const change = Number((right - left).toFixed(decimals));
-  if (change === 0) return 'none';
-  return change > 0 === (better === 'more') ? 'better' : 'worse';
+/** Right less left as both are written, so that the table adds up; null where one has no such number. */
+export function changeOf({ left, right, decimals }: ComparedFigure): number | null {
+  if (left === null || right === null) return null;
+  return Number((Number(right.toFixed(decimals)) - Number(left.toFixed(decimals))).toFixed(decimals));
+}
+
+/** Whether right is better than left, as far as it is written: what rounds to no change is none. */
+export function verdictOf(figure: ComparedFigure): 'better' | 'worse' | 'none' {
+  const change = changeOf(figure);
+  if (change === null || change === 0 || figure.better === 'neither') return 'none';
+  return change > 0 === (figure.better === 'more') ? 'better' : 'worse';
 }

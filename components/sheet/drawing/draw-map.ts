@@ -8,7 +8,9 @@ import { letter, strokeInk, type Ink, type PointMm } from './ink';
 
 const HATCH_SPACING_PX = 7;
 const EDGE_SPACING_PX = 5;
-const EDGE_WIDTH_PX = 7;
+const EDGE_WIDTH_PX = 5;
+/** A pixel of more floor than this leaves no room for labels, mm. */
+const LARGEST_LABELLED_PX_MM = 10;
 /** Cells that are smaller than this on the screen are blended, larger ones stay cells. */
 const BLENDED_CELL_PX = 1.5;
 
@@ -39,12 +41,12 @@ export function drawHatched(ink: Ink, palette: Palette, px: number, area: Path2D
   const pattern = hatchPattern(ink, palette.sheet, px, HATCH_SPACING_PX);
   if (!pattern) return;
   ink.save();
+  ink.globalAlpha = 0.75;
   ink.fillStyle = pattern;
   ink.fill(area, 'evenodd');
   if (edge) {
     ink.strokeStyle = edge;
     ink.lineWidth = px;
-    ink.globalAlpha = 0.75;
     ink.stroke(area);
   }
   ink.restore();
@@ -66,13 +68,13 @@ export function drawHatchEdge(ink: Ink, palette: Palette, px: number, reached: P
   ink.save();
   ink.save();
   ink.clip(outside, 'evenodd');
-  ink.globalAlpha = 0.5;
+  ink.globalAlpha = 0.4;
   ink.lineJoin = 'round';
   ink.lineWidth = 2 * EDGE_WIDTH_PX * px;
   ink.strokeStyle = pattern;
   ink.stroke(reached);
   ink.restore();
-  ink.globalAlpha = 0.55;
+  ink.globalAlpha = 0.45;
   ink.lineWidth = px;
   ink.strokeStyle = palette.inkSoft;
   ink.stroke(reached);
@@ -104,6 +106,8 @@ export function drawIsoLines(ink: Ink, palette: Palette, px: number, isoLines: r
     strokeInk(ink, palette.ink, 0.8 * px);
     ink.globalAlpha = 1;
   }
+  // On a small drawing labels would cover more than they say.
+  if (px > LARGEST_LABELLED_PX_MM) return;
   // Two labels nearer than this would only cover one another.
   const least = 70 * px;
   const placed: PointMm[] = [];
