@@ -47,7 +47,10 @@ export function isoLines(map: ValueGrid, levels: readonly number[]): IsoLine[] {
 
 /** Outlines of the reached floor, halfway between reached and other cells: rings in floor mm, holes wound the other way. */
 export function reachOutline(map: ValueGrid): PointMm[][] {
-  return outlineOf(map.grid, Array.from(map.value, (value) => (Number.isNaN(value) ? -1 : 1)));
+  return outlineOf(
+    map.grid,
+    Array.from(map.value, (value) => (Number.isNaN(value) ? -1 : 1)),
+  );
 }
 
 /**
