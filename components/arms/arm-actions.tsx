@@ -33,7 +33,7 @@ export function ArmActions({ arm, children }: { arm: LibraryArm; children?: Reac
   return (
     <>
       {mayChange && (
-        <Button variant="quiet" onClick={() => setCopying(true)}>
+        <Button variant="quiet" className="max-sm:hidden" onClick={() => setCopying(true)}>
           Copy
         </Button>
       )}
@@ -45,6 +45,7 @@ export function ArmActions({ arm, children }: { arm: LibraryArm; children?: Reac
           </Button>
         }
       >
+        {mayChange && <MenuItem onSelect={() => setCopying(true)}>Copy this arm</MenuItem>}
         <MenuItem onSelect={() => downloadTable(arm)}>Export version {arm.version} as CSV</MenuItem>
         {mayChange && (
           <MenuItem danger={!isArchived} onSelect={() => void archive()}>

@@ -32,7 +32,7 @@ export function CouplingTables({ draft, problems, onChange }: CouplingTablesProp
               <VisuallyHidden>Joint</VisuallyHidden>
             </HeadCell>
             {coupling[0]?.map((_, actuator) => (
-              <HeadCell key={actuator} figures className="px-2">
+              <HeadCell key={actuator} figures className="px-2!">
                 A{actuator + 1}
               </HeadCell>
             ))}
@@ -67,7 +67,7 @@ export function CouplingTables({ draft, problems, onChange }: CouplingTablesProp
                 <VisuallyHidden>Actuator</VisuallyHidden>
               </HeadCell>
               {TRAVEL_COLUMNS.map(({ field, label }) => (
-                <HeadCell key={field} figures className="px-2">
+                <HeadCell key={field} figures className="px-2!">
                   {label}
                 </HeadCell>
               ))}

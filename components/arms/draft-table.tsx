@@ -57,9 +57,9 @@ export function DraftTable({ draft, problems, onChange }: DraftTableProps) {
             <HeadCell>
               <VisuallyHidden>Joint</VisuallyHidden>
             </HeadCell>
-            <HeadCell className="px-2">Kind</HeadCell>
+            <HeadCell className="px-2!">Kind</HeadCell>
             {JOINT_COLUMNS.map(({ field, label, name }) => (
-              <HeadCell key={field} figures abbr={name} className={label.length < 2 ? 'px-2 font-mono' : 'px-2'}>
+              <HeadCell key={field} figures abbr={name} className={label.length < 2 ? 'px-2! font-mono' : 'px-2!'}>
                 {label}
               </HeadCell>
             ))}

@@ -63,9 +63,7 @@ export function SectionDrawing({ study: { facts, map }, name }: SectionDrawingPr
           <g key={number}>
             <circle cx={x(xMm)} cy={y(zMm)} r="6" fill="var(--sheet)" stroke="var(--ink)" strokeWidth="1.6" />
             <text
-              x={x(xMm) + 10}
-              // Beside the arm, not on it: the first one's upper arm rises to its right.
-              y={y(zMm) + (index === 0 && posture.joints.length > 1 ? 13 : -9)}
+              {...besideJoint(index, posture.joints.length, x(xMm), y(zMm))}
               className="text-[12px] font-semibold"
               fill="var(--ink)"
               stroke="var(--sheet)"
@@ -80,6 +78,12 @@ export function SectionDrawing({ study: { facts, map }, name }: SectionDrawingPr
       </svg>
     </div>
   );
+}
+
+/** Beside the arm, not on it: the upper arm rises to the right of the first joint, the forearm falls to the right of the next. */
+function besideJoint(index: number, count: number, x: number, y: number) {
+  if (index === count - 1) return { x: x + 10, y: y - 9 };
+  return index === 0 ? { x: x + 10, y: y + 13 } : { x: x - 9, y: y - 8, textAnchor: 'end' as const };
 }
 
 function frameOf({ originXMm, originZMm, stepMm, columns, rows }: SectionGrid) {

@@ -45,7 +45,13 @@ export function useArmStudy(definition: ArmDefinition | null): ArmStudy {
   const [study, take] = useReducer(withSteps, NOTHING);
   const worker = useRef<Worker | null>(null);
   const number = useRef(0);
-  useEffect(() => () => worker.current?.terminate(), []);
+  useEffect(
+    () => () => {
+      worker.current?.terminate();
+      worker.current = null;
+    },
+    [],
+  );
   useEffect(() => {
     if (!definition) return;
     number.current += 1;

@@ -10,7 +10,8 @@ interface DataTableProps extends ComponentProps<'table'> {
 /** A ruled table that scrolls by itself where it is wider than its panel. */
 export function DataTable({ caption, className, children, ...rest }: DataTableProps) {
   return (
-    <div className="overflow-x-auto">
+    // Positioned, so that what is only read aloud scrolls with the table and does not widen the page.
+    <div className="relative overflow-x-auto">
       <table {...rest} className={classNames('w-full border-collapse text-left text-[0.9375rem]', className)}>
         <caption className="sr-only">{caption}</caption>
         {children}
