@@ -4,7 +4,7 @@
  *
  *   chain       an arm compiled to flat numbers; forward kinematics and Jacobian
  *   measures/   gains, velocity polytopes and what is read off them
- *   inverse/    closed forms and damped least squares
+ *   inverse/    closed forms, families of redundant chains, and damped least squares
  *   solver      an arm made ready to be asked;  reach: all postures of a target, or why there are none
  *   posture     one posture analysed;  spot: one spot with all its branches;  maps/: a grid of spots
  *   library/    the built-in arms
@@ -16,10 +16,18 @@ export { BUILT_IN_ARMS, type BuiltInArm } from './library';
 export { compileChain, forward, jacobian, makeStance, skeleton, type Chain, type Stance } from './chain';
 export { controlledFreedoms, FREEDOMS } from './freedoms';
 export { analysePosture, makePostureAnalyser, type PostureAnalyser } from './posture';
-export { limitMargin, withinLimits } from './limits';
+export { limitMargin, limitShare, withinLimits } from './limits';
 export { makeSolver, type SolutionMethod, type Solver } from './solver';
-export { reach, type ReachAnswer, type ReachingPosture } from './reach';
+export { reach, type ReachAnswer, type ReachingPosture, type Score } from './reach';
 export { makeSpotReader, readSpot, type SpotPosture, type SpotReading } from './spot';
+export { errorGain, worstErrorAlong, type ErrorFigures, type ErrorGain } from './measures/error-gain';
+export { makePoseConditioner, type PoseCondition, type PoseConditioner } from './measures/pose-condition';
+export {
+  principalDirections,
+  type PrincipalDirection,
+  type PrincipalDirections,
+} from './measures/principal-directions';
+export { spreadDirections, wristCoverage, type Directions, type WristCoverage } from './measures/wrist-coverage';
 export { velocityOutlines, type VelocityOutline, type VelocityOutlines } from './velocity-outline';
 export { computeMapTile, makeMapComputer, type MapComputer } from './maps/compute-tile';
 export { decodeMapTile, encodeMapTile, makeMapTile } from './maps/tile-codec';

@@ -1,5 +1,6 @@
 import type { Chain } from '../chain';
 import type { Measures, WristMode } from '../types';
+import { speedAlongFlat } from './flat-speed';
 import { nullSpace } from './null-space';
 import { singularValues } from './singular-values';
 import {
@@ -45,7 +46,7 @@ export interface Gauge {
   corners(): Float64Array;
   /**
    * Speed that the posture last read can make along a direction without sideways drift: the largest t with t·d in the velocity set (m/s).
-   * `direction` has an entry for each of `linearRows`, any length above zero. Answers 0 where the set is flat (sure speed 0).
+   * `direction` has an entry for each of `linearRows`, any length above zero. Exact for flat sets too, where most directions have none.
    */
   speedAlong(direction: ArrayLike<number>): number;
 }
@@ -167,7 +168,7 @@ export function makeGauge(chain: Chain, freedoms: readonly number[], mode: Wrist
   }
 
   function speedAlong(direction: ArrayLike<number>): number {
-    if (reading.sureSpeed === 0) return 0;
+    if (reading.sureSpeed === 0) return speedAlongFlat(current.set, direction);
     let size = 0;
     for (let r = 0; r < m; r++) size += direction[r] * direction[r];
     size = Math.sqrt(size);

@@ -10,12 +10,20 @@ const RIGHT_ANGLE = 1e-15;
 /**
  * Singular values of `count` vectors of length `length`, stored one after another in `vectors`, which is overwritten with the
  * turned vectors. Writes the lengths, largest first, to `values` and orders the vectors likewise. Needs no allocation.
+ * `turns`: where given, `count` vectors of length `count` that are turned along; from the unit matrix they come out as the directions that
+ * belong to the values (the left singular vectors of the matrix with `vectors` as rows), zero values included.
  */
-export function singularValues(vectors: Float64Array, count: number, length: number, values: Float64Array): void {
+export function singularValues(
+  vectors: Float64Array,
+  count: number,
+  length: number,
+  values: Float64Array,
+  turns?: Float64Array,
+): void {
   for (let sweep = 0; sweep < SWEEPS; sweep++) {
     let turned = false;
     for (let i = 0; i < count - 1; i++)
-      for (let j = i + 1; j < count; j++) if (rotatePair(vectors, i * length, j * length, length)) turned = true;
+      for (let j = i + 1; j < count; j++) if (rotatePair(vectors, i, j, length, turns, count)) turned = true;
     if (!turned) break;
   }
   for (let i = 0; i < count; i++) {
@@ -23,10 +31,19 @@ export function singularValues(vectors: Float64Array, count: number, length: num
     for (let k = 0; k < length; k++) sum += vectors[i * length + k] * vectors[i * length + k];
     values[i] = Math.sqrt(sum);
   }
-  order(vectors, count, length, values);
+  order(vectors, count, length, values, turns);
 }
 
-function rotatePair(vectors: Float64Array, p: number, q: number, length: number): boolean {
+function rotatePair(
+  vectors: Float64Array,
+  i: number,
+  j: number,
+  length: number,
+  turns: Float64Array | undefined,
+  count: number,
+): boolean {
+  const p = i * length;
+  const q = j * length;
   let alpha = 0;
   let beta = 0;
   let gamma = 0;
@@ -42,16 +59,21 @@ function rotatePair(vectors: Float64Array, p: number, q: number, length: number)
   const t = (zeta >= 0 ? 1 : -1) / (Math.abs(zeta) + Math.sqrt(1 + zeta * zeta));
   const c = 1 / Math.sqrt(1 + t * t);
   const s = c * t;
+  turnPair(vectors, p, q, length, c, s);
+  if (turns) turnPair(turns, i * count, j * count, count, c, s);
+  return true;
+}
+
+function turnPair(vectors: Float64Array, p: number, q: number, length: number, c: number, s: number) {
   for (let k = 0; k < length; k++) {
     const x = vectors[p + k];
     const y = vectors[q + k];
     vectors[p + k] = c * x - s * y;
     vectors[q + k] = s * x + c * y;
   }
-  return true;
 }
 
-function order(vectors: Float64Array, count: number, length: number, values: Float64Array) {
+function order(vectors: Float64Array, count: number, length: number, values: Float64Array, turns?: Float64Array) {
   for (let i = 0; i < count - 1; i++) {
     let largest = i;
     for (let j = i + 1; j < count; j++) if (values[j] > values[largest]) largest = j;
@@ -59,10 +81,15 @@ function order(vectors: Float64Array, count: number, length: number, values: Flo
     const value = values[i];
     values[i] = values[largest];
     values[largest] = value;
-    for (let k = 0; k < length; k++) {
-      const entry = vectors[i * length + k];
-      vectors[i * length + k] = vectors[largest * length + k];
-      vectors[largest * length + k] = entry;
-    }
+    swap(vectors, i * length, largest * length, length);
+    if (turns) swap(turns, i * count, largest * count, count);
+  }
+}
+
+function swap(vectors: Float64Array, p: number, q: number, length: number) {
+  for (let k = 0; k < length; k++) {
+    const entry = vectors[p + k];
+    vectors[p + k] = vectors[q + k];
+    vectors[q + k] = entry;
   }
 }
