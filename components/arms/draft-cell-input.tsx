@@ -35,9 +35,9 @@ export function DraftCellInput({ path, label, cell, invalid, onText, className }
       onFocus={(event) => event.target.select()}
       className={classNames(
         CELL_LOOK,
-        'px-2 text-right font-mono tabular-nums',
+        'border border-transparent px-[7px] text-right font-mono tabular-nums',
         invalid && 'font-semibold text-red',
-        invalid && cell.text === '' && 'bg-red/10',
+        invalid && cell.text === '' && 'border-red',
         className,
       )}
     />

@@ -40,7 +40,7 @@ export const DraftJointRow = memo(function DraftJointRow({
       <th scope="row" className={classNames('h-8 pl-3.5 text-left font-semibold', invalid && 'text-red')}>
         J{index + 1}
       </th>
-      <td className="w-20">
+      <td className="w-20 min-w-[4.5rem]">
         <select
           data-cell={path(GRID_FIELDS[0])}
           aria-label={`${label}, kind`}

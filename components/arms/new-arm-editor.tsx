@@ -87,13 +87,18 @@ export function NewArmEditor({ start, origin, isImported = false }: NewArmEditor
           </>
         }
       />
-      <ArmLayout study={study} name={draft.name} notice={fault && <Notice tone="trouble">{fault}</Notice>}>
+      <ArmLayout
+        study={study}
+        isWhole={checked.definition !== null}
+        name={draft.name}
+        notice={fault && <Notice tone="trouble">{fault}</Notice>}
+      >
         {origin}
-        <NamePanel draft={draft} problems={problems} onChange={change} className="-mb-px" />
         <JointsPanel draft={draft} problems={problems} onChange={change}>
           <RampFill draft={draft} onChange={change} />
         </JointsPanel>
-        <ChainPanel study={study} />
+        <NamePanel draft={draft} problems={problems} onChange={change} className="-mt-px" />
+        {study.facts && <ChainPanel study={study} />}
       </ArmLayout>
       <LeaveDialog open={guard.href !== null} onStay={guard.stay} onLeave={guard.leave} />
     </>

@@ -12,13 +12,20 @@ const MARKS_MM = [50, 100, 200, 250, 500, 1000, 2000, 5000, 10_000, 20_000];
 
 interface SectionDrawingProps {
   study: ArmStudy;
+  /** Whether there is a chain that can be drawn. */
+  isAwaited: boolean;
   /** Read aloud as what is drawn. */
   name: string;
 }
 
 /** The arm cut along its first axis, to scale: the map of the cut, upright lines, and the arm with its tool down. */
-export function SectionDrawing({ study: { facts, map }, name }: SectionDrawingProps) {
-  if (!facts) return <div className="aspect-square" aria-hidden />;
+export function SectionDrawing({ study: { facts, map }, isAwaited, name }: SectionDrawingProps) {
+  if (!facts)
+    return (
+      <p className="flex aspect-square items-center justify-center text-center text-ink-soft">
+        {isAwaited ? 'Drawing the arm' : 'The arm is drawn as soon as its table is complete.'}
+      </p>
+    );
   const { grid, posture, reachMm } = facts;
   const { left, bottom, widthMm, heightMm } = frameOf(grid);
   const unit = WIDTH / widthMm;

@@ -79,9 +79,12 @@ describe('a draft of an arm', () => {
     ]);
   });
 
-  it('draws a chain that has no name yet, and none that lacks a figure', () => {
+  it('draws a chain that has no name or ramp yet, and none that lacks another figure', () => {
     expect(checkDraft(setCell(sixAxis(), 'name', '')).definition).not.toBeNull();
     expect(checkDraft(setCell(sixAxis(), 'joints.0.a', '')).definition).toBeNull();
+    const withoutRamp = checkDraft(setCell(sixAxis(), 'joints.0.maxAcceleration', ''));
+    expect(withoutRamp).toMatchObject({ content: null, problems: [{ message: 'Joint 1: fill in ramp.' }] });
+    expect(withoutRamp.definition).not.toBeNull();
   });
 
   it('asks for everything that an empty table leaves open', () => {

@@ -12,7 +12,7 @@ export interface DraftProblem {
 export interface CheckedDraft {
   /** What can be saved; null while there are problems. */
   readonly content: ArmContent | null;
-  /** The chain, good enough to be drawn though its name is missing; null while it is not. */
+  /** The chain, good enough to be drawn though its name or ramps are missing; null while it is not. */
   readonly definition: ArmDefinition | null;
   readonly problems: readonly DraftProblem[];
 }
@@ -35,7 +35,9 @@ export function checkDraft(draft: ArmDraft): CheckedDraft {
         .filter(({ path }) => !isAbout(path, gone))
         .map(({ path, message }) => ({ paths: [path], message: named(path, message) }));
   const problems = [...missing, ...refused];
-  const chain = missing.length === 0 ? armSchema.safeParse(definition) : null;
+  // Nothing that is drawn depends on the ramps, which a URDF file leaves open.
+  const canBeDrawn = missing.every(({ paths }) => paths.every((path) => path.endsWith('.maxAcceleration')));
+  const chain = canBeDrawn ? armSchema.safeParse(definition) : null;
   return {
     content: problems.length === 0 && parsed.success ? parsed.data : null,
     definition: chain?.success ? chain.data : null,
