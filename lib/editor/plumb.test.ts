@@ -53,6 +53,15 @@ describe('the plumb', () => {
     }
   });
 
+  it('reads a palletiser, which has fewer actuators than joints', () => {
+    const palletiser = BUILT_IN_ARMS.find(({ slug }) => slug === 'palletiser-130kg')!.arm;
+    const [posture] = readPlumb(robot, palletiser, plumbOnFloor({ xMm: 5720, yMm: 3920 }, settings), settings).postures;
+    expect(posture.joints).toHaveLength(4);
+    // Two metres out, a minute of arc of the column alone is 0.58 mm (2000 mm × π / 180 / 60).
+    expect(posture.errorGainMm).toBeGreaterThan(0.58);
+    expect(posture.errorGainMm).toBeLessThan(5);
+  });
+
   it('says why a spot is out of reach', () => {
     const reading = readPlumb(robot, ARM, plumbOnFloor({ xMm: 9000, yMm: 3920 }, settings), settings);
     expect(reading.postures).toHaveLength(0);

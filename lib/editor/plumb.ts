@@ -1,7 +1,8 @@
 import { analysePosture } from '@/lib/kinematics/posture';
 import { makeSpotReader, type SpotPosture } from '@/lib/kinematics/spot';
-import type { Arm, MapDirection, Target, Vec3, WristMode } from '@/lib/kinematics/types';
+import type { Arm, Joint, MapDirection, Target, Vec3, WristMode } from '@/lib/kinematics/types';
 import { velocityOutlines } from '@/lib/kinematics/velocity-outline';
+import { actuatorType } from '@/lib/layout/arm-columns';
 import { turned } from '@/lib/layout/geometry';
 import type { Item, Robot } from '@/lib/layout/items';
 import { mapRequestOf, questionOfRobot } from '@/lib/layout/map-question';
@@ -117,7 +118,7 @@ function told(spot: SpotPosture, robot: Robot, arm: Arm, wrist: WristMode): Plum
     errorGainMm:
       worstErrorM(
         jacobian,
-        arm.joints.map(({ type }) => (type === 'revolute' ? ARC_MINUTE_RAD : 0)),
+        typesOfColumns(arm).map((type) => (type === 'revolute' ? ARC_MINUTE_RAD : 0)),
       ) * 1000,
     limit: {
       joint: joint + 1,
@@ -126,6 +127,12 @@ function told(spot: SpotPosture, robot: Robot, arm: Arm, wrist: WristMode): Plum
     bindingJoint: wrist === 'held' && spot.bindingJoint >= 0 ? spot.bindingJoint + 1 : null,
     skeletonMm: spot.skeleton.map(([x, y, z]) => baseToFloor(robot, [x * 1000, y * 1000, z * 1000])),
   };
+}
+
+/** Under a coupling the columns of the Jacobian are of the actuators, which may be fewer than the joints. */
+function typesOfColumns({ joints, coupling }: Arm): Joint['type'][] {
+  if (!coupling) return joints.map(({ type }) => type);
+  return coupling[0].map((_, actuator) => actuatorType(joints, coupling, actuator));
 }
 
 /** What the tool can do at the spot, as shapes on the floor about it: m/s along x and y of the floor. */
