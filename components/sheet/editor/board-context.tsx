@@ -11,6 +11,8 @@ export interface Board extends LayoutOnBoard {
   readonly projectId: string;
   /** The newest version of every arm in the library, by name. */
   readonly libraryArms: readonly LibraryArm[];
+  /** False until the library has been asked for. */
+  readonly isLibraryThere: boolean;
   /** Every arm that a robot of the sheet may name, older versions included. */
   readonly arms: ReadonlyMap<string, LibraryArm>;
   readonly view: ViewStore;

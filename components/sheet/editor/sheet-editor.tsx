@@ -62,6 +62,7 @@ function OnBoard({ opened, projectId }: { readonly opened: LayoutOnBoard; readon
       projectId,
       view,
       typeValues,
+      isLibraryThere: data !== undefined,
       libraryArms: library
         .filter(({ latest, archivedAt }) => latest && !archivedAt)
         .sort((one, other) => one.name.localeCompare(other.name)),

@@ -70,7 +70,7 @@ function ToolRow({ tool, label, shortcut }: (typeof PLACED)[number]) {
 }
 
 function RobotRow() {
-  const { libraryArms } = useBoard();
+  const { libraryArms, isLibraryThere } = useBoard();
   const inHand = useBoardSheet((state) => state.tool.name);
   const lastInput = useLastInput();
   const { take, placeAtOnce } = usePlace();
@@ -83,7 +83,9 @@ function RobotRow() {
           <Glyph tool="robot" />
           <span>
             Robot
-            <span className="block text-[0.8125rem] leading-4 text-ink-soft">{count} in the library</span>
+            <span className="block text-[0.8125rem] leading-4 text-ink-soft">
+              {isLibraryThere ? `${count} in the library` : 'opening the library'}
+            </span>
           </span>
         </button>
       }
@@ -97,7 +99,9 @@ function RobotRow() {
           </span>
         </MenuItem>
       ))}
-      {count === 0 && <MenuHeading>None yet. Add one on the page Arms.</MenuHeading>}
+      {count === 0 && (
+        <MenuHeading>{isLibraryThere ? 'None yet. Add one on the page Arms.' : 'Opening the library'}</MenuHeading>
+      )}
     </Menu>
   );
 }
