@@ -54,7 +54,8 @@ export function CalibrationDrawing({ floorPlan, picture, calibration, viewport, 
           );
         })}
         <Axes at={pictureToScreen(viewport, draft.originPx)} turnDeg={calibration.result?.rotationDeg ?? 0} />
-        {STEPS.flatMap(handlesOf).map((handle) => {
+        {/* The open step's points lie on top, where several share a corner. */}
+        {[...STEPS.filter((other) => other !== step), step].flatMap(handlesOf).map((handle) => {
           const screen = at(handle);
           if (!screen) return null;
           const isSelected = handle === selected;

@@ -53,7 +53,7 @@ export function CalibrationStage({ floorPlan, calibration, size }: CalibrationSt
     viewport,
     onViewportChange: setAsked,
     dragPans: true,
-    hits: (at: ScreenPoint) => grabbedHandle(draft, viewport, at) !== null,
+    hits: (at: ScreenPoint) => grabbedHandle(calibration, viewport, at) !== null,
     onPanTakesOver: () => undefined,
   });
   const pointing = usePointing({ container, viewport, calibration, gesture: panAndZoom.gesture });

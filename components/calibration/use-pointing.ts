@@ -56,7 +56,7 @@ export function usePointing({ container, viewport, calibration, gesture }: Point
         event.currentTarget.setPointerCapture(event.pointerId);
         const at = placeOf(event);
         pressedAt.current = at;
-        const handle = grabbedHandle(draft, viewport, at);
+        const handle = grabbedHandle(calibration, viewport, at);
         const start = handle && pointOf(draft, handle);
         if (!handle || !start) return;
         const there = pictureToScreen(viewport, start);
@@ -76,7 +76,7 @@ export function usePointing({ container, viewport, calibration, gesture }: Point
           return;
         }
         if (gesture.current === 'pan' || gesture.current === 'pinch') pressedAt.current = null;
-        setAim({ screen: at, point: screenToPicture(viewport, at), handle: grabbedHandle(draft, viewport, at) });
+        setAim({ screen: at, point: screenToPicture(viewport, at), handle: grabbedHandle(calibration, viewport, at) });
       },
       onPointerLeave: () => setAim(null),
     },
