@@ -9,8 +9,9 @@ export async function createProject(page: Page, name: string): Promise<void> {
     .getByRole('button', { name: /New project|Create the first project/ })
     .first()
     .click();
-  await page.getByLabel('Project').fill(name);
-  await page.getByLabel('Customer').fill('Quillfen Pumps');
+  const dialog = page.getByRole('dialog');
+  await dialog.getByRole('textbox', { name: 'Project' }).fill(name);
+  await dialog.getByRole('textbox', { name: 'Customer' }).fill('Quillfen Pumps');
   await page.getByRole('button', { name: 'Create project' }).click();
   await expect(page).toHaveURL(/\/projects\/[0-9a-f-]{36}/);
 }
@@ -40,7 +41,7 @@ export async function uploadPlan(page: Page, file: string): Promise<void> {
 
 export async function newVariant(page: Page, name: string): Promise<void> {
   await page.getByRole('button', { name: 'New variant' }).click();
-  await page.getByLabel('Name').fill(name);
+  await page.getByRole('dialog').getByRole('textbox', { name: 'Name' }).fill(name);
   await page.getByRole('button', { name: 'Create variant' }).click();
   await expect(page.locator('[data-canvas]')).toBeVisible({ timeout: 30_000 });
 }
