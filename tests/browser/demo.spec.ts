@@ -34,10 +34,7 @@ test('the customer with an account sees issued revisions of their own project, a
   await signIn(page, VIEWER);
   await openProject(page, DEMO_PROJECT);
   await expect(page.getByRole('button', { name: 'New variant' })).toHaveCount(0);
-  await page
-    .getByRole('link', { name: /^rev /i })
-    .first()
-    .click();
+  await page.getByRole('link', { name: /^rev /i }).first().click();
   await expect(page).toHaveURL(/\/revisions\//);
   await expect(page.getByText(/risk assessment/i).first()).toBeVisible();
 });
