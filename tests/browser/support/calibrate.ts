@@ -43,7 +43,8 @@ interface CalibrationPlan {
 }
 
 async function openStep(page: Page, title: string): Promise<void> {
-  const step = page.getByRole('button', { name: title });
+  // The step's own button starts with its number; its points' buttons name it too.
+  const step = page.getByRole('button', { name: new RegExp(`^\\d ${title}`) });
   if ((await step.getAttribute('aria-expanded')) !== 'true') await step.click();
 }
 
