@@ -19,6 +19,12 @@ export function ChainPanel({ study: { facts, fastestMPerS }, description, childr
           <>
             <p>{facts.chain.method}</p>
             <p>{facts.chain.controls}</p>
+            {facts.weighingLengthMm !== null && (
+              <p>
+                Best length to weigh turning against moving, as drawn:{' '}
+                <Figure value={facts.weighingLengthMm} unit="mm" />.
+              </p>
+            )}
             <p>
               Reach from the first axis: <Figure value={facts.reachMm} unit="mm" />.{' '}
               {fastestMPerS !== null && (

@@ -11,6 +11,8 @@ import { reachRadius } from './reach-radius';
 export type SectionPoint = readonly [xMm: number, zMm: number];
 
 export interface SectionPosture {
+  /** Actuator values (rad, m). */
+  readonly values: readonly number[];
   /** From the base along the joint axes to the tool point; points that fall together are given once. */
   readonly body: readonly SectionPoint[];
   /** Where each joint lies that moves within the cut, with its number counted from one. */
@@ -27,7 +29,10 @@ const SPOTS = [
 
 function workingPosture(arm: Arm, reachM: number): ArrayLike<number> {
   const solver = makeSolver(arm);
-  for (const [out, up] of SPOTS) {
+  // A quill works high above the floor: half its stroke down, beside its column.
+  const { topMm, bottomMm } = armHeightsMm(arm);
+  const middle = (topMm + bottomMm) / 2000 / reachM;
+  for (const [out, up] of [...SPOTS, [0.7, middle], [0.5, middle]]) {
     const position = [out * reachM, 0, up * reachM] as const;
     const answer = reach(solver, { position, direction: [0, 0, -1], roll: 'free' });
     const [first] = answer.postures;
@@ -44,12 +49,8 @@ const TOGETHER_MM = 1;
 /** The arm in a posture with the tool pointing down, or resting where it cannot point down. */
 export function sectionPosture(arm: Arm, reachMm: number): SectionPosture {
   const chain = compileChain(arm);
-  const {
-    origins,
-    axes,
-    tool,
-    joints: posture,
-  } = forward(chain, workingPosture(arm, reachMm / 1000), makeStance(chain));
+  const values = Array.from(workingPosture(arm, reachMm / 1000));
+  const { origins, axes, tool, joints: posture } = forward(chain, values, makeStance(chain));
   const body: SectionPoint[] = [[1000 * chain.base[3], 1000 * chain.base[11]]];
   const joints: { number: number; at: SectionPoint }[] = [];
   const add = (at: SectionPoint): void => {
@@ -67,7 +68,7 @@ export function sectionPosture(arm: Arm, reachMm: number): SectionPosture {
     if (isAcross && !chain.prismatic[joint]) joints.push({ number: joint + 1, at });
   }
   add([1000 * tool[3], 1000 * tool[11]]);
-  return { body, joints };
+  return { values, body, joints };
 }
 
 /** Rows and columns of a section map: `origin` is the centre of the first cell (lowest, left), all in mm. */

@@ -12,6 +12,9 @@ describe('studyArm', () => {
     if (facts.kind !== 'facts' || coarse.kind !== 'coarse') throw new Error(`${facts.kind}, ${coarse.kind} came first`);
     expect(facts.reachMm).toBeCloseTo(600, 3);
     expect(facts.chain.method).toMatch(/closed form/);
+    // Of the size of its links: between the quill's neighbourhood and the whole reach.
+    expect(facts.weighingLengthMm).toBeGreaterThan(30);
+    expect(facts.weighingLengthMm).toBeLessThan(600);
     expect(steps.filter(({ kind }) => kind === 'row')).toHaveLength(facts.grid.rows);
     expect(coarse.rows).toHaveLength(facts.grid.rows / 4);
     const done = steps.at(-1)!;
