@@ -22,31 +22,3 @@ export function makeLimitMargins({ pairs, windows, edges, turn3 }: BranchPairs, 
     out[1] = Math.min(both, -mid4 - fourEdge, mid5 - aside5);
   };
 }
-
-/**
- * By how much (rad) joints 2 to 5 of one flip miss their limits at worst, into out[0], and which of them (2 … 5, 0 for none) into out[1].
- */
-export function makeWorstMiss({ pairs, windows, turn3 }: BranchPairs, halfRanges: Float64Array, out: Float64Array) {
-  function miss(i: number, c: number, s: number) {
-    const wc = windows[2 * i];
-    const ws = windows[2 * i + 1];
-    const by = Math.atan2(Math.abs(s * wc - c * ws), c * wc + s * ws) - halfRanges[i];
-    if (by > out[0]) {
-      out[0] = by;
-      out[1] = i + 1;
-    }
-  }
-
-  return (pair: number, flipped: boolean) => {
-    const at = pair * PAIR;
-    const sign = flipped ? -1 : 1;
-    const ca = pairs[at + CA];
-    const sa = pairs[at + SA];
-    out[0] = 0;
-    out[1] = 0;
-    miss(1, ca, sa);
-    miss(2, ca * pairs[at + CB] + sa * pairs[at + SB], turn3 * pairs[at + S_ELBOW]);
-    miss(3, sign * pairs[at + C4], sign * pairs[at + S4]);
-    miss(4, pairs[at + C5], sign * pairs[at + S5]);
-  };
-}

@@ -39,7 +39,7 @@ export function makeFullGrid(solver: Solver, request: MapRequest, wanted: number
       : makeReferenceJudge(solver, gauge, wanted, lastIsFree, cell);
   const six =
     quick && solver.method === 'spherical wrist' && solver.freedoms.length === 6
-      ? makeSixAxisJudge(solver.chain, request.wrist, wanted, lastIsFree, outward || searches, cell)
+      ? makeSixAxisJudge(solver.chain, request.wrist, wanted, lastIsFree, outward || searches, searches, cell)
       : null;
 
   const visitBy = (judge: Judge): (() => boolean) => (searches ? makeRollSearch(pose, cell, judge) : () => judge(pose));

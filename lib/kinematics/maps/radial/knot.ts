@@ -1,6 +1,6 @@
 import { DOUBTFUL, C1, C4, FLIPPED, PAIR, PLAIN, SIXTH, TOO_FAR } from '../../fast/branch-pairs';
-import { makeLimitMargins, makeWorstMiss } from '../../fast/limit-margins';
-import { makeLimitShare } from '../../fast/limit-share';
+import { makeLimitMargins } from '../../fast/limit-margins';
+import { JOINT, makeLimitOffsets, MISS as MISSED, SHARE } from '../../fast/limit-offsets';
 import { ICN, makeSixAxisGauge, MAXIMUM_SPEED, SURE_SPEED } from '../../fast/six-axis-gauge';
 import { WRIST_FLIPPED } from '../../inverse/spherical-wrist';
 import { CLEARLY_BETTER, CODE } from '../cell';
@@ -55,10 +55,8 @@ export function makeKnotReader(symmetry: Symmetry): KnotReader {
   branches.orient(pose);
   const margins = new Float64Array(2);
   const readMargins = makeLimitMargins(branches, margins);
-  const miss = new Float64Array(2);
-  const readMiss = makeWorstMiss(branches, symmetry.halfRanges, miss);
-  const share = new Float64Array(1);
-  const readShare = makeLimitShare(branches, anyFirst, share, 1);
+  const offsets = makeLimitOffsets(branches, chain);
+  const { answers } = offsets;
   const asked = (code: number) => wanted < 0 || wanted === code;
 
   return (out, at) => {
@@ -114,13 +112,13 @@ export function makeKnotReader(symmetry: Symmetry): KnotReader {
       if (value <= out[side + VALUE] + CLEARLY_BETTER) return;
     }
     gauge.readSpeeds();
-    readShare(pair, !plainInside, true);
+    offsets.read(pair, !plainInside, 1, 5);
     out[side + STATUS] = INSIDE;
     out[side + CLASS] = plainInside ? plain : plain | WRIST_FLIPPED;
     out[side + VALUE] = value;
     out[side + MAXIMUM] = reading[MAXIMUM_SPEED];
     out[side + SURE] = reading[SURE_SPEED];
-    out[side + REST] = share[0];
+    out[side + REST] = answers[SHARE];
     out[side + MISS] = 0;
     if (lastIsFree) return;
     branches.fillSixth(pair);
@@ -133,11 +131,11 @@ export function makeKnotReader(symmetry: Symmetry): KnotReader {
 
   function noteMisses(pair: number, plain: boolean, flipped: boolean, out: Float64Array, side: number) {
     for (let flip = plain ? 0 : 1; flip < (flipped ? 2 : 1); flip++) {
-      readMiss(pair, flip === 1);
-      if (out[side + STATUS] === OUTSIDE && miss[0] >= out[side + MISS]) continue;
+      offsets.read(pair, flip === 1, 1, 5);
+      if (out[side + STATUS] === OUTSIDE && answers[MISSED] >= out[side + MISS]) continue;
       out[side + STATUS] = OUTSIDE;
-      out[side + MISS] = miss[0];
-      out[side + CLASS] = miss[1];
+      out[side + MISS] = answers[MISSED];
+      out[side + CLASS] = answers[JOINT];
     }
   }
 }
