@@ -4,6 +4,7 @@ import type { Transform } from '../transforms';
 import { axesOf, inFlange, meetingPoint, rotationFromZero } from './axes';
 import { makeBranches, type Branches, type ClosedForm } from './closed-form';
 import { makeThreeTurns } from './three-turns';
+import { placeInFlange } from './vectors';
 
 /** Three slides, square to each other or not, that carry a spherical wrist: the wrist centre gives the slides, the rest the wrist. */
 export function gantrySolver(chain: Chain): ClosedForm | null {
@@ -25,11 +26,8 @@ export function gantrySolver(chain: Chain): ClosedForm | null {
   const shift = new Float64Array(3);
 
   function solve(flange: Transform): Branches {
-    for (let row = 0; row < 3; row++) {
-      const at = 4 * row;
-      const reached = flange[at] * wrist[0] + flange[at + 1] * wrist[1] + flange[at + 2] * wrist[2] + flange[at + 3];
-      shift[row] = reached - centre![row];
-    }
+    placeInFlange(flange, wrist, shift);
+    for (let row = 0; row < 3; row++) shift[row] -= centre![row];
     rotationFromZero(flange, zero, rotation);
     branches.count = turns!.solve(rotation);
     for (let b = 0; b < branches.count; b++) {

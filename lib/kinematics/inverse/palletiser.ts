@@ -1,9 +1,10 @@
 import type { Chain } from '../chain';
 import { invertSmall } from '../measures/small-matrix';
 import type { Transform } from '../transforms';
-import { axesOf, inFlange } from './axes';
+import { axesOf, inFlange, rotationFromZero } from './axes';
 import { elbowAngle, makeBranches, type Branches, type ClosedForm } from './closed-form';
 import { cross, dot, length, minus, type Triple } from './lines';
+import { dotOf, placeInFlange } from './vectors';
 import { wrapped } from './wrapped';
 
 const SAME = 1e-9;
@@ -42,25 +43,25 @@ export function palletiserSolver(chain: Chain): ClosedForm | null {
   const axisInFlange = inFlange(zero, p[4]);
   const branches = makeBranches(4, 4);
   const q = new Float64Array(5);
+  const at = new Float64Array(3);
+  const turned = new Float64Array(9);
 
   function solve(flange: Transform): Branches {
     branches.count = 0;
     branches.shortfall = 'none';
     branches.by = 0;
     // relative = flange · zeroᵀ has to be a turn about the column's axis.
-    const yaw = turnAbout(flange, zero, z[0], out, z[1]);
+    rotationFromZero(flange, zero, turned);
+    const yaw = turnAbout(turned, z[0], out, z[1]);
     if (Number.isNaN(yaw)) {
       branches.shortfall = 'direction';
       return branches;
     }
-    const at: Triple = [0, 4, 8].map(
-      (row) =>
-        flange[row] * axisInFlange[0] +
-        flange[row + 1] * axisInFlange[1] +
-        flange[row + 2] * axisInFlange[2] +
-        flange[row + 3],
-    ) as Triple;
-    const [x, y, height] = inPlane(at);
+    placeInFlange(flange, axisInFlange, at);
+    for (let row = 0; row < 3; row++) at[row] -= p[0][row];
+    const x = dotOf(out, at);
+    const y = dotOf(z[1], at);
+    const height = dotOf(z[0], at);
     const square = x * x + y * y;
     if (square < lateral * lateral - 1e-13) {
       branches.shortfall = 'too near';
@@ -140,16 +141,17 @@ function inverseOf(chain: Chain): number[] | null {
   );
 }
 
-/** Angle by which target · zeroᵀ turns about `axis`; NaN where it is not a turn about it. `x`, `y`: two directions square to the axis. */
-function turnAbout(target: Transform, zero: Transform, axis: Triple, x: Triple, y: Triple): number {
-  const turned = (v: Triple): Triple => {
-    const inZero = [0, 1, 2].map((c) => zero[c] * v[0] + zero[4 + c] * v[1] + zero[8 + c] * v[2]);
-    return [0, 4, 8].map(
-      (row) => target[row] * inZero[0] + target[row + 1] * inZero[1] + target[row + 2] * inZero[2],
-    ) as Triple;
-  };
-  const up = turned(axis);
-  if (length(minus(up, axis)) > SAME) return NaN;
-  const side = turned(x);
-  return Math.atan2(dot(side, y), dot(side, x));
+/** Angle by which a rotation (row after row) turns about `axis`; NaN where it is not a turn about it. `x`, `y`: square to the axis and each other. */
+function turnAbout(r: Float64Array, axis: Triple, x: Triple, y: Triple): number {
+  let off = 0;
+  let c = 0;
+  let s = 0;
+  for (let row = 0; row < 3; row++) {
+    const up = r[3 * row] * axis[0] + r[3 * row + 1] * axis[1] + r[3 * row + 2] * axis[2];
+    off += (up - axis[row]) * (up - axis[row]);
+    const side = r[3 * row] * x[0] + r[3 * row + 1] * x[1] + r[3 * row + 2] * x[2];
+    c += side * x[row];
+    s += side * y[row];
+  }
+  return off > SAME * SAME ? NaN : Math.atan2(s, c);
 }

@@ -2,8 +2,9 @@ import type { Chain } from '../chain';
 import type { Transform } from '../transforms';
 import { axesOf, inFlange, meetingPoint, rotationFromZero } from './axes';
 import { elbowAngle, makeBranches, type Branches, type ClosedForm } from './closed-form';
-import { along, cross, dot, length, minus, type Triple } from './lines';
+import { along, cross as crossOf, dot, length, minus, type Triple } from './lines';
 import { makeThreeTurns } from './three-turns';
+import { addScaled, cross, dotOf, placeInFlange, toUnit, turn, type Vector } from './vectors';
 import { wrapped } from './wrapped';
 
 const SAME = 1e-9;
@@ -37,8 +38,8 @@ export function sevenAxisSolver(chain: Chain): ClosedForm | null {
   const fore = length(fromElbow);
   // A rise along the elbow's axis would leave the swing undefined where the arm folds onto it; such arms are solved by descent.
   if (upper < SAME || fore < SAME || Math.abs(rise) > SAME) return null;
-  const zeroBend = Math.atan2(dot(z[3], cross(toElbow, fromElbow)), dot(toElbow, fromElbow));
-  const straightElbow = length(cross(toElbow, z[2])) < SAME && length(cross(fromElbow, z[4])) < SAME;
+  const zeroBend = Math.atan2(dot(z[3], crossOf(toElbow, fromElbow)), dot(toElbow, fromElbow));
+  const straightElbow = length(crossOf(toElbow, z[2])) < SAME && length(crossOf(fromElbow, z[4])) < SAME;
 
   const wrist = inFlange(zero, centre);
   const branches = makeBranches(8, 7);
@@ -46,20 +47,19 @@ export function sevenAxisSolver(chain: Chain): ClosedForm | null {
   const whole = new Float64Array(9);
   const first = new Float64Array(9);
   const rest = new Float64Array(9);
+  /** From shoulder to wrist, the side of it that the elbow lies on, and what is square to both: where they are to be, and at the zero posture. */
+  const [line, side, third, zeroLine, zeroSide, zeroThird, column] = Array.from(
+    { length: 7 },
+    () => new Float64Array(3),
+  );
 
   function solve(flange: Transform, armAngle = 0): Branches {
     branches.count = 0;
     branches.shortfall = 'none';
     branches.by = 0;
-    const target = [0, 4, 8].map(
-      (row, i) =>
-        flange[row] * wrist[0] +
-        flange[row + 1] * wrist[1] +
-        flange[row + 2] * wrist[2] +
-        flange[row + 3] -
-        shoulder![i],
-    ) as Triple;
-    const distance = length(target);
+    placeInFlange(flange, wrist, line);
+    addScaled(line, shoulder!, -1, line);
+    const distance = Math.sqrt(dotOf(line, line));
     const bend = elbowAngle(distance * distance, upper, fore);
     if (Number.isNaN(bend)) {
       const far = distance > upper + fore;
@@ -69,51 +69,54 @@ export function sevenAxisSolver(chain: Chain): ClosedForm | null {
     }
     rotationFromZero(flange, zero, whole);
     // A wrist on the shoulder has no line to swing about; any will do.
-    const line = distance < SAME ? z[0] : unit(target);
-    const elbowSide = swung(line, z[0], armAngle);
+    if (distance < SAME) line.set(z[0]);
+    else toUnit(line);
+    swing(line, z[0], armAngle, side);
+    cross(line, side, third);
     for (let way = 0; way < 2; way++) {
-      solveElbow(line, elbowSide, way === 0 ? bend : -bend, way === 0 ? 0 : ELBOW_MINUS);
+      solveElbow(way === 0 ? bend : -bend, way === 0 ? 0 : ELBOW_MINUS);
       if (bend === 0) break;
     }
     return branches;
   }
 
-  function solveElbow(line: Triple, elbowSide: Triple, bend: number, code: number) {
+  function solveElbow(bend: number, code: number) {
     const q4 = wrapped(bend - zeroBend);
-    const bent = turnedBy(fromElbow, z[3], q4);
-    const reach = along(toElbow, bent, 1);
-    const size = length(reach);
-    const zeroLine = size < SAME ? unit(toElbow) : unit(reach);
+    const c = Math.cos(q4);
+    const s = Math.sin(q4);
+    turn(fromElbow, z[3], c, s, zeroLine);
+    addScaled(zeroLine, toElbow, 1, zeroLine);
+    if (dotOf(zeroLine, zeroLine) < SAME * SAME) zeroLine.set(toElbow);
+    toUnit(zeroLine);
     // The elbow lies on this side of the line; taken from its axis, which stays square to the line when the arm stretches.
-    const zeroSide = scaled(cross(zeroLine, z[3]), bend < 0 ? -1 : 1);
-    const zeroThird = cross(zeroLine, zeroSide);
-    const third = cross(line, elbowSide);
+    cross(zeroLine, z[3], zeroSide);
+    if (bend < 0) addScaled(zeroSide, zeroSide, -2, zeroSide);
+    cross(zeroLine, zeroSide, zeroThird);
     for (let i = 0; i < 3; i++)
       for (let j = 0; j < 3; j++)
-        first[3 * i + j] = line[i] * zeroLine[j] + elbowSide[i] * zeroSide[j] + third[i] * zeroThird[j];
-    leaveOver(q4);
+        first[3 * i + j] = line[i] * zeroLine[j] + side[i] * zeroSide[j] + third[i] * zeroThird[j];
+    leaveOver(c, s);
     const shoulders = shoulderTurns!.solve(first);
     const wrists = wristTurns!.solve(rest);
-    for (let s = 0; s < shoulders; s++)
+    for (let a = 0; a < shoulders; a++)
       for (let w = 0; w < wrists; w++) {
         const at = 7 * branches.count;
         for (let i = 0; i < 3; i++) {
-          values[at + i] = shoulderTurns!.angles[3 * s + i];
+          values[at + i] = shoulderTurns!.angles[3 * a + i];
           values[at + 4 + i] = wristTurns!.angles[3 * w + i];
         }
         values[at + 3] = q4;
-        codes[branches.count++] = code | (s === 0 ? 0 : SHOULDER_FLIPPED) | (w === 0 ? 0 : WRIST_FLIPPED);
+        codes[branches.count++] = code | (a === 0 ? 0 : SHOULDER_FLIPPED) | (w === 0 ? 0 : WRIST_FLIPPED);
       }
   }
 
-  /** rest = (first · turn of joint 4)ᵀ · whole: what is left for the wrist. */
-  function leaveOver(q4: number) {
-    for (let column = 0; column < 3; column++) {
-      const back: Triple = [0, 1, 2].map(
-        (row) => first[row] * whole[column] + first[3 + row] * whole[3 + column] + first[6 + row] * whole[6 + column],
-      ) as Triple;
-      const turned = turnedBy(back, z[3], -q4);
-      for (let row = 0; row < 3; row++) rest[3 * row + column] = turned[row];
+  /** rest = (first · turn of joint 4)ᵀ · whole: what is left for the wrist. `c`, `s`: of joint 4. */
+  function leaveOver(c: number, s: number) {
+    for (let j = 0; j < 3; j++) {
+      for (let row = 0; row < 3; row++)
+        column[row] = first[row] * whole[j] + first[3 + row] * whole[3 + j] + first[6 + row] * whole[6 + j];
+      turn(column, z[3], c, -s, column);
+      for (let row = 0; row < 3; row++) rest[3 * row + j] = column[row];
     }
   }
 
@@ -135,22 +138,21 @@ function nameOf(code: number): string {
   return `${shoulder}, ${elbow}, ${wrist}`;
 }
 
-const scaled = (v: Triple, by: number): Triple => [v[0] * by, v[1] * by, v[2] * by];
-const unit = (v: Triple): Triple => scaled(v, 1 / length(v));
-
-/** v turned about a unit axis (Rodrigues' formula). */
-function turnedBy(v: Triple, axis: Triple, angle: number): Triple {
-  const c = Math.cos(angle);
-  return along(along(scaled(v, c), cross(axis, v), Math.sin(angle)), axis, dot(axis, v) * (1 - c));
-}
+/** Length of what is left of `up` square to the line below which no side counts as the uppermost. */
+const UPRIGHT = 1e-6;
+const OTHERS: readonly Triple[] = [
+  [1, 0, 0],
+  [0, 1, 0],
+];
 
 /** The direction square to `line` that leans most towards `up`, swung about the line. */
-function swung(line: Triple, up: Triple, angle: number): Triple {
-  let side = along(up, line, -dot(up, line));
-  if (length(side) < 1e-6) {
+function swing(line: Vector, up: Triple, angle: number, out: Vector) {
+  addScaled(up, line, -dotOf(up, line), out);
+  if (dotOf(out, out) < UPRIGHT * UPRIGHT) {
     // Straight above or below the shoulder there is no uppermost side; one fixed direction stands in.
-    const other: Triple = Math.abs(line[0]) < 0.9 ? [1, 0, 0] : [0, 1, 0];
-    side = along(other, line, -dot(other, line));
+    const other = Math.abs(line[0]) < 0.9 ? OTHERS[0] : OTHERS[1];
+    addScaled(other, line, -dotOf(other, line), out);
   }
-  return turnedBy(unit(side), line, angle);
+  toUnit(out);
+  turn(out, line, Math.cos(angle), Math.sin(angle), out);
 }
