@@ -101,9 +101,10 @@ function full(chain: ReturnType<typeof compileChain>, polytope: boolean): () => 
         totals.inlimit += flips === 3 ? 2 : 1;
         totals.evals++;
         gauge.read(pair);
+        if (reading[ICN] <= best[0]) continue;
+        // As maps do: what is only told of the best branch is only measured where a branch leads.
         gauge.readTranslational();
         if (polytope) gauge.readSpeeds();
-        if (reading[ICN] <= best[0]) continue;
         best[0] = reading[ICN];
         best[1] = reading[TRANSLATIONAL_ICN];
         best[2] = reading[most];

@@ -1,3 +1,5 @@
+import { squaredBidiagonal } from './squared-bidiagonal';
+
 /**
  * Largest and smallest singular value of a 6 × 6 matrix: Householder reflections to two diagonals (Golub & Kahan 1965), then Laguerre's iteration on
  * the outermost eigenvalues, which comes from outside and never passes them. The smallest value comes as exact as the largest: about 1e-15 of the
@@ -11,57 +13,18 @@ const ARRIVED = 1e-10;
 /** Steps are kept this much short: where values crowd, rounding could carry them past the outermost. */
 const SHORT = 1 - 1e-7;
 
-/** Overwrites `matrix` (row after row) and writes the two values to out[0] and out[1]. */
+/** Reads `matrix` (row after row) and writes the two values to out[0] and out[1]. */
 export function makeMatrixExtremes(matrix: Float64Array, out: Float64Array): () => void {
   /** Squares of the diagonal and of what stands right of it. */
   const q = new Float64Array(N);
   const e = new Float64Array(N);
   return () => {
-    toBidiagonal(matrix, q, e);
+    squaredBidiagonal(matrix, q, e);
     largestSquare(q, e, out);
     smallestSquare(q, e, out);
     out[0] = Math.sqrt(out[0]);
     out[1] = Math.sqrt(out[1]);
   };
-}
-
-function toBidiagonal(m: Float64Array, q: Float64Array, e: Float64Array) {
-  for (let k = 0; k < N; k++) {
-    let square = 0;
-    for (let i = k; i < N; i++) square += m[i * N + k] * m[i * N + k];
-    q[k] = square;
-    if (k === N - 1) break;
-    if (square > 0) {
-      const head = m[k * N + k];
-      const size = Math.sqrt(square);
-      const pivot = head >= 0 ? head + size : head - size;
-      const scale = 1 / (size * Math.abs(pivot));
-      m[k * N + k] = pivot;
-      for (let j = k + 1; j < N; j++) {
-        let sum = 0;
-        for (let i = k; i < N; i++) sum += m[i * N + k] * m[i * N + j];
-        sum *= scale;
-        for (let i = k; i < N; i++) m[i * N + j] -= sum * m[i * N + k];
-      }
-    }
-    const row = k * N;
-    let rest = 0;
-    for (let j = k + 1; j < N; j++) rest += m[row + j] * m[row + j];
-    e[k] = rest;
-    if (rest > 0 && k < N - 2) {
-      const head = m[row + k + 1];
-      const size = Math.sqrt(rest);
-      const pivot = head >= 0 ? head + size : head - size;
-      const scale = 1 / (size * Math.abs(pivot));
-      m[row + k + 1] = pivot;
-      for (let i = k + 1; i < N; i++) {
-        let sum = 0;
-        for (let j = k + 1; j < N; j++) sum += m[row + j] * m[i * N + j];
-        sum *= scale;
-        for (let j = k + 1; j < N; j++) m[i * N + j] -= sum * m[row + j];
-      }
-    }
-  }
 }
 
 /** The largest eigenvalue of BᵀB, from the bound by its trace and the trace of its square (Samuelson's inequality) downwards. */
