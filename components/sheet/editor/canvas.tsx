@@ -19,7 +19,7 @@ import { useBoard, useBoardSettings, useBoardSheet, useView } from './board-cont
 import { DraftMarks } from './draft-marks';
 import { useFloor } from './floor-context';
 import { PlumbMarks } from './plumb-marks';
-import { useReadings } from './readings-context';
+import { usePostures, useVerdicts } from './readings-context';
 import { sheetBounds } from './sheet-bounds';
 import { useMapLook } from './use-map-look';
 import { useToolPointer } from './use-tool-pointer';
@@ -39,7 +39,8 @@ export function Canvas({ remarks, chosenRemarkId, onRemark }: CanvasProps) {
   const selection = useBoardSheet((state) => state.selection);
   const tool = useBoardSheet((state) => state.tool);
   const { floorMap, isDragging } = useFloor();
-  const { postures, byPoint } = useReadings();
+  const { byPoint } = useVerdicts();
+  const postures = usePostures();
   const settings = useBoardSettings();
   const look = useMapLook();
   const pointer = useToolPointer();

@@ -21,7 +21,6 @@ interface IssueDialogProps {
 /** Freezes the sheet as a numbered revision and goes to it. */
 export function IssueDialog({ open, onOpenChange }: IssueDialogProps) {
   const board = useBoard();
-  const { unfinished } = useFloor();
   const { state } = useSaveStatus(board);
   const router = useRouter();
   const [note, setNote] = useState('');
@@ -64,14 +63,20 @@ export function IssueDialog({ open, onOpenChange }: IssueDialogProps) {
           <TextArea rows={3} maxLength={2000} value={note} onChange={(event) => setNote(event.target.value)} />
         </Field>
         {state !== 'saved' && <Notice tone="caution">The sheet is not saved yet. Wait until it says “saved”.</Notice>}
-        {unfinished > 0 && (
-          <Notice tone="caution">
-            {unfinished === 1 ? 'One map is' : `${unfinished} maps are`} not finished. What is issued now shows the
-            sheet without {unfinished === 1 ? 'it' : 'them'}.
-          </Notice>
-        )}
+        <UnfinishedMaps />
         {fault && <Notice tone="trouble">{fault}</Notice>}
       </div>
     </Dialog>
+  );
+}
+
+function UnfinishedMaps() {
+  const { unfinished } = useFloor();
+  if (unfinished === 0) return null;
+  return (
+    <Notice tone="caution">
+      {unfinished === 1 ? 'One map is' : `${unfinished} maps are`} not finished. What is issued now shows the sheet
+      without {unfinished === 1 ? 'it' : 'them'}.
+    </Notice>
   );
 }

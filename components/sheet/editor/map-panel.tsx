@@ -1,6 +1,6 @@
 'use client';
 
-import { useEffect, useRef } from 'react';
+import { useDeferredValue, useEffect, useRef } from 'react';
 import { MapKey } from '@/components/sheet/map-key/map-key';
 import { useBoard, useBoardSettings } from './board-context';
 import { useFloor } from './floor-context';
@@ -17,6 +17,8 @@ export function MapPanel({ floating = false }: { readonly floating?: boolean }) 
   const settings = useBoardSettings();
   const { floorMap, byRobot, unfinished, robotCount, cancel, retry } = useFloor();
   const look = useMapLook();
+  // The key may follow a moment behind the picture while a base is dragged.
+  const keyedMap = useDeferredValue(floorMap);
   const box = useRef<HTMLDivElement>(null);
 
   useEffect(() => {
@@ -40,7 +42,7 @@ export function MapPanel({ floating = false }: { readonly floating?: boolean }) 
       settings={settings}
       scale={look.scale}
       range={look.range}
-      map={floorMap}
+      map={keyedMap}
       work={work}
       stacked={!floating}
       onMeasureChange={(measure) => keeper.change({ measure })}

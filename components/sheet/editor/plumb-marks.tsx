@@ -6,15 +6,14 @@ import { usePalette } from '@/components/sheet/drawing';
 import { inkOf, pixelOf, strokeInk, traceCircle, tracePath } from '@/components/sheet/drawing/ink';
 import { floorSpeeds } from '@/lib/editor/plumb';
 import { useBoardSettings } from './board-context';
-import { useReadings } from './readings-context';
+import { usePlumb } from './readings-context';
 
 /** Millimetres of floor for a metre a second, so that shapes of two spots can be compared by eye. */
 const MM_PER_MPS = 110;
 
 /** The plumb where it hangs, with what the tool can do there: the velocity polygon, and its ellipse dashed. */
 export function PlumbMarks() {
-  const { plumb } = useReadings();
-  const { spot, reading, posture } = plumb;
+  const { spot, reading, posture } = usePlumb();
   const { wrist } = useBoardSettings();
   const palette = usePalette();
   const speeds = useMemo(

@@ -1,6 +1,6 @@
 'use client';
 
-import { createContext, useContext, useDeferredValue, useMemo, useState, type ReactNode } from 'react';
+import { createContext, useContext, useDeferredValue, useMemo, useState, type Context, type ReactNode } from 'react';
 import { inOrder } from '@/lib/editor/order';
 import {
   bestPlumb,
@@ -17,33 +17,43 @@ import type { Robot } from '@/lib/layout/items';
 import { judgeItems, type PointVerdict } from '@/lib/layout/verdicts';
 import { useBoard, useBoardSettings, useBoardSheet } from './board-context';
 
-/** What the browser's own kernel says of the sheet as it is shown now: verdicts, the plumb, and how robots stand. */
-export interface Readings {
+/** Verdicts on the task points; they may lag a moment behind what is dragged. */
+export interface Verdicts {
   readonly verdicts: readonly PointVerdict[];
   readonly byPoint: ReadonlyMap<string, PointVerdict>;
-  readonly plumb: {
-    readonly spot: PlumbSpot | null;
-    /** The robot that is read; null while no robot stands on the sheet. */
-    readonly reading: PlumbReading | null;
-    readonly posture: PlumbPosture | null;
-    readonly robots: readonly Robot[];
-    /** Null: the best one. */
-    readonly chosenRobotId: string | null;
-    readonly chooseRobot: (robotId: string | null) => void;
-    readonly chooseBranch: (branch: string) => void;
-  };
-  /** Joint values by robot, to draw it in. */
-  readonly postures: ReadonlyMap<string, readonly number[]>;
 }
 
-const ReadingsContext = createContext<Readings | null>(null);
-
-export function useReadings(): Readings {
-  const readings = useContext(ReadingsContext);
-  if (!readings) throw new Error('Readings belong inside their provider.');
-  return readings;
+export interface Plumb {
+  readonly spot: PlumbSpot | null;
+  /** The robot that is read; null while no robot stands on the sheet. */
+  readonly reading: PlumbReading | null;
+  readonly posture: PlumbPosture | null;
+  readonly robots: readonly Robot[];
+  /** Null: the best one. */
+  readonly chosenRobotId: string | null;
+  readonly chooseRobot: (robotId: string | null) => void;
+  readonly chooseBranch: (branch: string) => void;
 }
 
+/** Joint values by robot, to draw it in. */
+export type Postures = ReadonlyMap<string, readonly number[]>;
+
+// Three contexts, so that a base that is dragged does not draw the panels again that have nothing to do with it.
+const VerdictsContext = createContext<Verdicts | null>(null);
+const PlumbContext = createContext<Plumb | null>(null);
+const PosturesContext = createContext<Postures | null>(null);
+
+function useInside<T>(context: Context<T | null>): T {
+  const value = useContext(context);
+  if (!value) throw new Error('Readings belong inside their provider.');
+  return value;
+}
+
+export const useVerdicts = (): Verdicts => useInside(VerdictsContext);
+export const usePlumb = (): Plumb => useInside(PlumbContext);
+export const usePostures = (): Postures => useInside(PosturesContext);
+
+/** What the browser's own kernel says of the sheet as it is shown now: verdicts, the plumb, and how robots stand. */
 export function ReadingsProvider({ children }: { readonly children: ReactNode }) {
   const { arms } = useBoard();
   const items = useBoardSheet((state) => state.items);
@@ -56,7 +66,10 @@ export function ReadingsProvider({ children }: { readonly children: ReactNode })
     () => judgeItems(judged, (armId) => arms.get(armId)?.definition, settings.wrist),
     [judged, arms, settings.wrist],
   );
-  const byPoint = useMemo(() => new Map(verdicts.map((verdict) => [verdict.pointId, verdict])), [verdicts]);
+  const judgement = useMemo(
+    () => ({ verdicts, byPoint: new Map(verdicts.map((verdict) => [verdict.pointId, verdict])) }),
+    [verdicts],
+  );
 
   const hung = useBoardSheet((state) => state.plumb);
   const taskPointId = useBoardSheet((state) => state.selection.taskPointId);
@@ -92,16 +105,17 @@ export function ReadingsProvider({ children }: { readonly children: ReactNode })
     return standing;
   }, [robots, reading, posture, verdicts, arms]);
 
-  const readings = useMemo<Readings>(
-    () => ({
-      verdicts,
-      byPoint,
-      postures,
-      plumb: { spot, reading, posture, robots, chosenRobotId, chooseRobot, chooseBranch },
-    }),
-    [verdicts, byPoint, postures, spot, reading, posture, robots, chosenRobotId],
+  const plumb = useMemo<Plumb>(
+    () => ({ spot, reading, posture, robots, chosenRobotId, chooseRobot, chooseBranch }),
+    [spot, reading, posture, robots, chosenRobotId],
   );
-  return <ReadingsContext value={readings}>{children}</ReadingsContext>;
+  return (
+    <VerdictsContext value={judgement}>
+      <PlumbContext value={plumb}>
+        <PosturesContext value={postures}>{children}</PosturesContext>
+      </PlumbContext>
+    </VerdictsContext>
+  );
 }
 
 /** A robot at rest is drawn at the first task point that falls to it. */

@@ -4,7 +4,7 @@ import { X } from 'lucide-react';
 import { useBoard, useBoardSettings, useBoardSheet } from '@/components/sheet/editor/board-context';
 import { useLastInput } from '@/components/sheet/editor/use-last-input';
 import { usePlace } from '@/components/sheet/editor/use-place';
-import { useReadings } from '@/components/sheet/editor/readings-context';
+import { usePlumb } from '@/components/sheet/editor/readings-context';
 import { Button } from '@/components/ui/button';
 import { Select } from '@/components/ui/select';
 import { printed } from '@/lib/editor/measure-text';
@@ -19,8 +19,7 @@ export function PlumbPanel() {
   const { sheet, arms } = useBoard();
   const settings = useBoardSettings();
   const taskPointId = useBoardSheet((state) => state.selection.taskPointId);
-  const { plumb } = useReadings();
-  const { spot, reading, posture } = plumb;
+  const { spot, reading, posture } = usePlumb();
   const { take, placeAtOnce } = usePlace();
   const lastInput = useLastInput();
 
@@ -86,8 +85,7 @@ export function PlumbPanel() {
 }
 
 function RobotChoice() {
-  const { plumb } = useReadings();
-  const { robots, reading, chosenRobotId, chooseRobot } = plumb;
+  const { robots, reading, chosenRobotId, chooseRobot } = usePlumb();
   if (robots.length < 2) return <span className="text-sm font-medium">{reading?.robot.name}</span>;
   const bestWords = chosenRobotId ? 'Best robot' : `Best: ${reading?.robot.name ?? '–'}`;
   return (
@@ -107,7 +105,7 @@ interface PostureReadingsProps {
 }
 
 function PostureReadings({ reading, posture }: PostureReadingsProps) {
-  const { chooseBranch } = useReadings().plumb;
+  const { chooseBranch } = usePlumb();
   const { postures } = reading;
   return (
     <ReadingList>

@@ -1,6 +1,6 @@
 'use client';
 
-import { useState } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { classNames } from '@/components/ui/class-names';
 import { Field } from '@/components/ui/field';
@@ -71,8 +71,13 @@ const when = (timestamp: string) => DAY.format(new Date(timestamp));
 function OneRemark({ remark, isChosen, onToggle, answer, resolve }: OneRemarkProps) {
   const { number, body, author, replies, resolvedAt, revisionNumber, createdAt } = remark;
   const detailsId = `remark-${remark.id}`;
+  const row = useRef<HTMLLIElement>(null);
+  // A pin that is pressed on the drawing opens its remark, wherever the list is scrolled to.
+  useEffect(() => {
+    if (isChosen) row.current?.scrollIntoView({ block: 'nearest' });
+  }, [isChosen]);
   return (
-    <li className="border-t border-hair first:border-t-0" data-remark={number}>
+    <li ref={row} className="border-t border-hair first:border-t-0" data-remark={number}>
       <button
         type="button"
         aria-expanded={isChosen}

@@ -1,7 +1,7 @@
 'use client';
 
 import { useBoard } from '@/components/sheet/editor/board-context';
-import { useReadings } from '@/components/sheet/editor/readings-context';
+import { useVerdicts } from '@/components/sheet/editor/readings-context';
 import { placeWords, printed } from '@/lib/editor/measure-text';
 import type { Item } from '@/lib/layout/items';
 import { fixtureWords } from './verdict-order';
@@ -15,7 +15,7 @@ export interface ItemNote {
 /** What the list says of an item: its name, and the one thing worth knowing about it. */
 export function useItemNote(item: Item): ItemNote {
   const { arms } = useBoard();
-  const { byPoint } = useReadings();
+  const { byPoint } = useVerdicts();
   switch (item.kind) {
     case 'robot': {
       const arm = arms.get(item.armId)?.name;

@@ -1,7 +1,7 @@
 'use client';
 
 import { useBoard, useBoardSheet } from '@/components/sheet/editor/board-context';
-import { useReadings } from '@/components/sheet/editor/readings-context';
+import { useVerdicts } from '@/components/sheet/editor/readings-context';
 import { classNames } from '@/components/ui/class-names';
 import { Tag } from '@/components/ui/tag';
 import type { PointVerdict } from '@/lib/layout/verdicts';
@@ -10,9 +10,9 @@ import { BAND_WORDS, worstFirst } from './verdict-order';
 /** Every task point with its verdict, the worst first. A row chooses its point; the plumb then hangs there. */
 export function VerdictTable() {
   const { sheet } = useBoard();
-  const { verdicts, plumb } = useReadings();
+  const { verdicts } = useVerdicts();
+  const items = useBoardSheet((state) => state.items);
   const chosenId = useBoardSheet((state) => state.selection.taskPointId);
-  const robotNames = new Map(plumb.robots.map(({ id, name }) => [id, name]));
   const choose = ({ fixtureId, pointId }: PointVerdict) =>
     sheet.select({ itemIds: [fixtureId], taskPointId: pointId === chosenId ? null : pointId });
   return (
@@ -50,7 +50,7 @@ export function VerdictTable() {
               <Row
                 key={verdict.pointId}
                 verdict={verdict}
-                robotName={robotNames.get(verdict.best?.robotId ?? '') ?? '–'}
+                robotName={items.get(verdict.best?.robotId ?? '')?.name ?? '–'}
                 isChosen={verdict.pointId === chosenId}
                 onChoose={() => choose(verdict)}
               />
