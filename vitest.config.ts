@@ -5,7 +5,7 @@ import { defineConfig } from 'vitest/config';
 
 const root = fileURLToPath(new URL('.', import.meta.url));
 
-// Under \`npm test\` all of it is set already; beside \`npm test -- --keep\` this finds the services that stay up.
+// Under `npm test` all of it is set already; beside `npm test -- --keep` this finds the services that stay up.
 nextEnv.loadEnvConfig(root, false, { info: () => undefined, error: console.error });
 
 export default defineConfig({

@@ -19,6 +19,7 @@ interface ImportOriginProps {
 /** The file a draft comes from, which chain of it is shown, and what was taken for granted. */
 export function ImportOrigin({ source, notes, refusals, onChain, onAnother }: ImportOriginProps) {
   const { chain } = source;
+  const isBare = !chain && notes.length === 0 && refusals.length === 0;
   return (
     <Panel
       title={source.name}
@@ -27,7 +28,8 @@ export function ImportOrigin({ source, notes, refusals, onChain, onAnother }: Im
           Another file
         </Button>
       }
-      className="-mb-px"
+      // Without a body its title line ends in two rules, and both lie on the next panel's.
+      className={isBare ? '-mb-0.5' : '-mb-px'}
     >
       {(chain || notes.length > 0) && (
         <div className="flex flex-col gap-2.5 p-3.5">

@@ -63,3 +63,36 @@ test('a planner draws a cell, sees its maps, and a colleague gets the same maps 
   expect(asked).toEqual([200, 200]);
   await colleague.context.close();
 });
+
+test('two planners on one sheet see each other’s edits, and a stale one is shown, not lost', async ({
+  page,
+  browser,
+}) => {
+  await signIn(page, PLANNER);
+  await createProject(page, 'Two planners');
+  await newVariant(page, 'shared');
+  const mine = new Sheet(page);
+  await mine.placeFixture(1000, 1000);
+  await mine.saved();
+
+  const other = await personAt(browser, INTEGRATOR);
+  await other.page.goto(page.url());
+  const theirs = new Sheet(other.page);
+  await theirs.row('Fixture').first().click();
+
+  // Mine is kept back on the wire until theirs is in.
+  let release = () => {};
+  const held = new Promise<void>((resolve) => (release = resolve));
+  await page.route('**/operations', async (route) => {
+    await held;
+    await route.continue();
+  });
+  await mine.row('Fixture').first().click();
+  await mine.type({ x: 1500 });
+  await theirs.type({ x: 2500 });
+  await theirs.saved();
+  release();
+  await expect(page.getByText(/changed/i).first()).toBeVisible();
+  await expect(page.getByRole('button', { name: /conflict|choose|compare both|look/i }).first()).toBeVisible();
+  await other.context.close();
+});
