@@ -1,0 +1,16 @@
+import { z } from 'zod';
+import { heightRange, outline, placed } from './common';
+import { taskPointSchema } from './task-point';
+
+export const fixtureSchema = z.object({
+  kind: z.literal('fixture'),
+  ...placed,
+  outlineMm: outline,
+  ...heightRange,
+  taskPoints: z.array(taskPointSchema).max(200).default([]),
+});
+
+export const obstacleSchema = z.object({ kind: z.literal('obstacle'), ...placed, outlineMm: outline, ...heightRange });
+
+export type Fixture = z.infer<typeof fixtureSchema>;
+export type Obstacle = z.infer<typeof obstacleSchema>;

@@ -1,0 +1,27 @@
+import { z } from 'zod';
+import { fixtureSchema, obstacleSchema } from './blocks';
+import { dimensionSchema } from './dimension';
+import { guardLineSchema, walkwaySchema } from './lines';
+import { robotSchema } from './robot';
+
+/**
+ * The things that stand on a sheet. Millimetres and degrees, floor frame: x right, y away, z up, angles counter-clockwise.
+ * Every item has a place and a turn; points of outlines and lines are in the item's own frame.
+ */
+export const itemSchema = z.discriminatedUnion('kind', [
+  robotSchema,
+  fixtureSchema,
+  obstacleSchema,
+  guardLineSchema,
+  walkwaySchema,
+  dimensionSchema,
+]);
+
+export type Item = z.infer<typeof itemSchema>;
+export type ItemKind = Item['kind'];
+
+export * from './blocks';
+export * from './dimension';
+export * from './lines';
+export * from './robot';
+export * from './task-point';
