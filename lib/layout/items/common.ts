@@ -1,3 +1,6 @@
+import { z } from 'zod';
+import { outlineFault } from '../geometry';
+
 /** A value on the floor: finite, and no farther off than a large hall (1 km). */
 export const millimetres = z.number().min(-1_000_000).max(1_000_000);
 export const degrees = z.number().min(-360).max(360);
