@@ -62,6 +62,7 @@ test('issue, share, remark on a phone, answer, settle', async ({ page, browser }
     .toBeGreaterThan(0);
   const planner = await personAt(browser, PLANNER);
   await planner.page.goto(sheetUrl);
+  await planner.page.getByRole('tab', { name: /^Remarks/ }).click();
   await planner.page.getByRole('button', { name: new RegExp(WORRY.slice(0, 20)) }).click();
   await planner.page.getByLabel(/Answer to remark/).fill(ANSWER);
   await planner.page.getByRole('button', { name: 'Send answer' }).click();

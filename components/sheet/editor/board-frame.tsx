@@ -1,13 +1,8 @@
 'use client';
 
 import { useCallback, useState } from 'react';
-import { useLayoutRemarks } from '@/lib/client/use-remarks';
 import { ItemList } from '@/components/sheet/panels/item-list';
-import { Inspector } from '@/components/sheet/panels/inspector';
 import { Palette } from '@/components/sheet/panels/palette';
-import { PlumbPanel } from '@/components/sheet/panels/plumb-panel';
-import { RemarksPanel } from '@/components/sheet/panels/remarks-panel';
-import { VerdictTable } from '@/components/sheet/panels/verdict-table';
 import { ShareDialog } from '@/components/share/share-dialog';
 import { useBoard } from './board-context';
 import { Canvas } from './canvas';
@@ -17,11 +12,14 @@ import { LiveRegion } from './live-region';
 import { MapPanel } from './map-panel';
 import { NarrowDrawer } from './narrow-drawer';
 import { NextStep } from './next-step';
+import { RemarksProvider } from './board-remarks';
+import { SIDE_PANELS } from './side-panels';
+import { SideTabs, TabLabel } from './side-tabs';
 import { SheetTitleBlock } from './sheet-title-block';
 import { ShortcutsDialog } from './shortcuts-dialog';
 import { Toolbar } from './toolbar';
 import { TroubleLine } from './trouble-line';
-import { useMedia } from './use-media';
+import { NARROW, useMedia } from './use-media';
 import { useSheetKeys } from './use-sheet-keys';
 
 type OpenDialog = 'none' | 'conflict' | 'share' | 'issue' | 'shortcuts';
@@ -30,9 +28,7 @@ type OpenDialog = 'none' | 'conflict' | 'share' | 'issue' | 'shortcuts';
 export function BoardFrame() {
   const { layout } = useBoard();
   const [dialog, setDialog] = useState<OpenDialog>('none');
-  const [remarkId, setRemarkId] = useState<string | null>(null);
-  const remarks = useLayoutRemarks(layout.id);
-  const isNarrow = useMedia('(max-width: 1023px)');
+  const isNarrow = useMedia(NARROW);
   useSheetKeys(useCallback(() => setDialog('shortcuts'), []));
 
   const place = (
@@ -41,62 +37,58 @@ export function BoardFrame() {
       <ItemList />
     </>
   );
-  const points = <VerdictTable />;
-  const remarkList = <RemarksPanel {...remarks} chosenId={remarkId} onChoose={setRemarkId} />;
   const dialogProps = (name: OpenDialog) => ({
     open: dialog === name,
     onOpenChange: (open: boolean) => setDialog(open ? name : 'none'),
   });
 
   return (
-    <div className="flex h-dvh flex-col overflow-hidden bg-sheet">
-      <SheetTitleBlock
-        onConflict={() => setDialog('conflict')}
-        onShare={() => setDialog('share')}
-        onIssue={() => setDialog('issue')}
-      />
-      <div className="flex min-h-0 flex-1 max-lg:flex-col">
-        {!isNarrow && (
-          <aside aria-label="Things and list" className="w-[195px] flex-none overflow-y-auto border-r border-rule">
-            {place}
-          </aside>
-        )}
-        <main className="relative flex min-h-0 min-w-0 flex-1 flex-col">
-          <Toolbar onShortcuts={() => setDialog('shortcuts')} />
-          <div className="relative min-h-0 flex-1">
-            <Canvas remarks={remarks.remarks ?? []} chosenRemarkId={remarkId} onRemark={setRemarkId} />
-            <NextStep />
-            <div className="pointer-events-none absolute inset-x-3 top-3 z-10 mx-auto max-w-xl">
-              <TroubleLine onConflict={() => setDialog('conflict')} />
+    <RemarksProvider>
+      <div className="flex h-dvh flex-col overflow-hidden bg-sheet">
+        <SheetTitleBlock
+          onConflict={() => setDialog('conflict')}
+          onShare={() => setDialog('share')}
+          onIssue={() => setDialog('issue')}
+        />
+        <div className="flex min-h-0 flex-1 max-lg:flex-col">
+          {!isNarrow && (
+            <aside aria-label="Things and list" className="w-[195px] flex-none overflow-y-auto border-r border-rule">
+              {place}
+            </aside>
+          )}
+          <main className="relative flex min-h-0 min-w-0 flex-1 flex-col">
+            <Toolbar onShortcuts={() => setDialog('shortcuts')} />
+            <div className="relative min-h-0 flex-1">
+              <Canvas />
+              <NextStep />
+              <div className="pointer-events-none absolute inset-x-3 top-3 z-10 mx-auto max-w-xl">
+                <TroubleLine onConflict={() => setDialog('conflict')} />
+              </div>
+              {!isNarrow && <MapPanel floating />}
             </div>
-            {!isNarrow && <MapPanel floating />}
-          </div>
-        </main>
-        {isNarrow ? (
-          <NarrowDrawer
-            tabs={[
-              { id: 'place', label: 'Place', panel: place },
-              { id: 'values', label: 'Values', panel: <Inspector emptyWords /> },
-              { id: 'plumb', label: 'Plumb', panel: <PlumbPanel /> },
-              { id: 'points', label: 'Points', panel: points },
-              { id: 'map', label: 'Map', panel: <MapPanel /> },
-              { id: 'remarks', label: 'Remarks', panel: remarkList },
-            ]}
-          />
-        ) : (
-          <aside aria-label="Values and readings" className="w-[326px] flex-none overflow-y-auto border-l border-rule">
-            <Inspector />
-            <PlumbPanel />
-            {points}
-            {remarkList}
-          </aside>
-        )}
+          </main>
+          {isNarrow ? (
+            <NarrowDrawer
+              tabs={[
+                { id: 'place', label: 'Place', panel: place },
+                { id: 'map', label: 'Map', panel: <MapPanel /> },
+                ...SIDE_PANELS.map(({ id, label, useWaiting, Panel }) => ({
+                  id,
+                  label: <TabLabel label={label} useWaiting={useWaiting} />,
+                  panel: <Panel />,
+                })),
+              ]}
+            />
+          ) : (
+            <SideTabs />
+          )}
+        </div>
+        <ConflictDialog {...dialogProps('conflict')} />
+        <ShareDialog layoutId={layout.id} {...dialogProps('share')} />
+        <IssueDialog {...dialogProps('issue')} />
+        <ShortcutsDialog {...dialogProps('shortcuts')} />
+        <LiveRegion />
       </div>
-      <ConflictDialog {...dialogProps('conflict')} />
-      <ShareDialog layoutId={layout.id} {...dialogProps('share')} />
-      <IssueDialog {...dialogProps('issue')} />
-      <ShortcutsDialog {...dialogProps('shortcuts')} />
-      <LiveRegion />
-    </div>
+    </RemarksProvider>
   );
 }

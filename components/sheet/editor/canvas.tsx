@@ -12,9 +12,9 @@ import {
   SelectionHandles,
   SheetStage,
 } from '@/components/sheet/drawing';
-import type { Remark } from '@/lib/contracts/remarks';
 import { inOrder } from '@/lib/editor/order';
 import { shownItems } from '@/lib/editor/sheet';
+import { useBoardRemarks } from './board-remarks';
 import { useBoard, useBoardSettings, useBoardSheet, useView } from './board-context';
 import { DraftMarks } from './draft-marks';
 import { useFloor } from './floor-context';
@@ -24,14 +24,8 @@ import { sheetBounds } from './sheet-bounds';
 import { useMapLook } from './use-map-look';
 import { useToolPointer } from './use-tool-pointer';
 
-interface CanvasProps {
-  readonly remarks: readonly Remark[];
-  readonly chosenRemarkId: string | null;
-  readonly onRemark: (remarkId: string) => void;
-}
-
 /** The drawing in the middle of the board. */
-export function Canvas({ remarks, chosenRemarkId, onRemark }: CanvasProps) {
+export function Canvas() {
   const { arms, floorPlan, layout, view } = useBoard();
   const { viewport, size } = useView();
   const items = useBoardSheet((state) => state.items);
@@ -60,7 +54,11 @@ export function Canvas({ remarks, chosenRemarkId, onRemark }: CanvasProps) {
     () => new Map([...byPoint].map(([pointId, { best }]) => [pointId, best?.band ?? ('unknown' as const)])),
     [byPoint],
   );
-  const pins = useMemo(() => remarks.map((remark) => ({ ...remark, resolved: remark.resolvedAt !== null })), [remarks]);
+  const { remarks, chosenId: chosenRemarkId, choose: onRemark } = useBoardRemarks();
+  const pins = useMemo(
+    () => (remarks ?? []).map((remark) => ({ ...remark, resolved: remark.resolvedAt !== null })),
+    [remarks],
+  );
   const pictureUrl = useMemo(() => {
     const address = `/api/floor-plans/${encodeURIComponent(floorPlan?.id ?? '')}/picture?width=`;
     return (widthPx: number) => address + widthPx;

@@ -1,15 +1,18 @@
 'use client';
 
 import { Tabs } from 'radix-ui';
-import { useState, type ReactNode } from 'react';
+import type { ReactNode } from 'react';
+import { useBoard, useView } from './board-context';
 
 interface NarrowDrawerProps {
-  readonly tabs: readonly { readonly id: string; readonly label: string; readonly panel: ReactNode }[];
+  readonly tabs: readonly { readonly id: string; readonly label: ReactNode; readonly panel: ReactNode }[];
 }
 
-/** On a phone the panels are a drawer under the canvas: a tab opens its panel, pressing it again gives the room back. */
+/** On a phone the panels are a drawer under the canvas: a tab opens its panel, pressing it again gives the room back. Tabs wrap. */
 export function NarrowDrawer({ tabs }: NarrowDrawerProps) {
-  const [open, setOpen] = useState('');
+  const { view } = useBoard();
+  const { side: open } = useView();
+  const setOpen = view.openSide;
   return (
     <Tabs.Root
       value={open}
@@ -17,7 +20,7 @@ export function NarrowDrawer({ tabs }: NarrowDrawerProps) {
       activationMode="manual"
       className="flex-none border-t-2 border-rule"
     >
-      <Tabs.List aria-label="Panels of the sheet" className="flex overflow-x-auto">
+      <Tabs.List aria-label="Panels of the sheet" className="grid grid-cols-5">
         {tabs.map(({ id, label }) => (
           <Tabs.Trigger
             key={id}
@@ -28,7 +31,7 @@ export function NarrowDrawer({ tabs }: NarrowDrawerProps) {
               event.preventDefault();
               setOpen('');
             }}
-            className="min-h-11 flex-auto border-l border-hair px-2 text-sm first:border-l-0 focus-visible:-outline-offset-2 data-[state=active]:bg-ink data-[state=active]:text-sheet"
+            className="min-h-11 border-t border-l border-hair px-1 text-sm [&:nth-child(-n+5)]:border-t-0 [&:nth-child(5n+1)]:border-l-0 focus-visible:-outline-offset-2 data-[state=active]:bg-ink data-[state=active]:text-sheet"
           >
             {label}
           </Tabs.Trigger>

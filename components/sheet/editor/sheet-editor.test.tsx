@@ -217,6 +217,7 @@ describe('remarks', () => {
       },
     ];
     const { user } = await open();
+    await user.click(await screen.findByRole('tab', { name: /^Remarks/ }));
     await user.click(await screen.findByRole('button', { name: /maintenance cart/ }));
     expect(screen.getByLabelText('Answer to remark 3')).toBeVisible();
     expect(screen.getByRole('button', { name: 'Settle' })).toBeVisible();

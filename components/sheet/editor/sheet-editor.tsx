@@ -49,8 +49,10 @@ export default function SheetEditor({ projectId, layoutId }: SheetEditorProps) {
 
 /** The keyboard goes to the first typed value once the panel with it is drawn and a closing menu has let go of it. */
 const FOCUS_AFTER_MS = 40;
-const typeValues = () =>
-  void setTimeout(() => document.querySelector<HTMLElement>('[data-first-value]')?.focus(), FOCUS_AFTER_MS);
+const typeValues = (view: ViewStore) => () => {
+  view.openSide('values');
+  setTimeout(() => document.querySelector<HTMLElement>('[data-first-value]')?.focus(), FOCUS_AFTER_MS);
+};
 
 function OnBoard({ opened, projectId }: { readonly opened: LayoutOnBoard; readonly projectId: string }) {
   const { data } = useAnswer('/api/arms', libraryArmListSchema);
@@ -61,7 +63,7 @@ function OnBoard({ opened, projectId }: { readonly opened: LayoutOnBoard; readon
       ...opened,
       projectId,
       view,
-      typeValues,
+      typeValues: typeValues(view),
       isLibraryThere: data !== undefined,
       libraryArms: library
         .filter(({ latest, archivedAt }) => latest && !archivedAt)

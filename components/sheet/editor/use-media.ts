@@ -18,3 +18,6 @@ export function useMedia(query: string): boolean {
     () => false,
   );
 }
+
+/** A page too narrow for panels beside the canvas: they are a drawer under it. */
+export const NARROW = '(max-width: 1023px)';

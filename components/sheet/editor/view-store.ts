@@ -9,6 +9,8 @@ export interface View {
   readonly coveredPx: number;
   /** The colours of the map: a reader's own choice. */
   readonly mapScale: MapScale;
+  /** The panel beside the sheet that is in front, by id; empty: the first on a wide page, none on a phone. */
+  readonly side: string;
 }
 
 const EMPTY_FLOOR: FloorBounds = { minXMm: 0, minYMm: 0, maxXMm: 9000, maxYMm: 6000 };
@@ -20,6 +22,7 @@ export class ViewStore {
     size: { width: 0, height: 0 },
     coveredPx: 0,
     mapScale: 'tide',
+    side: '',
   };
   /** What was last fitted; undefined once somebody looks elsewhere. */
   private fitted: FloorBounds | null | undefined = undefined;
@@ -32,11 +35,16 @@ export class ViewStore {
     return () => this.listeners.delete(listener);
   };
 
-  set(change: Partial<Omit<View, 'viewport'>>): void {
+  set(change: Partial<Omit<View, 'viewport' | 'side'>>): void {
     this.change(change);
     // Until somebody looks elsewhere, the whole sheet stays in view while the page finds its sizes.
     if (this.fitted !== undefined) this.fit(this.fitted);
   }
+
+  /** Brings a panel beside the sheet to the front. */
+  readonly openSide = (side: string): void => {
+    if (side !== this.view.side) this.change({ side });
+  };
 
   /** Somebody moved the view. */
   look(viewport: Viewport): void {
