@@ -28,7 +28,7 @@ export function SideTabs() {
     <aside aria-label="Values and readings" className="flex w-[326px] flex-none flex-col border-l border-rule">
       <Tabs.Root value={tabOf(side)} onValueChange={view.openSide} className="flex min-h-0 flex-1 flex-col">
         <Tabs.List aria-label="Panels of the sheet" className="flex flex-none flex-wrap border-b border-rule">
-          {SIDE_TABS.map(({ id, label }) => (
+          {SIDE_TABS.map(({ id, label, panels }) => (
             <Tabs.Trigger
               key={id}
               value={id}
