@@ -22,6 +22,8 @@ export const placed = {
   hidden: z.boolean().default(false),
   /** Place in the list of items and from bottom to top on the sheet; items without one come first. */
   order: z.number().min(-1_000_000).max(1_000_000).optional(),
+  /** Items with the same one are chosen, moved and copied together. */
+  groupId: z.uuid().optional(),
 };
 
 export const outline = z
