@@ -22,7 +22,8 @@ export function PointFields({ handle, calibration }: { handle: Handle; calibrati
         size="icon"
         aria-pressed={isSelected}
         aria-label={`Select: ${name}`}
-        onClick={() => deeds.select(isSelected ? null : handle)}
+        // A point still to be picked stays selected: whoever presses this means to pick it.
+        onClick={() => deeds.select(isSelected && point ? null : handle)}
         className={classNames('font-mono text-[0.8125rem]', isSelected && 'border-red! text-red!')}
       >
         {point ? HANDLE_MARKS[handle] : <Crosshair aria-hidden className="size-4" />}

@@ -51,6 +51,8 @@ for (const file of ['plan-clean.png', 'plan-negative.webp', 'plan-scan.jpg']) {
     await page.getByRole('menuitemradio').first().click();
     const sheet = new Sheet(page);
     await expect(page.getByRole('button', { name: /^Floor plan/ })).not.toContainText('none');
+    // The board shows the whole picture first.
+    await expect.poll(async () => sheet.shows(BAY.length, BAY.depth)).toBe(true);
     const zoom = await sheet.zoomTo(BAY.length, BAY.depth, plan.mmPerPx);
     const seen = await findInPicture(
       page,

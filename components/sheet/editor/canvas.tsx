@@ -135,10 +135,10 @@ export function Canvas() {
 
 const CURSORS: Partial<Record<string, string>> = { select: 'default', pan: 'grab' };
 
-/** Keeps the canvas at the size of its box, and shows the whole sheet at the start. */
+/** Keeps the canvas at the size of its box, and shows the whole sheet at the start and when another floor plan comes under it. */
 function useMeasuredAndFitted(box: React.RefObject<HTMLDivElement | null>): void {
   const { view, sheet, floorPlan, arms } = useBoard();
-  const isFitted = useRef(false);
+  const fittedTo = useRef<string | null>(null);
   useEffect(() => {
     const element = box.current;
     if (!element) return;
@@ -146,8 +146,9 @@ function useMeasuredAndFitted(box: React.RefObject<HTMLDivElement | null>): void
     const observer = new ResizeObserver(measure);
     observer.observe(element);
     measure();
-    if (!isFitted.current) view.fit(sheetBounds(sheet.getState().items, arms, floorPlan));
-    isFitted.current = true;
+    const ground = floorPlan?.id ?? 'bare';
+    if (fittedTo.current !== ground) view.fit(sheetBounds(sheet.getState().items, arms, floorPlan));
+    fittedTo.current = ground;
     return () => observer.disconnect();
   }, [box, view, sheet, floorPlan, arms]);
 }

@@ -22,7 +22,8 @@ async function screenOf(page: Page, [x, y]: Pixel): Promise<{ x: number; y: numb
 
 /** Zooms in on a pixel with the wheel, as a careful planner would, and clicks it; then shows the whole picture again. */
 async function pick(page: Page, handle: string, pixel: Pixel): Promise<void> {
-  await page.getByRole('button', { name: `Select: ${handle}` }).click();
+  const select = page.getByRole('button', { name: `Select: ${handle}` });
+  if ((await select.getAttribute('aria-pressed')) !== 'true') await select.click();
   for (let turn = 0; turn < 20; turn++) {
     const { x, y, zoom } = await screenOf(page, pixel);
     if (zoom >= AIMING_ZOOM) break;

@@ -21,6 +21,13 @@ export class Sheet {
     return { x: box.x + (xMm - viewport.xMm) * viewport.scale, y: box.y + (viewport.yMm - yMm) * viewport.scale };
   }
 
+  /** Whether a floor point is on the board as it is shown now. */
+  async shows(xMm: number, yMm: number): Promise<boolean> {
+    const box = await this.canvas.boundingBox();
+    const { x, y } = await this.at(xMm, yMm);
+    return box !== null && x > box.x && x < box.x + box.width && y > box.y && y < box.y + box.height;
+  }
+
   /** Zooms in on a floor point until a picture pixel covers about a screen pixel; answers how many it covers. */
   async zoomTo(xMm: number, yMm: number, mmPerPx: number): Promise<number> {
     const zoom = async () =>
