@@ -104,6 +104,13 @@ function pairDifferences({ left, right }: ItemPair): ItemDifference[] {
     if (left.riserMm !== right.riserMm) note(`${right.name} riser`, fromTo(left.riserMm, right.riserMm));
     if (left.armId !== right.armId) note(`${right.name} arm`, 'another arm');
     if (!same(left.tool, right.tool)) note(`${right.name} tool`, 'another tool');
+    if (!same(left.part, right.part)) note(`${right.name} part`, 'another part');
+    if (left.targetCycleS !== right.targetCycleS) {
+      note(`${right.name} target cycle`, `${left.targetCycleS ?? 'none'} → ${right.targetCycleS ?? 'none'} s`);
+    }
+    if (left.sequence.length !== right.sequence.length) {
+      note(`${right.name} cycle`, `${left.sequence.length} → ${right.sequence.length} steps`);
+    }
   }
   if (left.kind === 'fixture' && right.kind === 'fixture') fixtureDifferences(left, right, note);
   if ('outlineMm' in left && 'outlineMm' in right) {
@@ -128,11 +135,24 @@ function fixtureDifferences(left: Fixture, right: Fixture, note: (what: string, 
       note(`${after.name} wanted speed`, `${before.speedMmS ?? 'none'} → ${after.speedMmS ?? 'none'} mm/s`);
     }
   }
+  if (!same(left.taskPaths.map(withoutIds), right.taskPaths.map(withoutIds))) {
+    note(`${right.name} task paths`, countOrRedrawn(left.taskPaths.length, right.taskPaths.length));
+  }
+  if (!same(left.taskPatterns.map(withoutIds), right.taskPatterns.map(withoutIds))) {
+    note(`${right.name} task patterns`, countOrRedrawn(left.taskPatterns.length, right.taskPatterns.length));
+  }
   const gone = left.taskPoints.length - points.length;
   const come = right.taskPoints.length - points.length;
   if (gone > 0) note(`${right.name} task points`, `${gone} taken away`);
   if (come > 0) note(`${right.name} task points`, `${come} new`);
 }
+
+/** Variants that were copied from one another have other ids for the same things. */
+const withoutIds = <T extends { id: string; robotId: string | null }>({ id: _id, robotId: _robotId, ...rest }: T) =>
+  rest;
+
+const countOrRedrawn = (before: number, after: number): string =>
+  before === after ? 'redrawn' : `${before} → ${after}`;
 
 /** How an item moved and turned; null where it did neither. */
 export function moveWords(left: Item, right: Item): string | null {

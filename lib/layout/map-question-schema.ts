@@ -8,7 +8,7 @@ import { mapSettingsSchema } from './map-settings';
  */
 export const mapQuestionSchema = z.object({
   armId: z.uuid(),
-  tool: toolSchema.omit({ name: true, massKg: true }),
+  tool: toolSchema.pick({ xMm: true, yMm: true, zMm: true, rollDeg: true, pitchDeg: true, yawDeg: true }),
   /** Height of the tool point above the base plate: tool height on the sheet less the riser. */
   toolHeightMm: z.number().min(-20_000).max(20_000),
   /** A fixed roll counts in the base frame. */

@@ -1,5 +1,7 @@
 import { z } from 'zod';
 import { heightRange, outline, placed } from './common';
+import { taskPathSchema } from './task-path';
+import { taskPatternSchema } from './task-pattern';
 import { taskPointSchema } from './task-point';
 
 export const fixtureSchema = z.object({
@@ -8,6 +10,8 @@ export const fixtureSchema = z.object({
   outlineMm: outline,
   ...heightRange,
   taskPoints: z.array(taskPointSchema).max(200).default([]),
+  taskPaths: z.array(taskPathSchema).max(50).default([]),
+  taskPatterns: z.array(taskPatternSchema).max(50).default([]),
 });
 
 export const obstacleSchema = z.object({ kind: z.literal('obstacle'), ...placed, outlineMm: outline, ...heightRange });

@@ -24,4 +24,7 @@ export * from './blocks';
 export * from './dimension';
 export * from './lines';
 export * from './robot';
+export * from './sequence';
+export * from './task-path';
+export * from './task-pattern';
 export * from './task-point';

@@ -1,5 +1,15 @@
 import { z } from 'zod';
 import { degrees, itemName, millimetres, placed } from './common';
+import { sequenceStepSchema } from './sequence';
+
+const mass = z.number().min(0, 'A mass is 0 kg or more.').max(5000, 'At most 5000 kg.');
+/** About the centre of mass, along the flange's axes, kg m². */
+const inertia = z.object({
+  xx: z.number().min(0).max(10_000),
+  yy: z.number().min(0).max(10_000),
+  zz: z.number().min(0).max(10_000),
+});
+const centre = z.object({ xMm: millimetres, yMm: millimetres, zMm: millimetres });
 
 /** The tool on a robot: offset of the tool point in the flange frame and a rotation about fixed x, y, z. */
 export const toolSchema = z.object({
@@ -10,7 +20,27 @@ export const toolSchema = z.object({
   rollDeg: degrees.default(0),
   pitchDeg: degrees.default(0),
   yawDeg: degrees.default(0),
-  massKg: z.number().min(0).max(5000).default(0),
+  massKg: mass.default(0),
+  /** Centre of mass in the flange frame, and moments of inertia about it; null: not known. */
+  centreMm: centre.nullable().default(null),
+  inertiaKgM2: inertia.nullable().default(null),
+});
+
+/** What the robot carries at its heaviest. */
+export const partSchema = z.object({
+  name: itemName.default('Part'),
+  massKg: mass,
+  /** How far it stands out from the tool point. */
+  radiusMm: z.number().min(0).max(20_000).default(0),
+  /** Centre of mass in the flange frame, and moments of inertia about it; null: not known. */
+  centreMm: centre.nullable().default(null),
+  inertiaKgM2: inertia.nullable().default(null),
+});
+
+/** What the arm's data sheet allows at the flange beside the payload. */
+export const wristRatingSchema = z.object({
+  momentNm: z.number().positive('A rating is above zero.').max(1_000_000),
+  inertiaKgM2: z.number().positive('A rating is above zero.').max(1_000_000),
 });
 
 export const robotSchema = z.object({
@@ -20,7 +50,13 @@ export const robotSchema = z.object({
   armId: z.uuid(),
   riserMm: z.number().min(0).max(20_000).default(0),
   tool: toolSchema.prefault({}),
+  part: partSchema.nullable().default(null),
+  wristRating: wristRatingSchema.nullable().default(null),
+  sequence: z.array(sequenceStepSchema).max(300, 'A sequence has at most 300 steps.').default([]),
+  targetCycleS: z.number().positive('A target time is above zero.').max(36_000).nullable().default(null),
 });
 
 export type Tool = z.infer<typeof toolSchema>;
+export type Part = z.infer<typeof partSchema>;
+export type WristRating = z.infer<typeof wristRatingSchema>;
 export type Robot = z.infer<typeof robotSchema>;

@@ -1,6 +1,7 @@
 import { literal, Op, QueryTypes, type Transaction, type WhereOptions } from 'sequelize';
 import { Layout, LayoutItem, Project, Revision } from '@/models';
 import type { StoredItem } from '@/lib/contracts/layouts';
+import { itemSchema } from '@/lib/layout/items';
 import { sequelize } from '../database';
 import { notFound } from '../errors';
 import { projectScope, seesDrafts, type Actor } from '../policy';
@@ -59,7 +60,8 @@ export async function storedItemsOf(layoutId: string, transaction?: Transaction)
     ],
     transaction,
   });
-  return inSheetOrder(rows.map(({ version, data }) => ({ version, item: data })));
+  // Parsed, so that items stored before a field was known have it too.
+  return inSheetOrder(rows.map(({ version, data }) => ({ version, item: itemSchema.parse(data) })));
 }
 
 /** The newest revision of each layout; layouts never issued are left out. */
