@@ -77,6 +77,16 @@ const png = () =>
     .png()
     .toBuffer();
 
+const layoutFile = {
+  format: 'elbowroom-layout',
+  version: 1,
+  name: 'From a file',
+  mapSettings: {},
+  arms: [],
+  floorPlan: null,
+  items: [],
+};
+
 // prettier-ignore
 export const TABLE: readonly Row[] = [
   //                                                       nobody link  other stranger viewer plan. integ. admin
@@ -147,4 +157,8 @@ export const TABLE: readonly Row[] = [
   row('GET',    'share/[token]/remarks',                    [404, 200,  404,  404,     404,   404,  404,   404], shared()),
   row('POST',   'share/[token]/remarks',                    [404, 201,  404,  404,     404,   404,  404,   404], shared(undefined, { ...remark, guest })),
   row('POST',   'share/[token]/remarks/[remarkId]/replies', [404, 201,  404,  404,     404,   404,  404,   404], shared(({ remarkId }) => ({ remarkId }), { body: 'Yes', guest })),
+  row('GET',    'exports/schema',                           [200, 200,  200,  200,     200,   200,  200,   200]),
+  // What was issued; a draft is refused to viewers (exports.test.ts).
+  row('GET',    'exports/[subject]/[subjectId]/[file]',     [401, 401,  404,  404,     200,   200,  200,   200], ({ revisionId }) => ({ params: { subject: 'revisions', subjectId: revisionId, file: 'layout.dxf' } })),
+  row('POST',   'projects/[projectId]/import',              [401, 401,  403,  404,     403,   201,  201,   201], withBody(project, layoutFile)),
 ];
