@@ -21,6 +21,8 @@ export const toolSchema = z.object({
   pitchDeg: degrees.default(0),
   yawDeg: degrees.default(0),
   massKg: mass.default(0),
+  /** How far the tool's body stands out round its tool point. */
+  radiusMm: z.number().min(0, 'A radius is 0 or more.').max(20_000).default(0),
   /** Centre of mass in the flange frame, and moments of inertia about it; null: not known. */
   centreMm: centre.nullable().default(null),
   inertiaKgM2: inertia.nullable().default(null),
@@ -43,6 +45,16 @@ export const wristRatingSchema = z.object({
   inertiaKgM2: z.number().positive('A rating is above zero.').max(1_000_000),
 });
 
+/** A limiting device on a joint: hard stop or safe software limit. Degrees for a turning joint, mm for a sliding one. */
+export const jointStopSchema = z
+  .object({
+    /** Counted from 1. */
+    joint: z.number().int().min(1).max(12),
+    min: z.number().min(-100_000).max(100_000),
+    max: z.number().min(-100_000).max(100_000),
+  })
+  .refine(({ min, max }) => min < max, { path: ['min'], message: 'A stop begins below where it ends.' });
+
 export const robotSchema = z.object({
   kind: z.literal('robot'),
   ...placed,
@@ -50,6 +62,8 @@ export const robotSchema = z.object({
   armId: z.uuid(),
   riserMm: z.number().min(0).max(20_000).default(0),
   tool: toolSchema.prefault({}),
+  /** What limits the restricted space; joints without one count with their whole range. */
+  jointStops: z.array(jointStopSchema).max(12).default([]),
   part: partSchema.nullable().default(null),
   wristRating: wristRatingSchema.nullable().default(null),
   sequence: z.array(sequenceStepSchema).max(300, 'A sequence has at most 300 steps.').default([]),
@@ -57,6 +71,7 @@ export const robotSchema = z.object({
 });
 
 export type Tool = z.infer<typeof toolSchema>;
+export type JointStop = z.infer<typeof jointStopSchema>;
 export type Part = z.infer<typeof partSchema>;
 export type WristRating = z.infer<typeof wristRatingSchema>;
 export type Robot = z.infer<typeof robotSchema>;
