@@ -1,5 +1,6 @@
 import { floorToItem, itemToFloor, type PointMm } from '@/lib/layout/geometry';
 import type { Fixture, Item } from '@/lib/layout/items';
+import { noteBoxMm } from '@/lib/layout/note-lines';
 import type { FloorBounds } from '@/lib/layout/viewport';
 import type { Items } from './changes';
 import { inOrder } from './order';
@@ -26,11 +27,17 @@ function localPoints(item: Item): readonly PointMm[] {
     }
     case 'fixture':
     case 'obstacle':
+    case 'zone':
       return item.outlineMm;
     case 'guardLine':
     case 'walkway':
+    case 'conveyor':
+    case 'protectiveDevice':
       return item.pointsMm;
+    case 'note':
+      return noteBoxMm(item);
     case 'dimension':
+    case 'sectionLine':
       return [item.fromMm, item.toMm];
   }
 }

@@ -2,13 +2,24 @@ import { boundsOfPoints } from '@/lib/layout/viewport';
 import type { Item, ItemKind } from '@/lib/layout/items';
 import { put, type Change, type Items } from './changes';
 import { fixtureAt, footprint } from './footprint';
-import { newBlock, newDimension, newLine, newRobot, newTaskPoint } from './make-items';
+import {
+  newBlock,
+  newColumn,
+  newDimension,
+  newLine,
+  newNote,
+  newRobot,
+  newSectionLine,
+  newTaskPoint,
+  newZone,
+  type Measured,
+} from './make-items';
 import { snapSpot, type Snapping } from './snapping';
 import { chosen, type Selection } from './tools/tool';
 
 /** Placing without a pointer: the thing appears in the middle of the view, and its place is typed afterwards. */
 export interface PlaceOrder {
-  readonly kind: ItemKind;
+  readonly kind: ItemKind | 'column';
   readonly armId?: string;
   readonly middle: { readonly xMm: number; readonly yMm: number };
   readonly snapping: Snapping;
@@ -53,20 +64,26 @@ function made(items: Items, { kind, armId, middle, snapping, newId }: PlaceOrder
       return newLine(items, kind, id, corners, true);
     }
     case 'walkway':
-      return newLine(
-        items,
-        kind,
-        id,
-        [
-          [xMm - LINE_MM / 2, yMm],
-          [xMm + LINE_MM / 2, yMm],
-        ],
-        false,
-      );
+    case 'conveyor':
+    case 'protectiveDevice':
+      return newLine(items, kind, id, levelLine(xMm, yMm), false);
     case 'dimension':
-      return newDimension(items, id, [xMm - LINE_MM / 2, yMm], [xMm + LINE_MM / 2, yMm], 0);
+      return newDimension(items, id, ...levelLine(xMm, yMm), 0);
+    case 'sectionLine':
+      return newSectionLine(items, id, ...levelLine(xMm, yMm));
+    case 'column':
+      return newColumn(items, { id, xMm, yMm });
+    case 'zone':
+      return newZone(items, { id, xMm, yMm });
+    case 'note':
+      return newNote(items, { id, xMm, yMm });
   }
 }
+
+const levelLine = (xMm: number, yMm: number): [[number, number], [number, number]] => [
+  [xMm - LINE_MM / 2, yMm],
+  [xMm + LINE_MM / 2, yMm],
+];
 
 /** The middle, or the nearest spot to its right where nothing else is placed. */
 function freeSpot(items: Items, middle: PlaceOrder['middle']): PlaceOrder['middle'] {
@@ -97,13 +114,15 @@ export function placeTaskPointInView(
   };
 }
 
-/** A dimension between the places of two chosen items. */
+/** A dimension between the places of two chosen items; it follows them. */
 export function measureBetween(items: Items, ids: readonly string[], newId: () => string): Placed | null {
   const [one, other] = ids.map((id) => items.get(id));
   if (!one || !other) return null;
-  const item = newDimension(items, newId(), [one.xMm, one.yMm], [other.xMm, other.yMm], APART_MM);
+  const item = newDimension(items, newId(), placeOf(one), placeOf(other), APART_MM);
   return { label: `Place ${item.name}`, changes: [put(items, item)], selection: chosen(item.id) };
 }
+
+const placeOf = (item: Item): Measured => ({ atMm: [item.xMm, item.yMm], item });
 
 /** The part of the floor that the items take; null on an empty sheet. */
 export function boundsOfItems(items: Items) {

@@ -3,7 +3,7 @@ import { boundsOfPoints, unionBounds, type FloorBounds } from '@/lib/layout/view
 import { footprint } from './footprint';
 
 /** Kinds that the work happens at; walkways and dimensions reach far beyond it. */
-const WORK_KINDS: readonly Item['kind'][] = ['robot', 'fixture', 'obstacle', 'guardLine'];
+const WORK_KINDS: readonly Item['kind'][] = ['robot', 'fixture', 'obstacle', 'conveyor', 'guardLine'];
 /** How much of a robot's reach a reader wants to see round its base. */
 const SEEN_REACH_SHARE = 0.85;
 

@@ -1,7 +1,9 @@
 import type Konva from 'konva';
 import type { Item } from '@/lib/layout/items';
 import { inkOf, pixelOf, traceCircle, tracePath, type PointMm } from './ink';
+import { conveyorOutline } from './items/conveyor';
 import { walkwayEdges } from './items/lines';
+import { lettersOfNote } from './items/note';
 
 /** How thick a line is to a pointer, px. */
 const GRIP_PX = 14;
@@ -42,6 +44,18 @@ export function traceHit(context: Konva.Context, shape: Konva.Shape, item: Item,
     case 'walkway':
       walkwayEdges(item.pointsMm, item.widthMm).forEach((edge) => along(edge, false));
       return;
+    case 'conveyor':
+      tracePath(ink, conveyorOutline(item), true);
+      ink.lineWidth = 6 * px;
+      ink.fill();
+      return ink.stroke();
+    case 'sectionLine':
+      return along([item.fromMm, item.toMm], false);
+    case 'note': {
+      const { widthMm, heightMm } = lettersOfNote(item, px);
+      const slack = 4 * px;
+      return ink.fillRect(-slack, -heightMm - slack, widthMm + 2 * slack, heightMm + 2 * slack);
+    }
     case 'dimension': {
       const [[x1, y1], [x2, y2]] = [item.fromMm, item.toMm];
       const length = Math.hypot(x2 - x1, y2 - y1) || 1;

@@ -1,4 +1,5 @@
 import type { Item } from '@/lib/layout/items';
+import { noteBoxMm } from '@/lib/layout/note-lines';
 import { boundsOfPoints } from '@/lib/layout/viewport';
 import type { PointMm } from './ink';
 import { walkwayEdges } from './items/lines';
@@ -31,7 +32,12 @@ function pointsOf(item: Exclude<Item, { kind: 'robot' }>): readonly PointMm[] {
     case 'guardLine':
       return item.pointsMm;
     case 'walkway':
+    case 'conveyor':
       return walkwayEdges(item.pointsMm, item.widthMm).flat();
+    case 'sectionLine':
+      return [item.fromMm, item.toMm];
+    case 'note':
+      return noteBoxMm(item);
     case 'dimension': {
       const { fromMm, toMm, offsetMm } = item;
       const along = Math.atan2(toMm[1] - fromMm[1], toMm[0] - fromMm[0]) + Math.PI / 2;

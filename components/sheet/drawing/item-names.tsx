@@ -6,6 +6,7 @@ import type { Item } from '@/lib/layout/items';
 import type { Palette } from '@/lib/layout/palette';
 import { visibleBounds } from '@/lib/layout/viewport';
 import { inkOf, pixelOf } from './ink';
+import { drawConveyorName } from './items/conveyor';
 import { drawGuardLineName, drawWalkwayName } from './items/lines';
 import { drawOutlineName } from './items/outlined';
 import { drawRobotName } from './items/robot';
@@ -53,6 +54,7 @@ export const ItemNames = memo(function ItemNames({ items, arms, palette }: ItemN
             drawRobotName(ink, palette, px, item, robotSizes(reachMm).baseRadiusMm);
           } else if (item.kind === 'fixture' || item.kind === 'obstacle') drawOutlineName(ink, palette, px, item);
           else if (item.kind === 'guardLine') drawGuardLineName(ink, palette, px, item);
+          else if (item.kind === 'conveyor') drawConveyorName(ink, palette, px, item);
           else if (item.kind === 'walkway') drawWalkwayName(ink, palette, px, item);
           ink.restore();
         }
@@ -64,11 +66,7 @@ export const ItemNames = memo(function ItemNames({ items, arms, palette }: ItemN
 /** How far an item's own points lie from its place, mm. */
 function sizeOf(item: Item): number {
   const points =
-    item.kind === 'fixture' || item.kind === 'obstacle'
-      ? item.outlineMm
-      : item.kind === 'guardLine' || item.kind === 'walkway'
-        ? item.pointsMm
-        : [];
+    item.kind === 'fixture' || item.kind === 'obstacle' ? item.outlineMm : 'pointsMm' in item ? item.pointsMm : [];
   let size = 0;
   for (const [x, y] of points) size = Math.max(size, Math.abs(x), Math.abs(y));
   return size * Math.SQRT2;

@@ -5,9 +5,12 @@ import type Konva from 'konva';
 import { Shape } from 'react-konva';
 import type { Item } from '@/lib/layout/items';
 import type { Palette } from '@/lib/layout/palette';
+import { drawConveyor } from './items/conveyor';
 import { drawDimension, drawGuardLine, drawWalkway } from './items/lines';
+import { drawNote } from './items/note';
 import { drawFixture, drawObstacle } from './items/outlined';
 import { drawReachRing, drawRobot } from './items/robot';
+import { drawSectionLine } from './items/section-line';
 import { drawTaskPoints, taskPointAt } from './items/task-points';
 import { traceHit } from './hit-areas';
 import { inkOf, pixelOf } from './ink';
@@ -60,6 +63,12 @@ export const ItemShape = memo(function ItemShape(props: ItemShapeProps) {
         return drawWalkway(ink, palette, px, item);
       case 'dimension':
         return drawDimension(ink, palette, px, item);
+      case 'conveyor':
+        return drawConveyor(ink, palette, px, item);
+      case 'sectionLine':
+        return drawSectionLine(ink, palette, px, item);
+      case 'note':
+        return drawNote(ink, palette, px, item);
     }
   };
 

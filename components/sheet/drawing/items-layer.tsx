@@ -28,12 +28,17 @@ export interface ItemsLayerProps {
 const NOTHING: ReadonlySet<string> = new Set();
 /** Lines lie under bodies, robots over them, whatever order they were placed in. */
 const DEPTH: Record<Item['kind'], number> = {
+  zone: 0,
   walkway: 0,
   guardLine: 1,
+  protectiveDevice: 1,
   obstacle: 2,
-  fixture: 3,
-  dimension: 4,
-  robot: 5,
+  conveyor: 3,
+  fixture: 4,
+  sectionLine: 5,
+  dimension: 6,
+  robot: 7,
+  note: 8,
 };
 
 /** Everything that stands on the sheet, names last so that no body covers them. Two canvases: resting and chosen. */

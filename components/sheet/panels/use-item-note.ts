@@ -2,7 +2,8 @@
 
 import { useBoard } from '@/components/sheet/editor/board-context';
 import { useVerdicts } from '@/components/sheet/editor/readings-context';
-import { placeWords, printed } from '@/lib/editor/measure-text';
+import { useUnits } from '@/lib/client/use-units';
+import { placeWords } from '@/lib/editor/measure-text';
 import type { Item } from '@/lib/layout/items';
 import { fixtureWords } from './verdict-order';
 
@@ -16,11 +17,13 @@ export interface ItemNote {
 export function useItemNote(item: Item): ItemNote {
   const { arms } = useBoard();
   const { byPoint } = useVerdicts();
+  const units = useUnits();
+  const place = placeWords(item, units.unit);
   switch (item.kind) {
     case 'robot': {
       const arm = arms.get(item.armId)?.name;
       const title = arm ? `${item.name} · ${arm[0].toLowerCase()}${arm.slice(1)}` : item.name;
-      return { title, words: placeWords(item), tone: 'figures' };
+      return { title, words: place, tone: 'figures' };
     }
     case 'fixture': {
       const verdicts = item.taskPoints.flatMap(({ id }) => byPoint.get(id) ?? []);
@@ -29,11 +32,17 @@ export function useItemNote(item: Item): ItemNote {
     }
     case 'dimension': {
       const length = Math.hypot(item.toMm[0] - item.fromMm[0], item.toMm[1] - item.fromMm[1]);
-      return { title: item.name, words: `${printed(length, 0)} mm`, tone: 'figures' };
+      return { title: item.name, words: units.length(length), tone: 'figures' };
     }
+    case 'conveyor': {
+      const speed = item.speedMmS === null ? 'speed not given' : `${printed(item.speedMmS, 0)} mm/s`;
+      return { title: item.name, words: speed, tone: 'soft' };
+    }
+    case 'note':
+      return { title: item.name, words: item.text.split('\n')[0].slice(0, 60), tone: 'soft' };
     case 'walkway':
-      return { title: item.name, words: `keep ${printed(item.widthMm, 0)} mm clear`, tone: 'soft' };
+      return { title: item.name, words: `keep ${units.length(item.widthMm)} clear`, tone: 'soft' };
     default:
-      return { title: item.name, words: placeWords(item), tone: 'figures' };
+      return { title: item.name, words: place, tone: 'figures' };
   }
 }

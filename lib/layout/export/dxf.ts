@@ -8,6 +8,7 @@ const SPOT_RADIUS_MM = 25;
 /** Colour numbers of the AutoCAD index, which every reader of DXF knows: 1 red, 3 green, 5 blue, 7 black or white, 8 grey. */
 const COLOURS: Record<Layer, number> = {
   WALKWAYS: 8,
+  CONVEYORS: 7,
   OBSTACLES: 8,
   FIXTURES: 7,
   'GUARD-LINES': 1,
@@ -15,6 +16,8 @@ const COLOURS: Record<Layer, number> = {
   ROBOTS: 7,
   'TASK-POINTS': 3,
   DIMENSIONS: 5,
+  SECTIONS: 5,
+  NOTES: 7,
   NAMES: 7,
 };
 
@@ -50,7 +53,7 @@ export function dxfOf(shapes: readonly Shape[]): string {
         });
         break;
       case 'words':
-        dxf.addText(point3d(...shape.at, 0), LETTER_MM, plainText(shape.text), {
+        dxf.addText(point3d(...shape.at, 0), shape.heightMm ?? LETTER_MM, plainText(shape.text), {
           layerName,
           rotation: shape.angleDeg,
         });

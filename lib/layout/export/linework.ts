@@ -1,6 +1,19 @@
 import type { Arm } from '@/lib/kinematics/types';
 import { itemToFloor, type PointMm } from '../geometry';
-import type { Dimension, Fixture, GuardLine, Item, Obstacle, Robot, Walkway } from '../items';
+import { fenceStrokes, placedDoors, type PlacedDoor } from '../guard-doors';
+import type {
+  Conveyor,
+  Dimension,
+  Fixture,
+  GuardLine,
+  Item,
+  Note,
+  Obstacle,
+  Robot,
+  SectionLine,
+  Walkway,
+} from '../items';
+import { LINE_PITCH, noteLines } from '../note-lines';
 import { robotSizes, robotSticks } from '../robot-sticks';
 import { walkwayEdges } from '../walkway-edges';
 
@@ -11,6 +24,7 @@ import { walkwayEdges } from '../walkway-edges';
 
 export const LAYERS = [
   'WALKWAYS',
+  'CONVEYORS',
   'OBSTACLES',
   'FIXTURES',
   'GUARD-LINES',
@@ -18,6 +32,8 @@ export const LAYERS = [
   'ROBOTS',
   'TASK-POINTS',
   'DIMENSIONS',
+  'SECTIONS',
+  'NOTES',
   'NAMES',
 ] as const;
 export type Layer = (typeof LAYERS)[number];
@@ -55,13 +71,15 @@ export interface Spot {
 }
 export interface Words {
   readonly kind: 'words';
-  readonly layer: 'NAMES' | 'DIMENSIONS';
+  readonly layer: 'NAMES' | 'DIMENSIONS' | 'SECTIONS' | 'NOTES';
   readonly itemId: string;
   readonly of: Item['kind'];
   readonly at: PointMm;
   /** Turn of the baseline, upright to a reader, degrees. */
   readonly angleDeg: number;
   readonly text: string;
+  /** Height of the letters on the floor where the sheet gives one, mm. */
+  readonly heightMm?: number;
 }
 
 /** What is known of a robot's arm, and the posture that it is drawn in (rad or m); none draws its base alone. */
@@ -90,6 +108,12 @@ function shapesOf(item: Item, robot: DrawnRobot | undefined): Shape[] {
       return walkwayShapes(item);
     case 'dimension':
       return dimensionShapes(item);
+    case 'conveyor':
+      return conveyorShapes(item);
+    case 'sectionLine':
+      return sectionShapes(item);
+    case 'note':
+      return noteShapes(item);
   }
 }
 
@@ -184,18 +208,41 @@ function fixtureShapes(fixture: Fixture): Shape[] {
 
 function guardShapes(guard: GuardLine): Shape[] {
   const points = onFloor(guard, guard.pointsMm);
-  const line: Line = {
-    kind: 'line',
-    layer: 'GUARD-LINES',
-    itemId: guard.id,
-    points,
-    closed: guard.closed,
-    zMm: 0,
-    part: 'body',
-  };
   const corner = points.reduce((best, point) => (point[1] - point[0] > best[1] - best[0] ? point : best));
-  return [line, name(guard, corner)];
+  if (guard.doors.length === 0) {
+    const { closed } = guard;
+    const whole: Line = { kind: 'line', layer: 'GUARD-LINES', itemId: guard.id, points, closed, zMm: 0, part: 'body' };
+    return [whole, name(guard, corner)];
+  }
+  return [
+    ...fenceStrokes(guard).map((stroke) => ({ ...detail(guard, 'GUARD-LINES', stroke), part: 'body' as const })),
+    ...placedDoors(guard).map((placed) => detail(guard, 'GUARD-LINES', doorPath(placed))),
+    name(guard, corner),
+  ];
 }
+
+/** A hinged leaf standing open and the quarter circle that it swings through; a sliding one pushed half aside. */
+function doorPath({ door, fromMm, toMm, opensTo }: PlacedDoor): PointMm[] {
+  const [hinge, latch] = door.hinge === 'start' ? [fromMm, toMm] : [toMm, fromMm];
+  const [wx, wy] = [latch[0] - hinge[0], latch[1] - hinge[1]];
+  const width = Math.hypot(wx, wy);
+  if (door.kind === 'sliding') {
+    const at = (share: number): PointMm => [
+      hinge[0] + wx * share + opensTo[0] * 40,
+      hinge[1] + wy * share + opensTo[1] * 40,
+    ];
+    return [at(0.5), at(-0.5)];
+  }
+  const arc = Array.from({ length: SWING_SIDES + 1 }, (_, index): PointMm => {
+    const turn = (index / SWING_SIDES) * (Math.PI / 2);
+    const [along, across] = [Math.cos(turn), Math.sin(turn) * width];
+    return [hinge[0] + wx * along + opensTo[0] * across, hinge[1] + wy * along + opensTo[1] * across];
+  });
+  return [...arc, hinge];
+}
+
+/** The quarter circle of a door leaf is flattened to this many sides. */
+const SWING_SIDES = 12;
 
 function walkwayShapes(walkway: Walkway): Shape[] {
   const edges = walkwayEdges(walkway.pointsMm, walkway.widthMm);
@@ -241,6 +288,57 @@ function dimensionShapes(dimension: Dimension): Shape[] {
       text: String(Math.round(length)),
     },
   ];
+}
+
+function conveyorShapes(conveyor: Conveyor): Shape[] {
+  const [left, right] = walkwayEdges(conveyor.pointsMm, conveyor.widthMm);
+  const [before, last] = conveyor.pointsMm.slice(-2);
+  const length = Math.hypot(last[0] - before[0], last[1] - before[1]) || 1;
+  const [ux, uy] = [(last[0] - before[0]) / length, (last[1] - before[1]) / length];
+  const size = Math.min(200, length / 3, conveyor.widthMm / 2);
+  const wing = (side: number): PointMm => [
+    last[0] - ux * size - uy * side * size * 0.4,
+    last[1] - uy * size + ux * side * size * 0.4,
+  ];
+  const [first, second] = onFloor(conveyor, conveyor.pointsMm);
+  const along = (Math.atan2(second[1] - first[1], second[0] - first[0]) * 180) / Math.PI;
+  return [
+    body(conveyor, 'CONVEYORS', [...left, ...[...right].reverse()], conveyor.zFromMm),
+    detail(conveyor, 'CONVEYORS', [wing(1), last, wing(-1)], 'arrow', conveyor.zToMm),
+    name(conveyor, [(first[0] + second[0]) / 2, (first[1] + second[1]) / 2], conveyor.name, uprightDeg(along)),
+  ];
+}
+
+function sectionShapes(section: SectionLine): Shape[] {
+  const words = (at: PointMm): Words => ({
+    kind: 'words',
+    layer: 'SECTIONS',
+    itemId: section.id,
+    of: 'sectionLine',
+    at,
+    angleDeg: 0,
+    text: section.letter,
+  });
+  return [
+    detail(section, 'SECTIONS', [section.fromMm, section.toMm]),
+    ...onFloor(section, [section.fromMm, section.toMm]).map(words),
+  ];
+}
+
+function noteShapes(note: Note): Shape[] {
+  return noteLines(note).map((text, index): Words => {
+    const [at] = onFloor(note, [[0, -note.sizeMm * (1 + index * LINE_PITCH)]]);
+    return {
+      kind: 'words',
+      layer: 'NOTES',
+      itemId: note.id,
+      of: 'note',
+      at,
+      angleDeg: note.angleDeg,
+      text,
+      heightMm: note.sizeMm,
+    };
+  });
 }
 
 /** Within (−90, 90]: letters never stand on their heads. */

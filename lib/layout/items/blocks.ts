@@ -14,7 +14,14 @@ export const fixtureSchema = z.object({
   taskPatterns: z.array(taskPatternSchema).max(50).default([]),
 });
 
-export const obstacleSchema = z.object({ kind: z.literal('obstacle'), ...placed, outlineMm: outline, ...heightRange });
+export const obstacleSchema = z.object({
+  kind: z.literal('obstacle'),
+  ...placed,
+  outlineMm: outline,
+  ...heightRange,
+  /** A column of the building is drawn as cut; anything else in the way is an obstacle. */
+  form: z.enum(['obstacle', 'column']).default('obstacle'),
+});
 
 export type Fixture = z.infer<typeof fixtureSchema>;
 export type Obstacle = z.infer<typeof obstacleSchema>;

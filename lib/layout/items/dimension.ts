@@ -8,6 +8,14 @@ export const dimensionSchema = z.object({
   fromMm: pointMm,
   toMm: pointMm,
   offsetMm: millimetres.default(0),
+  /**
+   * Items that an end is attached to, and the measured point in that item's frame. An attached end stands where its item
+   * carries it (`lib/layout/attached-dimensions.ts`); the point above is where it last stood, for when the item is gone.
+   */
+  fromItemId: z.uuid().optional(),
+  fromAnchorMm: pointMm.optional(),
+  toItemId: z.uuid().optional(),
+  toAnchorMm: pointMm.optional(),
 });
 
 export type Dimension = z.infer<typeof dimensionSchema>;

@@ -1,7 +1,9 @@
 import type { Dimension, GuardLine, Walkway } from '@/lib/layout/items';
 import type { Palette } from '@/lib/layout/palette';
+import { fenceStrokes } from '@/lib/layout/guard-doors';
 import { walkwayEdges } from '@/lib/layout/walkway-edges';
 import { letter, strokeInk, tracePath, uprightAngle, type Ink, type PointMm } from '../ink';
+import { drawDoors } from './guard-doors';
 
 export { walkwayEdges } from '@/lib/layout/walkway-edges';
 
@@ -9,12 +11,20 @@ const radians = (degrees: number) => (degrees * Math.PI) / 180;
 
 /** A guard line: red dots, the drawing's one loud line. Item frame. */
 export function drawGuardLine(ink: Ink, palette: Palette, px: number, guard: GuardLine): void {
-  tracePath(ink, guard.pointsMm, guard.closed);
   ink.lineCap = 'round';
   ink.setLineDash([0, 6 * px]);
+  if (guard.doors.length === 0) tracePath(ink, guard.pointsMm, guard.closed);
+  else {
+    ink.beginPath();
+    for (const [from, to] of fenceStrokes(guard)) {
+      ink.moveTo(...from);
+      ink.lineTo(...to);
+    }
+  }
   strokeInk(ink, palette.red, 2.2 * px);
   ink.setLineDash([]);
   ink.lineCap = 'butt';
+  drawDoors(ink, palette, px, guard);
 }
 
 /** The guard line's name stands over its upper left corner. */

@@ -6,6 +6,8 @@ import { labelEdge } from './label-edge';
 const radians = (degrees: number) => (degrees * Math.PI) / 180;
 /** Below this size on the screen a name would only smudge the drawing. */
 const LEAST_NAMED_PX = 26;
+/** Columns stand in rows and bear dull names: they are named only where there is room. */
+const LEAST_NAMED_COLUMN_PX = 60;
 
 /** A fixture's body: outline and crossed diagonals on thin paper, so that the map shows through. Item frame. */
 export function drawFixture(ink: Ink, palette: Palette, px: number, fixture: Fixture): void {
@@ -45,18 +47,42 @@ export function drawFixture(ink: Ink, palette: Palette, px: number, fixture: Fix
   strokeInk(ink, palette.ink, 1.6 * px);
 }
 
-/** An obstacle's body: solid, quieter than a fixture, with close hatching along its lower left as cut material is drawn. */
+/** An obstacle's body: solid, quieter than a fixture; a column of the building as cut material is drawn. */
 export function drawObstacle(ink: Ink, palette: Palette, px: number, obstacle: Obstacle): void {
   tracePath(ink, obstacle.outlineMm, true);
   ink.fillStyle = palette.hair;
   ink.fill();
+  if (obstacle.form === 'column') hatchColumn(ink, palette, px, obstacle);
   strokeInk(ink, palette.inkSoft, 1.4 * px);
+}
+
+const HATCH_PX = 6;
+
+/** Cut material is hatched at 45° on the drawing, however the column is turned. The outline stays the current path. */
+function hatchColumn(ink: Ink, palette: Palette, px: number, { outlineMm, angleDeg }: Obstacle): void {
+  const reach = Math.max(...outlineMm.map(([x, y]) => Math.hypot(x, y)));
+  // A column of a few pixels would only turn grey.
+  if (reach < HATCH_PX * px) return;
+  ink.save();
+  ink.clip();
+  ink.rotate(radians(45 - angleDeg));
+  ink.beginPath();
+  const pitch = Math.max(HATCH_PX * px, reach / 40);
+  for (let y = -Math.ceil(reach / pitch) * pitch; y <= reach; y += pitch) {
+    ink.moveTo(-reach, y);
+    ink.lineTo(reach, y);
+  }
+  ink.globalAlpha = 0.6;
+  strokeInk(ink, palette.inkSoft, 0.7 * px);
+  ink.restore();
+  tracePath(ink, outlineMm, true);
 }
 
 /** The name of a fixture or obstacle along its lower edge; left out where the thing is too small to be named. */
 export function drawOutlineName(ink: Ink, palette: Palette, px: number, item: Fixture | Obstacle): void {
   const edge = labelEdge(item.outlineMm, radians(item.angleDeg));
-  if (edge.lengthMm / px < LEAST_NAMED_PX) return;
+  const isColumn = item.kind === 'obstacle' && item.form === 'column';
+  if (edge.lengthMm / px < (isColumn ? LEAST_NAMED_COLUMN_PX : LEAST_NAMED_PX)) return;
   letter(ink, palette, px, {
     text: item.name,
     xMm: edge.xMm,
