@@ -1,4 +1,4 @@
-import { formatFigure } from '@/components/ui/figure';
+import { formatFigure } from '@/components/ui/format-figure';
 import type { TitleBlockCell } from '@/components/ui/title-block';
 
 const NO_BREAK_SPACE = '\u00a0';

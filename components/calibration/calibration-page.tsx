@@ -5,7 +5,7 @@ import { useRouter } from 'next/navigation';
 import { useEffect, useState } from 'react';
 import { SubjectFault } from '@/components/shell/subject-fault';
 import { Button } from '@/components/ui/button';
-import { formatFigure } from '@/components/ui/figure';
+import { formatFigure } from '@/components/ui/format-figure';
 import { LinkButton } from '@/components/ui/link-button';
 import { LoadingLine } from '@/components/ui/loading-line';
 import { Notice } from '@/components/ui/notice';

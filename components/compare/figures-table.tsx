@@ -1,6 +1,6 @@
 import { classNames } from '@/components/ui/class-names';
 import { DataCell, DataRow, DataTable, HeadCell } from '@/components/ui/data-table';
-import { formatFigure } from '@/components/ui/figure';
+import { formatFigure } from '@/components/ui/format-figure';
 import { changeOf, verdictOf, type ComparedFigure } from '@/lib/layout/compared-figures';
 
 interface FiguresTableProps {

@@ -1,5 +1,5 @@
 import { ScaleBar } from '@/components/sheet/map-key/scale-bar';
-import { formatFigure } from '@/components/ui/figure';
+import { formatFigure } from '@/components/ui/format-figure';
 import type { MapMeasure } from '@/lib/layout/map-settings';
 import { MEASURE_WORDS, measureText } from '@/lib/layout/measure-words';
 import { divergingColour, type MapScale, type ValueRange } from '@/lib/layout/scales';

@@ -1,5 +1,5 @@
 import { DataCell, DataRow, DataTable, HeadCell } from '@/components/ui/data-table';
-import { formatFigure } from '@/components/ui/figure';
+import { formatFigure } from '@/components/ui/format-figure';
 import { Tag } from '@/components/ui/tag';
 import type { Robot } from '@/lib/layout/items';
 import { VERDICT_BANDS, type VerdictBand } from '@/lib/layout/verdict-words';

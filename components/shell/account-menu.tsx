@@ -8,6 +8,8 @@ import { chooseBoard, readBoardChoice, type BoardChoice } from '@/components/ui/
 import { Button } from '@/components/ui/button';
 import { Menu, MenuChoice, MenuHeading, MenuItem, MenuRule } from '@/components/ui/menu';
 import { useAccount } from '@/lib/client/account-context';
+import { chooseUnit, useUnits } from '@/lib/client/use-units';
+import type { LengthUnit } from '@/lib/layout/length-units';
 import { ROLE_NAMES } from './role-words';
 import { sectionsFor } from './sections';
 
@@ -15,6 +17,11 @@ const BOARD_CHOICES: readonly { value: BoardChoice; label: string }[] = [
   { value: 'device', label: 'As the device' },
   { value: 'day', label: 'Day paper' },
   { value: 'night', label: 'Night board' },
+];
+
+const UNIT_CHOICES: readonly { value: LengthUnit; label: string }[] = [
+  { value: 'mm', label: 'Millimetres' },
+  { value: 'in', label: 'Inches' },
 ];
 
 const initials = (name: string): string =>
@@ -25,9 +32,10 @@ const initials = (name: string): string =>
     .filter((_, index, all) => index === 0 || index === all.length - 1)
     .join('');
 
-/** Who is signed in, the ways to the other pages, the board, and the way out. */
+/** Who is signed in, the ways to the other pages, the board, the units, and the way out. */
 export function AccountMenu() {
   const account = useAccount();
+  const { unit } = useUnits();
   const [choice, setChoice] = useState<BoardChoice>('device');
   return (
     <Menu
@@ -66,6 +74,8 @@ export function AccountMenu() {
         }}
         options={BOARD_CHOICES}
       />
+      <MenuRule />
+      <MenuChoice label="Units" value={unit} onValueChange={chooseUnit} options={UNIT_CHOICES} />
       <MenuRule />
       <MenuItem
         icon={<LogOut aria-hidden className="size-4" />}

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { formatFigure } from './figure';
+import { formatFigure } from './format-figure';
 import { sayMoment } from './moment';
 import { parseNumber } from './parse-number';
 

@@ -1,27 +1,9 @@
+'use client';
+
+import { useUnits } from '@/lib/client/use-units';
+import { MM_PER_UNIT } from '@/lib/layout/length-units';
 import { classNames } from './class-names';
-
-interface FigureFormat {
-  decimals?: number;
-  /** Write + before a gain. */
-  signed?: boolean;
-}
-
-const NO_BREAK_SPACE = '\u00a0';
-const MINUS = '\u2212';
-
-/** A number as the sheet writes it: a real minus, fixed decimals, thousands apart from 10 000 on, a dash for nothing. */
-export function formatFigure(
-  value: number | null | undefined,
-  { decimals = 0, signed = false }: FigureFormat = {},
-): string {
-  if (value === null || value === undefined || !Number.isFinite(value)) return '–';
-  const digits = Math.abs(value).toFixed(decimals);
-  const [whole = '', fraction] = digits.split('.');
-  const grouped = whole.length > 4 ? whole.replace(/\B(?=(\d{3})+$)/g, NO_BREAK_SPACE) : whole;
-  const isZero = Number(digits) === 0;
-  const sign = isZero ? '' : value < 0 ? MINUS : signed ? '+' : '';
-  return `${sign}${grouped}${fraction ? `.${fraction}` : ''}`;
-}
+import { formatFigure, NO_BREAK_SPACE, type FigureFormat } from './format-figure';
 
 interface FigureProps extends FigureFormat {
   value: number | null | undefined;
@@ -29,8 +11,13 @@ interface FigureProps extends FigureFormat {
   className?: string;
 }
 
-/** A number with its unit, in the mono face. */
-export function Figure({ value, unit, className, ...format }: FigureProps) {
+/** A number with its unit, in the mono face. A length in mm is written in the reader's own unit. */
+export function Figure({ value: given, unit: givenUnit, className, ...givenFormat }: FigureProps) {
+  const { unit: lengthUnit } = useUnits();
+  const isInch = givenUnit === 'mm' && lengthUnit === 'in';
+  const unit = isInch ? 'in' : givenUnit;
+  const value = isInch && typeof given === 'number' ? given / MM_PER_UNIT.in : given;
+  const format = isInch ? { ...givenFormat, decimals: (givenFormat.decimals ?? 0) + 2 } : givenFormat;
   const text = formatFigure(value, format);
   const joint = unit === '°' || unit === '%' ? '' : NO_BREAK_SPACE;
   return (

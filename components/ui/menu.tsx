@@ -96,3 +96,28 @@ export function MenuRule() {
 export function MenuHeading({ children }: { children: ReactNode }) {
   return <DropdownMenu.Label className="px-3 py-2 text-sm text-ink-soft">{children}</DropdownMenu.Label>;
 }
+
+interface MenuCheckProps {
+  checked: boolean;
+  onCheckedChange: (checked: boolean) => void;
+  children: ReactNode;
+}
+
+/** One thing that is on or off; the menu stays open, since there are often several. */
+export function MenuCheck({ checked, onCheckedChange, children }: MenuCheckProps) {
+  return (
+    <DropdownMenu.CheckboxItem
+      checked={checked}
+      onCheckedChange={onCheckedChange}
+      onSelect={(event) => event.preventDefault()}
+      className={ITEM}
+    >
+      <span className="size-4 shrink-0">
+        <DropdownMenu.ItemIndicator>
+          <Check aria-hidden className="size-4 text-petrol" />
+        </DropdownMenu.ItemIndicator>
+      </span>
+      {children}
+    </DropdownMenu.CheckboxItem>
+  );
+}

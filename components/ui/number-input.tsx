@@ -1,6 +1,9 @@
 'use client';
 
 import { useState, type ComponentProps, type KeyboardEvent } from 'react';
+import { useUnits } from '@/lib/client/use-units';
+import { parseMeasure } from '@/lib/editor/measure-text';
+import { MM_PER_UNIT, stepIn } from '@/lib/layout/length-units';
 import { classNames } from './class-names';
 import { CONTROL_LOOK } from './control-look';
 import { useFieldWiring } from './field-context';
@@ -26,27 +29,44 @@ interface NumberInputProps extends Passed {
 const show = (value: number | null, decimals: number): string =>
   value === null || !Number.isFinite(value) ? '' : String(Number(value.toFixed(decimals)));
 
-/** A number with its unit. The text being typed is kept as typed until the field is left. */
+/**
+ * A number with its unit. A length in mm is shown and read in the reader's own unit, takes `2.5 m`, `98 in` and sums, and hands
+ * over millimetres. The text being typed is kept as typed until the field is left.
+ */
 export function NumberInput({
   value,
-  unit,
+  unit: givenUnit,
   onValueChange,
   onCommit,
-  step = 1,
+  step: givenStep = 1,
   min = -Infinity,
   max = Infinity,
-  decimals = 3,
+  decimals: givenDecimals = 3,
   className,
   onBlur,
   onKeyDown,
   ...rest
 }: NumberInputProps) {
   const [draft, setDraft] = useState<string | null>(null);
+  const { unit: lengthUnit } = useUnits();
+  const isLength = givenUnit === 'mm';
+  const unit = isLength ? lengthUnit : givenUnit;
+  const perUnit = isLength ? MM_PER_UNIT[lengthUnit] : 1;
+  const decimals = isLength && lengthUnit === 'in' ? givenDecimals + 1 : givenDecimals;
+  const step = isLength ? stepIn(givenStep, lengthUnit) : givenStep;
+  const shown = show(value === null ? null : value / perUnit, decimals);
+  /** What stands in the field and was not touched is the value itself, to the last digit. */
+  const read = (text: string): number | null => {
+    if (text.trim() === shown && value !== null) return value;
+    if (!isLength) return parseNumber(text);
+    const parsed = parseMeasure(text, 'length', lengthUnit);
+    return parsed.ok ? parsed.value : null;
+  };
   const clamp = (number: number) => Math.min(max, Math.max(min, number));
 
   const settle = (): void => {
     if (draft === null) return;
-    const typed = parseNumber(draft);
+    const typed = read(draft);
     if (typed === null) {
       if (onCommit || draft.trim() === '') setDraft(null);
       return;
@@ -60,7 +80,7 @@ export function NumberInput({
 
   const nudge = (event: KeyboardEvent<HTMLInputElement>): void => {
     const direction = event.key === 'ArrowUp' ? 1 : event.key === 'ArrowDown' ? -1 : 0;
-    const from = draft === null ? value : parseNumber(draft);
+    const from = draft === null ? value : read(draft);
     if (!direction || from === null) return;
     event.preventDefault();
     const to = clamp(Number((from + direction * step * (event.shiftKey ? 10 : 1)).toFixed(6)));
@@ -75,12 +95,12 @@ export function NumberInput({
         {...rest}
         {...useFieldWiring(rest)}
         type="text"
-        inputMode="decimal"
+        inputMode={isLength ? 'text' : 'decimal'}
         autoComplete="off"
-        value={draft ?? show(value, decimals)}
+        value={draft ?? shown}
         onChange={(event) => {
           setDraft(event.target.value);
-          onValueChange?.(parseNumber(event.target.value));
+          onValueChange?.(read(event.target.value));
         }}
         onBlur={(event) => {
           settle();

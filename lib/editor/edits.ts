@@ -1,6 +1,7 @@
 import { outlineFault } from '@/lib/layout/geometry';
 import { itemSchema, type Fixture, type Item, type TaskPoint } from '@/lib/layout/items';
 import { put, remove, type Change, type Items } from './changes';
+import { withFreshIds } from './fresh-ids';
 import { freeName } from './make-items';
 import { lastPlace } from './order';
 import { normalAngle, tidy } from './snapping';
@@ -73,7 +74,17 @@ export function removed(items: Items, ids: readonly string[]): Change[] {
   return movable(items, ids).map((item) => remove(items, item.id));
 }
 
-/** Copies beside the originals, with names and ids of their own. */
+/** Locks, unlocks, hides or shows items; locked ones too. */
+export function flagged(
+  items: Items,
+  ids: readonly string[],
+  flags: Partial<Pick<Item, 'locked' | 'hidden'>>,
+): Change[] {
+  const found = ids.map((id) => items.get(id)).filter((item): item is Item => item !== undefined);
+  return found.map((item) => put(items, { ...item, ...flags }));
+}
+
+/** Copies beside the originals, with names and ids of their own; what was a group among them is a group of its own. */
 export function duplicated(
   items: Items,
   ids: readonly string[],
@@ -82,19 +93,16 @@ export function duplicated(
 ): { changes: Change[]; copies: string[] } {
   const changes: Change[] = [];
   const now = new Map(items);
-  for (const id of ids) {
-    const original = items.get(id);
-    if (!original) continue;
+  const originals = ids.map((id) => items.get(id)).filter((item): item is Item => item !== undefined);
+  for (const fresh of withFreshIds(originals, newId)) {
     const copy: Item = {
-      ...original,
-      id: newId(),
-      name: freeName(now, original.kind),
-      xMm: original.xMm + byMm,
-      yMm: original.yMm - byMm,
+      ...fresh,
+      name: freeName(now, fresh.kind),
+      xMm: fresh.xMm + byMm,
+      yMm: fresh.yMm - byMm,
       order: lastPlace(now),
       locked: false,
     };
-    if (copy.kind === 'fixture') copy.taskPoints = copy.taskPoints.map((point) => ({ ...point, id: newId() }));
     now.set(copy.id, copy);
     changes.push({ itemId: copy.id, before: null, after: copy });
   }

@@ -1,3 +1,5 @@
+import { lengthFigure, MM_PER_UNIT, type LengthUnit } from '@/lib/layout/length-units';
+
 /** Between what people type and read and the numbers of the sheet. */
 
 const MM_PER: Record<string, number> = { mm: 1, cm: 10, m: 1000, in: 25.4, '"': 25.4 };
@@ -8,9 +10,9 @@ const TERM = /^([+-]?)(\d+(?:\.\d+)?|\.\d+)(mm|cm|m|in|"|°|deg)?/;
 
 /**
  * Reads a length in mm or an angle in degrees: `2500`, `2.5 m`, `98 in`, `1200 + 350`. A number without a unit is in the
- * field's own. The minus sign of the trade's print (U+2212) and a decimal comma are understood.
+ * field's own: millimetres, or what `unit` says. The minus sign of the trade's print (U+2212) and a decimal comma are understood.
  */
-export function parseMeasure(text: string, kind: 'length' | 'angle' | 'number'): Parsed {
+export function parseMeasure(text: string, kind: 'length' | 'angle' | 'number', unit: LengthUnit = 'mm'): Parsed {
   let rest = text
     .replace(/[\s\u00a0\u2009\u202f]/g, '')
     .replace(/[\u2212\u2013]/g, '-')
@@ -22,8 +24,8 @@ export function parseMeasure(text: string, kind: 'length' | 'angle' | 'number'):
   while (rest !== '') {
     const term = TERM.exec(rest);
     if (!term || (!first && term[1] === '')) return { ok: false, message: unread(kind) };
-    const [whole, sign, digits, unit] = term;
-    const factor = factorOf(unit, kind);
+    const [whole, sign, digits, written] = term;
+    const factor = written || kind !== 'length' ? factorOf(written, kind) : MM_PER_UNIT[unit];
     if (factor === null) return { ok: false, message: unread(kind) };
     value += (sign === '-' ? -1 : 1) * Number(digits) * factor;
     rest = rest.slice(whole.length);
@@ -56,6 +58,10 @@ export function printedFixed(value: number, fractionDigits: number): string {
 }
 
 /** Where an item stands, as the list says it: `x 3720 y 3920 −17°`. */
-export function placeWords(item: { readonly xMm: number; readonly yMm: number; readonly angleDeg: number }): string {
-  return `x ${printed(item.xMm, 0)} y ${printed(item.yMm, 0)} ${printed(item.angleDeg, 1)}°`;
+export function placeWords(
+  item: { readonly xMm: number; readonly yMm: number; readonly angleDeg: number },
+  unit: LengthUnit = 'mm',
+): string {
+  const [x, y] = [item.xMm, item.yMm].map((mm) => lengthFigure(mm, unit, 0));
+  return `x ${x} y ${y} ${printed(item.angleDeg, 1)}°`;
 }

@@ -2,7 +2,9 @@ import type { LayoutChanges, Operation, OperationBatch, OperationResult, StoredI
 import type { Item } from '@/lib/layout/items';
 import { applyChanges, rebase, type Change, type Items } from './changes';
 import { EMPTY_HISTORY, record, redo, undo, type History, type Walk } from './history';
-import { DEFAULT_SNAPPING, type Snapping } from './snapping';
+import type { PointMm } from '@/lib/layout/geometry';
+import { snapNear, type Guide } from './snap-lines';
+import { DEFAULT_SNAPPING, NO_SNAPPING, type Snapping } from './snapping';
 import {
   acknowledged,
   decided,
@@ -14,6 +16,7 @@ import {
   type Exchange,
   type Sync,
 } from './sync';
+import { carrying } from './tools/move';
 import { selectTool } from './tools/select';
 import { NOTHING, type Draft, type Press, type Reply, type Selection, type Tool, type View } from './tools/tool';
 
@@ -27,8 +30,10 @@ export interface SheetState {
   /** Where the plumb hangs, floor frame; null: nowhere. */
   readonly plumb: { readonly xMm: number; readonly yMm: number } | null;
   readonly snapping: Snapping;
+  /** What the gesture under way snapped to. */
+  readonly guides: readonly Guide[];
   /** The newest thing to say aloud. A new object each time, so that the same words twice are said twice. */
-  readonly said: { readonly words: string } | null;
+  readonly said: { readonly words: string; readonly isRefusal?: boolean } | null;
 }
 
 export interface LoadedSheet {
@@ -38,6 +43,10 @@ export interface LoadedSheet {
   readonly edits?: readonly Operation[];
 }
 
+const NO_GUIDES: readonly Guide[] = [];
+/** Something nearer than so many times a shaky click snaps. */
+const SNAP_SLACKS = 2;
+
 /**
  * A sheet being edited: the one mutable object of the editor, thin over pure functions. Views subscribe and read immutable
  * states; every way to change items goes through `commit`, the history or an exchange with the server.
@@ -45,6 +54,7 @@ export interface LoadedSheet {
 export class Sheet {
   private state: SheetState;
   private readonly listeners = new Set<() => void>();
+  private planPoints: readonly PointMm[] = [];
 
   constructor(
     loaded: LoadedSheet,
@@ -62,6 +72,7 @@ export class Sheet {
       draft: null,
       plumb: null,
       snapping: DEFAULT_SNAPPING,
+      guides: NO_GUIDES,
       said: null,
     };
   }
@@ -82,49 +93,83 @@ export class Sheet {
   // Gestures
 
   press(at: Press): void {
-    this.take(this.state.tool.press(at, this.view()));
+    this.give((view) => this.state.tool.press(at, view));
   }
 
   move(at: Press): void {
-    this.take(this.state.tool.move(at, this.view()));
+    this.give((view) => this.state.tool.move(at, view));
   }
 
   release(at: Press): void {
-    this.take(this.state.tool.release(at, this.view()));
+    // Put down is put down: what it snapped to is of no interest any more.
+    this.take(this.state.tool.release(at, this.view([])), NO_GUIDES);
   }
 
   finish(): void {
-    this.take(this.state.tool.finish(this.view()));
+    this.take(this.state.tool.finish(this.view([])), NO_GUIDES);
   }
 
   /** Takes back what is under way; at rest it lets the selection go. */
   cancel(): void {
     const { tool, draft } = this.state;
-    if (tool.busy || draft) this.set({ tool: tool.cancel(), draft: null, said: { words: 'Taken back' } });
-    else this.set({ selection: NOTHING, plumb: null });
+    if (tool.busy || draft) {
+      this.set({ tool: tool.cancel(), draft: null, guides: NO_GUIDES, said: { words: 'Taken back' } });
+    } else this.set({ selection: NOTHING, plumb: null });
   }
 
   /** The press in hand was taken away; the tool stays. */
   interrupt(): void {
-    this.set({ tool: this.state.tool.interrupted(), draft: null });
+    this.set({ tool: this.state.tool.interrupted(), draft: null, guides: NO_GUIDES });
   }
 
   use(tool: Tool): void {
-    this.set({ tool, draft: null });
+    this.set({ tool, draft: null, guides: NO_GUIDES });
   }
 
-  private view(): View {
+  /** Picks up what is chosen: it follows the pointer until it is clicked down. */
+  pickUp(): void {
+    const { selection } = this.state;
+    if (selection.itemIds.length > 0) this.use(carrying(selection, this.view([]), selectTool));
+  }
+
+  /** Points of the floor plan to snap to, floor frame. */
+  setPlanPoints(points: readonly PointMm[]): void {
+    this.planPoints = points;
+  }
+
+  private give(ask: (view: View) => Reply): void {
+    const guides: Guide[] = [];
+    const reply = ask(this.view(guides));
+    this.take(reply, guides.length > 0 ? guides : NO_GUIDES);
+  }
+
+  /** The sheet as a tool sees it; what its snapping falls to is added to `guides`. */
+  private view(guides: Guide[]): View {
     const { items, selection, snapping } = this.state;
-    return { items, selection, snapping, newId: this.newId };
+    const { planPoints, newId } = this;
+    return {
+      items,
+      selection,
+      snapping,
+      newId,
+      snap: (wanted, { alt, slackMm }, moved) => {
+        const reachMm = slackMm * SNAP_SLACKS;
+        const used = alt ? NO_SNAPPING : snapping;
+        const { guides: found, ...spot } = snapNear({ wanted, items, planPoints, snapping: used, reachMm, moved });
+        guides.push(...found);
+        return spot;
+      },
+    };
   }
 
-  private take(reply: Reply): void {
+  private take(reply: Reply, guides: readonly Guide[]): void {
     const { tool, draft, selection, step, plumb, say } = reply;
     // A press that changes nothing is not worth a new picture.
     const idle = tool === this.state.tool && draft === undefined && !selection && !step && !plumb && !say;
-    if (idle) return;
+    if (idle && guides === this.state.guides) return;
     this.set({
       tool,
+      guides,
       ...(draft !== undefined && { draft }),
       ...(step && this.afterStep(step.label, step.changes)),
       ...(selection && { selection }),
@@ -160,7 +205,7 @@ export class Sheet {
     const { history, changes, label } = walk;
     const tool = this.state.tool.busy ? this.state.tool.cancel() : this.state.tool;
     const items = applyChanges(this.state.items, changes);
-    this.set({ items, history, tool, draft: null, said: { words: `${word}: ${label}` } });
+    this.set({ items, history, tool, draft: null, guides: NO_GUIDES, said: { words: `${word}: ${label}` } });
   }
 
   select(selection: Selection): void {
@@ -177,6 +222,11 @@ export class Sheet {
 
   say(words: string): void {
     this.set({ said: { words } });
+  }
+
+  /** Says why something was not done, where eyes find it as well. */
+  refuse(words: string): void {
+    this.set({ said: { words, isRefusal: true } });
   }
 
   // Exchange with the server

@@ -2,7 +2,23 @@ import type { ToolName } from './tools/tool';
 
 /** What a key asks of the sheet. */
 export type Command =
-  | { readonly name: 'undo' | 'redo' | 'delete' | 'duplicate' | 'selectAll' | 'cancel' | 'finish' | 'fit' | 'help' }
+  | {
+      readonly name:
+        | 'undo'
+        | 'redo'
+        | 'delete'
+        | 'duplicate'
+        | 'selectAll'
+        | 'group'
+        | 'ungroup'
+        | 'pickUp'
+        | 'lock'
+        | 'hide'
+        | 'cancel'
+        | 'finish'
+        | 'fit'
+        | 'help';
+    }
   | { readonly name: 'tool'; readonly tool: ToolName }
   | { readonly name: 'nudge'; readonly xSteps: number; readonly ySteps: number }
   | { readonly name: 'turn'; readonly steps: number };
@@ -44,6 +60,7 @@ export function commandOf({ key, ctrlKey, metaKey, shiftKey, altKey }: Keystroke
     if (lower === 'y') return { name: 'redo' };
     if (lower === 'd') return { name: 'duplicate' };
     if (lower === 'a') return { name: 'selectAll' };
+    if (lower === 'g') return { name: shiftKey ? 'ungroup' : 'group' };
     return null;
   }
   const arrow = ARROWS[key];
@@ -59,6 +76,8 @@ export function commandOf({ key, ctrlKey, metaKey, shiftKey, altKey }: Keystroke
   if (key === ']') return { name: 'turn', steps: -1 };
   if (key === '?') return { name: 'help' };
   if (key === '0') return { name: 'fit' };
+  if (lower === 'm' && !shiftKey) return { name: 'pickUp' };
+  if (lower === 'l') return { name: shiftKey ? 'hide' : 'lock' };
   const tool = shiftKey ? undefined : TOOL_KEYS[lower];
   return tool ? { name: 'tool', tool } : null;
 }
@@ -73,7 +92,8 @@ export const SHORTCUTS: readonly ShortcutGroup[] = [
   {
     title: 'On the sheet',
     entries: [
-      { keys: ['Click'], words: 'Choose; with Shift several' },
+      { keys: ['Click'], words: 'Choose; with Shift several; again: one of a group' },
+      { keys: ['M'], words: 'Pick up what is chosen; a click puts it down, no drag needed' },
       { keys: ['Arrows'], words: 'Move by one step; with Shift by ten' },
       { keys: ['[', ']'], words: 'Turn by one step' },
       { keys: ['Alt'], words: 'Held: suspends snapping' },
@@ -89,7 +109,12 @@ export const SHORTCUTS: readonly ShortcutGroup[] = [
       { keys: ['Ctrl', 'Z'], words: 'Undo' },
       { keys: ['Ctrl', 'Shift', 'Z'], words: 'Redo' },
       { keys: ['Ctrl', 'D'], words: 'Duplicate' },
+      { keys: ['Ctrl', 'C'], words: 'Copy; Ctrl X cuts' },
+      { keys: ['Ctrl', 'V'], words: 'Paste, also on another sheet' },
       { keys: ['Ctrl', 'A'], words: 'Choose everything' },
+      { keys: ['Ctrl', 'G'], words: 'Make one group; with Shift take it apart' },
+      { keys: ['L'], words: 'Lock or unlock' },
+      { keys: ['Shift', 'L'], words: 'Hide or show' },
     ],
   },
   {

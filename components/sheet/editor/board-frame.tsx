@@ -20,6 +20,7 @@ import { ShortcutsDialog } from './shortcuts-dialog';
 import { Toolbar } from './toolbar';
 import { TroubleLine } from './trouble-line';
 import { NARROW, useMedia } from './use-media';
+import { useClipboardEvents } from './use-clipboard';
 import { useSheetKeys } from './use-sheet-keys';
 
 type OpenDialog = 'none' | 'conflict' | 'share' | 'issue' | 'shortcuts';
@@ -30,6 +31,7 @@ export function BoardFrame() {
   const [dialog, setDialog] = useState<OpenDialog>('none');
   const isNarrow = useMedia(NARROW);
   useSheetKeys(useCallback(() => setDialog('shortcuts'), []));
+  useClipboardEvents();
 
   const place = (
     <>

@@ -3,17 +3,15 @@
 import { Hand, Keyboard, Maximize, Minus, MousePointer2, Plus, Redo2, Undo2 } from 'lucide-react';
 import type { ReactNode } from 'react';
 import { Button } from '@/components/ui/button';
-import { Select } from '@/components/ui/select';
 import { Tooltip } from '@/components/ui/tooltip';
-import type { Snapping } from '@/lib/editor/snapping';
 import { selectTool } from '@/lib/editor/tools/select';
 import { panTool } from '@/lib/editor/tools/place';
 import { zoomAt } from '@/lib/layout/viewport';
 import { useBoard, useBoardSheet } from './board-context';
 import { FloorPlanChoice } from './floor-plan-choice';
+import { SnapChoice } from './snap-choice';
 import { sheetBounds } from './sheet-bounds';
 
-const GRID_CHOICES = [10, 25, 50, 100, 250] as const;
 const ZOOM = 1.25;
 
 /** The strip over the canvas: hand and arrow, history, snapping, the floor plan, and the view. */
@@ -106,25 +104,3 @@ function Tool({ label, hint, pressed, disabled, onClick, children }: ToolProps) 
 }
 
 const Gap = () => <span aria-hidden className="mx-1 h-5 border-l border-hair" />;
-
-/** What places snap to. Turns snap as well while places do. */
-function SnapChoice() {
-  const { sheet } = useBoard();
-  const snapping = useBoardSheet((state) => state.snapping);
-  const choose = (value: string) => {
-    const next: Snapping = value === 'off' ? { gridMm: null, angleDeg: null } : { gridMm: Number(value), angleDeg: 5 };
-    sheet.setSnapping(next);
-  };
-  return (
-    <Select
-      aria-label="Snapping"
-      value={snapping.gridMm === null ? 'off' : String(snapping.gridMm)}
-      onValueChange={choose}
-      className="min-h-8 w-36! flex-none border-transparent text-sm"
-      options={[
-        ...GRID_CHOICES.map((step) => ({ value: String(step), label: `Snap to ${step} mm` })),
-        { value: 'off', label: 'Snap to nothing' },
-      ]}
-    />
-  );
-}

@@ -38,6 +38,7 @@ export function usePlace() {
         case 'pan':
           return panTool();
         case 'select':
+        case 'carry':
           return selectTool();
       }
     }
@@ -46,22 +47,23 @@ export function usePlace() {
       /** Takes a tool in hand. A robot needs an arm: the one named, else the first of the library. */
       take(name: ToolName, armId?: string) {
         const tool = toolNamed(name, armId);
-        if (!tool) return sheet.say('The library has no arm yet. Add one on the page Arms.');
+        if (!tool) return sheet.refuse('The library has no arm yet. Add one on the page Arms.');
         sheet.use(tool);
       },
       /** Does at once what the tool would do in the middle of the view. */
       placeAtOnce(name: ToolName, armId?: string) {
         const { items, selection, snapping } = sheet.getState();
         const middle = view.middle();
-        if (name === 'select' || name === 'pan') return sheet.use(name === 'pan' ? panTool() : selectTool());
+        if (name === 'select' || name === 'carry' || name === 'pan')
+          return sheet.use(name === 'pan' ? panTool() : selectTool());
         if (name === 'plumb') return sheet.hangPlumb({ xMm: Math.round(middle.xMm), yMm: Math.round(middle.yMm) });
         if (name === 'taskPoint') {
           const placed = placeTaskPointInView(items, selection, middle, newId);
-          if (!placed) return sheet.say('A task point belongs to a fixture. Place a fixture first.');
+          if (!placed) return sheet.refuse('A task point belongs to a fixture. Place a fixture first.');
           return sheet.commit(placed.label, placed.changes, placed.selection);
         }
         const arm = anArm(armId);
-        if (name === 'robot' && !arm) return sheet.say('The library has no arm yet. Add one on the page Arms.');
+        if (name === 'robot' && !arm) return sheet.refuse('The library has no arm yet. Add one on the page Arms.');
         const placed = placeInView(items, { kind: name, armId: arm, middle, snapping, newId });
         sheet.commit(placed.label, placed.changes, placed.selection);
       },

@@ -1,7 +1,9 @@
 'use client';
 
 import { useMemo } from 'react';
-import { duplicated, editedTaskPoint, moved, removed, turnedBy, withoutTaskPoint } from '@/lib/editor/edits';
+import { aligned, distributed, type Alignment, type Direction } from '@/lib/editor/arrange';
+import { duplicated, editedTaskPoint, flagged, moved, removed, turnedBy, withoutTaskPoint } from '@/lib/editor/edits';
+import { grouped, ungrouped } from '@/lib/editor/groups';
 import { reorder } from '@/lib/editor/order';
 import type { SheetState } from '@/lib/editor/sheet';
 import { tidy } from '@/lib/editor/snapping';
@@ -40,7 +42,7 @@ export function useSelectionCommands() {
     };
     const ids = () => sheet.getState().selection.itemIds;
     const putFixture = (label: string, before: Fixture, after: Fixture) => {
-      if (before.locked) return sheet.say(`${before.name} is locked. Unlock it first.`);
+      if (before.locked) return sheet.refuse(`${before.name} is locked. Unlock it first.`);
       sheet.commit(label, [{ itemId: before.id, before, after }]);
     };
     const shiftTaskPoint = ({ fixture, point }: ChosenTaskPoint, byXMm: number, byYMm: number) => {
@@ -74,7 +76,7 @@ export function useSelectionCommands() {
             withoutTaskPoint(point.fixture, point.point.id),
           );
         const changes = removed(items, ids());
-        if (changes.length === 0) return sheet.say('It is locked. Unlock it to delete it.');
+        if (changes.length === 0) return sheet.refuse('It is locked. Unlock it to delete it.');
         sheet.commit(`Delete ${named(selected())}`, changes);
       },
       duplicate() {
@@ -87,6 +89,36 @@ export function useSelectionCommands() {
         const { items } = sheet.getState();
         const item = items.get(itemId);
         if (item) sheet.commit(`Move ${item.name} ${by < 0 ? 'up' : 'down'} the list`, reorder(items, itemId, by));
+      },
+      pickUp() {
+        if (ids().length === 0) return sheet.refuse('Nothing is chosen.');
+        if (selected().every(({ locked }) => locked)) return sheet.refuse('It is locked. Unlock it first.');
+        sheet.pickUp();
+      },
+      align(alignment: Alignment) {
+        const { items } = sheet.getState();
+        sheet.commit(`Align ${named(selected())}`, aligned(items, ids(), alignment));
+      },
+      distribute(direction: Direction) {
+        const { items } = sheet.getState();
+        sheet.commit(`Space ${named(selected())} evenly`, distributed(items, ids(), direction));
+      },
+      group() {
+        const { items } = sheet.getState();
+        if (ids().length < 2) return sheet.refuse('Choose two items or more to group them.');
+        sheet.commit(`Group ${named(selected())}`, grouped(items, ids(), crypto.randomUUID()));
+      },
+      ungroup() {
+        const { items } = sheet.getState();
+        sheet.commit(`Take the group of ${named(selected())} apart`, ungrouped(items, ids()));
+      },
+      /** Locks or hides what is chosen; where all of it is, the other way round. */
+      toggle(flag: 'locked' | 'hidden') {
+        const { items } = sheet.getState();
+        if (ids().length === 0) return;
+        const next = !selected().every((item) => item[flag]);
+        const word = flag === 'locked' ? (next ? 'Lock' : 'Unlock') : next ? 'Hide' : 'Show';
+        sheet.commit(`${word} ${named(selected())}`, flagged(items, ids(), { [flag]: next }));
       },
       selectAll() {
         const { items } = sheet.getState();

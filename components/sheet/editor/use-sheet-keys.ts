@@ -45,6 +45,16 @@ export function useSheetKeys(onHelp: () => void): void {
           return commands.duplicate();
         case 'selectAll':
           return commands.selectAll();
+        case 'group':
+          return commands.group();
+        case 'ungroup':
+          return commands.ungroup();
+        case 'pickUp':
+          return commands.pickUp();
+        case 'lock':
+          return commands.toggle('locked');
+        case 'hide':
+          return commands.toggle('hidden');
         case 'cancel':
           return sheet.cancel();
         case 'finish':

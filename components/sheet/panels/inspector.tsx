@@ -1,7 +1,8 @@
 'use client';
 
-import { Copy, Eye, EyeOff, Lock, LockOpen, Trash2 } from 'lucide-react';
-import { useBoard, useBoardSheet } from '@/components/sheet/editor/board-context';
+import { Copy, Eye, EyeOff, Lock, LockOpen, Move, Trash2 } from 'lucide-react';
+import { useBoardSheet } from '@/components/sheet/editor/board-context';
+import { SelectionPanel } from '@/components/sheet/editor/selection-panel';
 import { useSelectionCommands } from '@/components/sheet/editor/use-selection-commands';
 import { Button } from '@/components/ui/button';
 import { KIND_WORDS } from '@/lib/editor/make-items';
@@ -28,7 +29,7 @@ export function Inspector({ emptyWords = false }: { readonly emptyWords?: boolea
   }
   return (
     <section aria-label="What is chosen" data-inspector className="border-b border-rule px-3.5 pt-2 pb-3">
-      {chosen.length === 1 ? <OneItem key={chosen[0].id} item={chosen[0]} /> : <SeveralItems items={chosen} />}
+      {chosen.length === 1 ? <OneItem key={chosen[0].id} item={chosen[0]} /> : <SelectionPanel items={chosen} />}
     </section>
   );
 }
@@ -91,25 +92,13 @@ function OwnFields({ item }: { readonly item: Item }) {
   }
 }
 
-function SeveralItems({ items }: { readonly items: readonly Item[] }) {
-  const { sheet } = useBoard();
-  return (
-    <div className="flex items-center justify-between gap-2">
-      <p className="font-semibold">{items.length} items chosen</p>
-      <span className="flex items-center gap-1">
-        <Button variant="quiet" size="small" onClick={() => sheet.select({ itemIds: [], taskPointId: null })}>
-          Let go
-        </Button>
-        <Copies label="what is chosen" locked={items.every(({ locked }) => locked)} />
-      </span>
-    </div>
-  );
-}
-
 function Copies({ label, locked }: { readonly label: string; readonly locked: boolean }) {
-  const { duplicate, remove } = useSelectionCommands();
+  const { duplicate, pickUp, remove } = useSelectionCommands();
   return (
     <>
+      <Button variant="quiet" size="icon" aria-label={`Pick up ${label}`} disabled={locked} onClick={pickUp}>
+        <Move aria-hidden className="size-4" />
+      </Button>
       <Button variant="quiet" size="icon" aria-label={`Duplicate ${label}`} onClick={duplicate}>
         <Copy aria-hidden className="size-4" />
       </Button>

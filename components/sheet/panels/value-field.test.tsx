@@ -1,7 +1,8 @@
 import { render, screen } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { useState } from 'react';
-import { describe, expect, it, vi } from 'vitest';
+import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
+import { chooseUnit } from '@/lib/client/use-units';
 import { ValueField } from './value-field';
 
 /** A field that keeps its value as the sheet does, and takes nothing above 5000. */
@@ -80,5 +81,29 @@ describe('a typed value', () => {
     expect(field.value).toBe('1250');
     await user.keyboard('{Shift>}{ArrowDown}{/Shift}');
     expect(field.value).toBe('750');
+  });
+});
+
+describe('a length read in inches', () => {
+  beforeEach(() => chooseUnit('in'));
+  afterEach(() => chooseUnit('mm'));
+
+  it('is shown in inches and left exactly as it is while nothing is typed', async () => {
+    const { user, field, onTaken } = open();
+    // 1200 / 25.4 = 47.2440…
+    expect(field.value).toBe('47.2441');
+    await user.click(field);
+    await user.keyboard('{Enter}');
+    await user.clear(field);
+    await user.type(field, '47.2441{Enter}');
+    await user.tab();
+    expect(onTaken).not.toHaveBeenCalled();
+  });
+
+  it('takes a bare number as inches, and other units in a sum', async () => {
+    const { user, field, onTaken } = open();
+    await user.clear(field);
+    await user.type(field, '10 + 100 mm{Enter}');
+    expect(onTaken).toHaveBeenCalledExactlyOnceWith(354);
   });
 });

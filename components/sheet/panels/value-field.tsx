@@ -2,13 +2,15 @@
 
 import { useId, useState, type KeyboardEvent } from 'react';
 import { classNames } from '@/components/ui/class-names';
+import { useUnits } from '@/lib/client/use-units';
+import { stepIn } from '@/lib/layout/length-units';
 import { parseMeasure, printed } from '@/lib/editor/measure-text';
 
 interface ValueFieldProps {
   readonly label: string;
   readonly value: number;
   readonly kind: 'length' | 'angle' | 'number';
-  /** Drawn behind the value; `length` and `angle` have their own. */
+  /** Drawn behind the value; an angle has its own, and a length the reader's. */
   readonly unit?: string;
   /** What an arrow key adds; with Shift ten times that. */
   readonly step?: number;
@@ -20,14 +22,19 @@ interface ValueFieldProps {
   readonly first?: boolean;
 }
 
-const UNITS = { length: 'mm', angle: '°', number: '' } as const;
+const UNITS = { angle: '°', number: '' } as const;
 
 /**
  * One typed value of the sheet. Enter or leaving the field takes it. What cannot be taken is said at the field: the typed text
  * stays while one is in the field, and the value of the sheet never changes.
  */
 export function ValueField(props: ValueFieldProps) {
-  const { label, value, kind, unit = UNITS[kind], step = 10, onCommit, disabled, className, first } = props;
+  const { label, value, kind, onCommit, disabled, className, first } = props;
+  const { unit: lengthUnit, figure } = useUnits();
+  const isLength = kind === 'length';
+  const unit = props.unit ?? (isLength ? lengthUnit : UNITS[kind]);
+  const step = isLength ? stepIn(props.step ?? 10, lengthUnit) : (props.step ?? 10);
+  const shown = isLength ? figure(value) : printed(value);
   const id = useId();
   const [draft, setDraft] = useState<string | null>(null);
   const [fault, setFault] = useState<string | null>(null);
@@ -41,7 +48,12 @@ export function ValueField(props: ValueFieldProps) {
   };
   const settle = (text: string | null) => {
     if (text === null) return;
-    const parsed = parseMeasure(text, kind);
+    // Inches are shown rounded: what was not changed must not be stored as it is shown.
+    if (text.trim() === shown) {
+      setFault(null);
+      return setDraft(null);
+    }
+    const parsed = parseMeasure(text, kind, lengthUnit);
     if (parsed.ok) take(parsed.value);
     else setFault(parsed.message);
   };
@@ -55,7 +67,7 @@ export function ValueField(props: ValueFieldProps) {
     }
     if (!direction) return;
     event.preventDefault();
-    const parsed = draft === null ? null : parseMeasure(draft, kind);
+    const parsed = draft === null || draft.trim() === shown ? null : parseMeasure(draft, kind, lengthUnit);
     const from = parsed?.ok ? parsed.value : value;
     take(Number((from + direction * step * (event.shiftKey ? 10 : 1)).toFixed(4)));
   };
@@ -76,7 +88,7 @@ export function ValueField(props: ValueFieldProps) {
           data-first-value={first || undefined}
           aria-invalid={fault ? true : undefined}
           aria-describedby={fault ? `${id}-fault` : undefined}
-          value={draft ?? printed(value)}
+          value={draft ?? shown}
           onFocus={(event) => event.target.select()}
           onChange={(event) => {
             setDraft(event.target.value);

@@ -1,17 +1,17 @@
 import { distanceMm, turned, type PointMm } from '@/lib/layout/geometry';
 import { put } from '../changes';
 import { newDimension } from '../make-items';
-import { snapSpot, tidy } from '../snapping';
+import { tidy } from '../snapping';
 import { selectTool } from './select';
 import { chosen, state, type Press, type Tool, type View } from './tool';
 
 const DRAFT_ID = '00000000-0000-4000-8000-000000000002';
 
 /** A robot or fixture that is clicked is measured from its place; elsewhere the floor spot counts, on the grid. */
-function measuredSpot(press: Press, { items, snapping }: View): PointMm {
-  const item = press.target?.part === 'item' ? items.get(press.target.itemId) : undefined;
+function measuredSpot(press: Press, view: View): PointMm {
+  const item = press.target?.part === 'item' ? view.items.get(press.target.itemId) : undefined;
   if (item && (item.kind === 'robot' || item.kind === 'fixture') && !press.alt) return [item.xMm, item.yMm];
-  const spot = snapSpot(press, snapping, press.alt);
+  const spot = view.snap(press, press);
   return [spot.xMm, spot.yMm];
 }
 

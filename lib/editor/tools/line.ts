@@ -1,8 +1,8 @@
 import { distanceMm, type PointMm } from '@/lib/layout/geometry';
 import type { Item } from '@/lib/layout/items';
 import { put } from '../changes';
+import { onRoundAngle } from '../snapping';
 import { newLine } from '../make-items';
-import { snapSpot } from '../snapping';
 import { selectTool } from './select';
 import { chosen, state, type Press, type Reply, type Tool, type View } from './tool';
 
@@ -29,11 +29,12 @@ export function lineTool(kind: LineKind): Tool {
   });
 }
 
-/** Shift keeps the new side level or upright. */
-function cornerAt(press: Press, { snapping }: View, corners: readonly PointMm[]): PointMm {
-  const spot = snapSpot(press, snapping, press.alt);
+/** Shift keeps the new side level or upright; a side that nearly runs at a round angle runs at it. */
+function cornerAt(press: Press, view: View, corners: readonly PointMm[]): PointMm {
+  const spot = view.snap(press, press);
   const last = corners.at(-1);
-  if (!press.shift || !last) return [spot.xMm, spot.yMm];
+  if (!last) return [spot.xMm, spot.yMm];
+  if (!press.shift) return (press.alt ? null : onRoundAngle(last, press, view.snapping)) ?? [spot.xMm, spot.yMm];
   const level = Math.abs(spot.xMm - last[0]) >= Math.abs(spot.yMm - last[1]);
   return level ? [spot.xMm, last[1]] : [last[0], spot.yMm];
 }

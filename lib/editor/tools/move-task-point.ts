@@ -1,6 +1,6 @@
 import { floorToItem, itemToFloor } from '@/lib/layout/geometry';
 import type { Fixture } from '@/lib/layout/items';
-import { snapSpot, tidy } from '../snapping';
+import { tidy } from '../snapping';
 import { state, type Press, type Target, type Tool, type View } from './tool';
 
 /** Dragging one task point over the floor; it stays in its fixture's frame and keeps its height. */
@@ -17,9 +17,13 @@ export function movingTaskPoint(
   }
   const [pressedX, pressedY] = itemToFloor(fixture, [point.xMm, point.yMm]);
 
-  const at = (press: Press, { snapping }: View): Fixture => {
+  // It snaps as a spot, and not to the fixture that carries it, its own old place included.
+  const box = { minXMm: pressedX, minYMm: pressedY, maxXMm: pressedX, maxYMm: pressedY };
+  const own = { at: { xMm: pressedX, yMm: pressedY }, box, itemIds: new Set([fixture.id]) };
+
+  const at = (press: Press, now: View): Fixture => {
     const wanted = { xMm: pressedX + press.xMm - start.xMm, yMm: pressedY + press.yMm - start.yMm };
-    const spot = snapSpot(wanted, snapping, press.alt);
+    const spot = now.snap(wanted, press, own);
     const [xMm, yMm] = floorToItem(fixture, [spot.xMm, spot.yMm]).map(tidy);
     return {
       ...fixture,

@@ -1,6 +1,7 @@
 import type { Item } from '@/lib/layout/items';
 import type { Change } from '../changes';
-import { snapSpot, tidy } from '../snapping';
+import { boxOf } from '../snap-lines';
+import { tidy } from '../snapping';
 import { state, type Press, type Selection, type Tool, type View } from './tool';
 
 /**
@@ -8,16 +9,49 @@ import { state, type Press, type Selection, type Tool, type View } from './tool'
  * trace. The first item that was pressed snaps to the grid and the others keep their distance from it.
  */
 export function movingItems(start: Press, selection: Selection, view: View, rest: () => Tool): Tool {
-  const snapshot = selection.itemIds
-    .map((id) => view.items.get(id))
-    .filter((item): item is Item => item !== undefined && !item.locked);
+  const snapshot = unlocked(selection, view);
   const lead = snapshot.find(({ id }) => id === start.target?.itemId) ?? snapshot[0];
+  return following('select', 'Release to put it down.', snapshot, lead, start, rest);
+}
 
-  const at = (press: Press, { snapping }: View): Item[] => {
+/**
+ * Carrying what is chosen without holding a button: it follows the pointer, and a click puts it down. It is held at the first
+ * item's own place, so whoever picks it up by keyboard or from the list need not aim first.
+ */
+export function carrying(selection: Selection, view: View, rest: () => Tool): Tool {
+  const snapshot = unlocked(selection, view);
+  return following('carry', 'Click where it goes.', snapshot, snapshot[0], snapshot[0] ?? ANYWHERE, rest);
+}
+
+interface FloorSpot {
+  readonly xMm: number;
+  readonly yMm: number;
+}
+
+const ANYWHERE: FloorSpot = { xMm: 0, yMm: 0 };
+
+const unlocked = ({ itemIds }: Selection, { items }: View): Item[] =>
+  itemIds.map((id) => items.get(id)).filter((item): item is Item => item !== undefined && !item.locked);
+
+/** The items of the snapshot follow the pointer, which took hold of them at `start`; letting go ends it as one step. */
+function following(
+  name: 'select' | 'carry',
+  todo: string,
+  snapshot: readonly Item[],
+  lead: Item | undefined,
+  start: FloorSpot,
+  rest: () => Tool,
+): Tool {
+  const moving = new Set(snapshot.map(({ id }) => id));
+  const box = boxOf(snapshot);
+
+  const at = (press: Press, view: View): Item[] => {
     if (!lead) return [];
     let [byX, byY] = [press.xMm - start.xMm, press.yMm - start.yMm];
     if (press.shift) [byX, byY] = Math.abs(byX) >= Math.abs(byY) ? [byX, 0] : [0, byY];
-    const spot = snapSpot({ xMm: lead.xMm + byX, yMm: lead.yMm + byY }, snapping, press.alt);
+    const wanted = { xMm: lead.xMm + byX, yMm: lead.yMm + byY };
+    const own = box && { at: lead, box, itemIds: moving };
+    const spot = view.snap(wanted, press, own);
     // Held level or upright, the other coordinate stays exactly as it was, on the grid or not.
     const xMm = press.shift && byX === 0 ? lead.xMm : spot.xMm;
     const yMm = press.shift && byY === 0 ? lead.yMm : spot.yMm;
@@ -28,8 +62,7 @@ export function movingItems(start: Press, selection: Selection, view: View, rest
     }));
   };
 
-  const hint = lead ? 'Release to put it down. Alt suspends snapping, Escape takes it back.' : 'It is locked.';
-  const self = state('select', hint, {
+  const self = state(name, lead ? `${todo} Alt suspends snapping, Escape takes it back.` : 'It is locked.', {
     busy: true,
     move: (press, now) => ({ tool: self, draft: { items: at(press, now) } }),
     release: (press, now) => ({

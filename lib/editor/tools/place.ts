@@ -3,7 +3,7 @@ import type { Item } from '@/lib/layout/items';
 import { fixtureAt } from '../footprint';
 import { put } from '../changes';
 import { KIND_WORDS, newBlock, newRobot, newTaskPoint } from '../make-items';
-import { snapSpot, tidy } from '../snapping';
+import { tidy } from '../snapping';
 
 import { selectTool } from './select';
 import { chosen, state, type Press, type Reply, type Tool, type View } from './tool';
@@ -18,8 +18,7 @@ function placedReply(item: Item, { items }: View): Reply {
 
 /** A robot stands where it is clicked; until then a ghost of it follows the pointer. */
 export function robotTool(armId: string): Tool {
-  const at = (press: Press, view: View, id: string) =>
-    newRobot(view.items, { id, ...snapSpot(press, view.snapping, press.alt) }, armId);
+  const at = (press: Press, view: View, id: string) => newRobot(view.items, { id, ...view.snap(press, press) }, armId);
   const self: Tool = state('robot', 'Click where the base stands.', {
     move: (press, view) => ({ tool: self, draft: { items: [at(press, view, GHOST)] } }),
     press: () => ({ tool: self }),
@@ -38,7 +37,7 @@ export function blockTool(kind: 'fixture' | 'obstacle'): Tool {
   const hint = `Click to place ${kind === 'fixture' ? 'a fixture' : 'an obstacle'}, or drag to draw its size.`;
   const self: Tool = state(kind, hint, {
     move: (press, view) => {
-      const spot = snapSpot(press, view.snapping, press.alt);
+      const spot = view.snap(press, press);
       return { tool: self, draft: { items: [newBlock(view.items, kind, { id: GHOST, ...spot })] } };
     },
     press: (press) => ({ tool: drawingBlock(kind, press) }),
@@ -50,8 +49,8 @@ export function blockTool(kind: 'fixture' | 'obstacle'): Tool {
 
 function drawingBlock(kind: 'fixture' | 'obstacle', start: Press): Tool {
   const at = (press: Press, view: View, id: string): Item => {
-    const from = snapSpot(start, view.snapping, press.alt);
-    const to = snapSpot(press, view.snapping, press.alt);
+    const from = view.snap(start, press);
+    const to = view.snap(press, press);
     const size = { width: tidy(Math.abs(to.xMm - from.xMm)), depth: tidy(Math.abs(to.yMm - from.yMm)) };
     if (size.width < LEAST_SIZE_MM || size.depth < LEAST_SIZE_MM) return newBlock(view.items, kind, { id, ...from });
     const middle = { xMm: tidy((from.xMm + to.xMm) / 2), yMm: tidy((from.yMm + to.yMm) / 2) };
@@ -75,7 +74,7 @@ export function taskPointTool(): Tool {
   const self: Tool = state('taskPoint', 'Click on a fixture to add a task point. Escape ends.', {
     busy: true,
     release: (press, view) => {
-      const spot = snapSpot(press, view.snapping, press.alt);
+      const spot = view.snap(press, press);
       const fixture = fixtureAt(view.items, [press.xMm, press.yMm], NEAR_FIXTURE_MM);
       if (!fixture)
         return { tool: self, say: 'A task point belongs to a fixture. Place a fixture first, then click on it.' };

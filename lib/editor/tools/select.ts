@@ -1,6 +1,7 @@
 import { boundsOfPoints } from '@/lib/layout/viewport';
 import type { PointMm } from '@/lib/layout/geometry';
 import { footprint, liesInside } from '../footprint';
+import { withGroups } from '../groups';
 import {
   chosen,
   NOTHING,
@@ -25,22 +26,34 @@ function press(at: Press, view: View): Reply {
   const { target } = at;
   if (!target) return { tool: marquee([at.xMm, at.yMm], at.shift ? view.selection : NOTHING) };
   if (target.part === 'turn') return { tool: turning(at, view, selectTool) };
-  const selection = selectionAfter(target, at.shift, view.selection);
-  return { tool: pressed(at, target, selection), selection };
+  const selection = selectionAfter(target, at.shift, view);
+  const wasChosen = view.selection.itemIds.includes(target.itemId);
+  return { tool: pressed(at, target, selection, wasChosen), selection };
 }
 
-/** A press on something already chosen keeps the selection, so that several things can be dragged by any one of them. */
-function selectionAfter(target: Target, shift: boolean, selection: Selection): Selection {
+/**
+ * A press on something already chosen keeps the selection, so that several things can be dragged by any one of them. Groups are
+ * chosen whole.
+ */
+function selectionAfter(target: Target, shift: boolean, { items, selection }: View): Selection {
   const { itemId } = target;
   if (target.part === 'taskPoint') return { itemIds: [itemId], taskPointId: target.taskPointId };
   const isChosen = selection.itemIds.includes(itemId);
-  if (shift && isChosen) return chosen(...selection.itemIds.filter((id) => id !== itemId));
-  if (shift) return chosen(...selection.itemIds, itemId);
-  return isChosen ? { ...selection, taskPointId: null } : chosen(itemId);
+  const unit = withGroups(items, [itemId]);
+  if (shift && isChosen) return chosen(...selection.itemIds.filter((id) => !unit.includes(id)));
+  if (shift) return chosen(...new Set([...selection.itemIds, ...unit]));
+  return isChosen ? { ...selection, taskPointId: null } : chosen(...unit);
+}
+
+/** A click on one of several chosen things chooses its group, and on a chosen group the one thing in it. */
+function narrowed(itemId: string, selection: Selection, { items }: View): Selection {
+  const unit = withGroups(items, [itemId]);
+  const isGroupAlone = unit.length === selection.itemIds.length && unit.every((id) => selection.itemIds.includes(id));
+  return isGroupAlone ? chosen(itemId) : chosen(...unit);
 }
 
 /** Down on something, not yet dragged. */
-function pressed(start: Press, target: Target, selection: Selection): Tool {
+function pressed(start: Press, target: Target, selection: Selection, wasChosen: boolean): Tool {
   const self = state('select', 'Drag to move.', {
     busy: true,
     move: (at, view) => {
@@ -51,10 +64,9 @@ function pressed(start: Press, target: Target, selection: Selection): Tool {
           : movingItems(start, selection, view, selectTool);
       return dragging.move(at, view);
     },
-    // A click on one of several chosen things chooses that one alone.
-    release: () => {
-      const alone = target.part === 'item' && !start.shift && selection.itemIds.length > 1;
-      return { tool: selectTool(), selection: alone ? chosen(target.itemId) : selection };
+    release: (_, view) => {
+      const narrows = target.part === 'item' && !start.shift && wasChosen && selection.itemIds.length > 1;
+      return { tool: selectTool(), selection: narrows ? narrowed(target.itemId, selection, view) : selection };
     },
     cancel: selectTool,
   });
@@ -69,7 +81,11 @@ function marquee(from: PointMm, kept: Selection): Tool {
       const bounds = boundsOfPoints(footprint(item));
       return !item.hidden && bounds && area && liesInside(bounds, area);
     });
-    return chosen(...new Set([...kept.itemIds, ...inside.map(({ id }) => id)]));
+    const ids = withGroups(
+      view.items,
+      inside.map(({ id }) => id),
+    );
+    return chosen(...new Set([...kept.itemIds, ...ids]));
   };
   const self = state('select', 'Draw round what you want to choose.', {
     busy: true,

@@ -1,4 +1,5 @@
 import type { Change, Items } from '../changes';
+import type { Moved } from '../snap-lines';
 import type { Snapping } from '../snapping';
 import type { Item } from '@/lib/layout/items';
 import type { PointMm } from '@/lib/layout/geometry';
@@ -38,6 +39,16 @@ export interface View {
   readonly selection: Selection;
   readonly snapping: Snapping;
   readonly newId: () => string;
+  /**
+   * Where a spot of the floor falls to: what is near of items and floor plan, else the grid; nowhere while Alt is held. What it
+   * fell to is shown as guides until the next move. `moved` is what is being moved, which does not snap to itself.
+   */
+  snap(wanted: FloorSpot, press: Pick<Press, 'alt' | 'slackMm'>, moved?: Moved | null): FloorSpot;
+}
+
+interface FloorSpot {
+  readonly xMm: number;
+  readonly yMm: number;
 }
 
 /** What a gesture shows before it is done. It is drawn over the sheet, never saved; dropping it is the whole of cancelling. */
@@ -61,7 +72,17 @@ export interface Reply {
 }
 
 export type ToolName =
-  'select' | 'pan' | 'robot' | 'fixture' | 'obstacle' | 'guardLine' | 'walkway' | 'taskPoint' | 'dimension' | 'plumb';
+  | 'select'
+  | 'carry'
+  | 'pan'
+  | 'robot'
+  | 'fixture'
+  | 'obstacle'
+  | 'guardLine'
+  | 'walkway'
+  | 'taskPoint'
+  | 'dimension'
+  | 'plumb';
 
 /**
  * A tool in one of its states. States are small and immutable: each takes its snapshot when it is entered and answers the

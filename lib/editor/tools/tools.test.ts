@@ -1,5 +1,6 @@
 import { beforeEach, describe, expect, it } from 'vitest';
 import type { Fixture, Item } from '@/lib/layout/items';
+import { grouped } from '../groups';
 import { newBlock, newRobot } from '../make-items';
 import { Sheet, shownItems } from '../sheet';
 import { seeded } from '../testing/seeded';
@@ -102,13 +103,13 @@ describe('choosing and moving', () => {
     expect(sheet.getState().selection.itemIds).toEqual([fixture.id]);
   });
 
-  it('turns by the handle in steps of five degrees', () => {
+  it('turns by the handle in steps of fifteen degrees', () => {
     sheet.select({ itemIds: [robot.id], taskPointId: null });
     const target: Target = { part: 'turn', itemId: robot.id };
     drag(at(1500, 1000, { target }), at(1000, 1500), at(1000 - 480, 1020));
     expect(now(robot)?.angleDeg).toBe(180);
-    drag(at(1500, 1000, { target }), at(1500, 1032));
-    expect(now(robot)?.angleDeg).toBe(-175);
+    drag(at(1500, 1000, { target }), at(1500, 1130));
+    expect(now(robot)?.angleDeg).toBe(-165);
   });
 });
 
@@ -225,5 +226,56 @@ describe('placing', () => {
     expect(sheet.getState().plumb).toEqual({ xMm: 151, yMm: 200 });
     sheet.release(at(150.6, 200.2));
     expect(steps()).toBe(0);
+  });
+});
+
+describe('groups, and carrying without a drag', () => {
+  const group = () => sheet.commit('Group', grouped(sheet.getState().items, [robot.id, fixture.id], random.id()));
+
+  it('chooses a group by any member, and with a second click the member', () => {
+    group();
+    click(null, at(1000, 1000, { target: on(robot) }));
+    expect([...sheet.getState().selection.itemIds].sort()).toEqual([robot.id, fixture.id].sort());
+    click(null, at(1000, 1000, { target: on(robot) }));
+    expect(sheet.getState().selection.itemIds).toEqual([robot.id]);
+  });
+
+  it('moves a group by any member as one step', () => {
+    group();
+    drag(at(1000, 1000, { target: on(robot) }), at(1500, 1000));
+    expect([now(robot)?.xMm, now(fixture)?.xMm]).toEqual([1500, 3500]);
+    expect(steps()).toBe(2);
+  });
+
+  it('picks up, follows the pointer with no button held, and puts down with a click', () => {
+    sheet.select({ itemIds: [robot.id], taskPointId: null });
+    sheet.pickUp();
+    sheet.move(at(1700, 1700));
+    expect(shown(robot)).toMatchObject({ xMm: 1700, yMm: 1700 });
+    expect(now(robot)).toMatchObject({ xMm: 1000 });
+    click(null, at(2000, 1500));
+    expect(now(robot)).toMatchObject({ xMm: 2000, yMm: 1500 });
+    expect(steps()).toBe(1);
+    expect(sheet.getState().tool.name).toBe('select');
+  });
+
+  it('is put back where it was by Escape', () => {
+    sheet.select({ itemIds: [robot.id], taskPointId: null });
+    sheet.pickUp();
+    sheet.move(at(1700, 1700));
+    sheet.cancel();
+    expect(shown(robot)).toMatchObject({ xMm: 1000, yMm: 1000 });
+    expect([steps(), sheet.getState().tool.name, sheet.getState().draft]).toEqual([0, 'select', null]);
+  });
+
+  it('shows a guide while something snaps to an edge, and none once it is down or Alt is held', () => {
+    sheet.press(at(1000, 1000, { target: on(robot), slackMm: 20 }));
+    sheet.move(at(1000, 1990, { slackMm: 20 }));
+    expect(sheet.getState().guides).toMatchObject([{ axis: 'y', atMm: 2000 }]);
+    sheet.move(at(1000, 1990, { slackMm: 20, alt: true }));
+    expect(sheet.getState().guides).toEqual([]);
+    sheet.move(at(1000, 1990, { slackMm: 20 }));
+    sheet.release(at(1000, 1990, { slackMm: 20 }));
+    expect(sheet.getState().guides).toEqual([]);
   });
 });
