@@ -5,10 +5,12 @@ import { LAYERS, type Layer, type Shape } from './linework';
 const LETTER_MM = 120;
 const SPOT_RADIUS_MM = 25;
 
-/** Colour numbers of the AutoCAD index, which every reader of DXF knows: 1 red, 3 green, 5 blue, 7 black or white, 8 grey. */
+/** Colour numbers of the index that every reader of DXF knows (from memory): 1 red, 3 green, 5 blue, 7 black or white, 8 grey. */
 const COLOURS: Record<Layer, number> = {
   WALKWAYS: 8,
+  ZONES: 6,
   CONVEYORS: 7,
+  'PROTECTIVE-DEVICES': 30,
   OBSTACLES: 8,
   FIXTURES: 7,
   'GUARD-LINES': 1,
