@@ -9,13 +9,16 @@ import { armWithTool } from './robot-frame';
 /** A robot made ready to be asked about one point after another. */
 export interface Bench {
   readonly robot: Robot;
+  /** With the tool on it. */
+  readonly arm: Arm;
   readonly solver: Solver;
   readonly gauge: Gauge;
 }
 
 export function makeBench(robot: Robot, arm: Arm, wrist: WristMode): Bench {
-  const solver = makeSolver(armWithTool(arm, robot.tool));
-  return { robot, solver, gauge: makeGauge(solver.chain, solver.freedoms, wrist) };
+  const withTool = armWithTool(arm, robot.tool);
+  const solver = makeSolver(withTool);
+  return { robot, arm: withTool, solver, gauge: makeGauge(solver.chain, solver.freedoms, wrist) };
 }
 
 /** What a posture counts for where a redundant arm has a choice of them: its inverse condition number, as in the maps. */

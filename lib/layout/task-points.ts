@@ -1,5 +1,6 @@
 import { multiplyTransforms, poseOf, type Transform } from '@/lib/kinematics/transforms';
 import type { Target } from '@/lib/kinematics/types';
+import type { Placement } from './geometry';
 import type { Fixture, Item, TaskPoint } from './items';
 import { frameOnFloor, poseInBase, type BasePlacement } from './robot-frame';
 import { toolDirection, toolOrientation } from './tool-orientation';
@@ -21,11 +22,19 @@ export function floorTaskPoints(items: readonly Item[]): FloorTaskPoint[] {
     .sort((a, b) => a.point.order - b.point.order);
 }
 
+/** What of a task point, a place of a pattern or a path says how the tool is held. */
+export type ToolPlace = Pick<TaskPoint, 'xMm' | 'yMm' | 'zMm' | 'tiltDeg' | 'azimuthDeg' | 'rollDeg'>;
+
+/** A tool pose of a fixture in the floor frame (m); a free roll is taken as 0. */
+export function poseOnFloor(fixture: Placement, place: ToolPlace): Transform {
+  const roll = place.rollDeg === 'free' ? 0 : (place.rollDeg * Math.PI) / 180;
+  const inFixture = toolOrientation(toolDirection(place.tiltDeg, place.azimuthDeg), roll);
+  [place.xMm, place.yMm, place.zMm].forEach((valueMm, axis) => (inFixture[4 * axis + 3] = valueMm / 1000));
+  return multiplyTransforms(frameOnFloor(fixture), inFixture, inFixture);
+}
+
 function onFloor(fixture: Fixture, point: TaskPoint): FloorTaskPoint {
-  const roll = point.rollDeg === 'free' ? 0 : (point.rollDeg * Math.PI) / 180;
-  const inFixture = toolOrientation(toolDirection(point.tiltDeg, point.azimuthDeg), roll);
-  [point.xMm, point.yMm, point.zMm].forEach((valueMm, axis) => (inFixture[4 * axis + 3] = valueMm / 1000));
-  const pose = multiplyTransforms(frameOnFloor(fixture), inFixture, inFixture);
+  const pose = poseOnFloor(fixture, point);
   return {
     point,
     fixtureId: fixture.id,
@@ -35,9 +44,12 @@ function onFloor(fixture: Fixture, point: TaskPoint): FloorTaskPoint {
   };
 }
 
-/** What a robot's arm is asked for at a task point, in its base frame. */
-export function targetInBase({ point, pose }: FloorTaskPoint, base: BasePlacement): Target {
+/** What a robot's arm is asked for at a tool pose of the floor frame, in its base frame. */
+export function targetInBase(
+  { rollDeg, pose }: { readonly rollDeg: TaskPoint['rollDeg']; readonly pose: Transform },
+  base: BasePlacement,
+): Target {
   const t = poseInBase(base, pose);
-  if (point.rollDeg !== 'free') return { pose: poseOf(t) };
+  if (rollDeg !== 'free') return { pose: poseOf(t) };
   return { position: [t[3], t[7], t[11]], direction: [t[2], t[6], t[10]], roll: 'free' };
 }

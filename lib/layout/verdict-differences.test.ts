@@ -29,6 +29,7 @@ const verdict = (pointNumber: number, band: VerdictBand, robotNumber: number): P
     met: band !== 'out',
     band,
     reason: null,
+    notes: [],
     bindingJoint: null,
     posture: null,
     speedMarginMmS: null,
@@ -40,6 +41,7 @@ const verdict = (pointNumber: number, band: VerdictBand, robotNumber: number): P
     fixtureName: 'Tray',
     positionMm: [0, 0, 850],
     wantedSpeedMmS: null,
+    assignment: 'best robot',
     best,
     robots: [best],
   };
