@@ -3,6 +3,7 @@
 import { memo } from 'react';
 import { Shape } from 'react-konva';
 import type { Item } from '@/lib/layout/items';
+import type { LengthUnit } from '@/lib/layout/length-units';
 import type { Palette } from '@/lib/layout/palette';
 import { visibleBounds } from '@/lib/layout/viewport';
 import { inkOf, pixelOf } from './ink';
@@ -17,6 +18,7 @@ interface ItemNamesProps {
   readonly items: readonly Item[];
   readonly arms: ReadonlyMap<string, DrawnArm>;
   readonly palette: Palette;
+  readonly lengthUnit?: LengthUnit;
 }
 
 /** Names this far outside the screen may still reach into it, px. */
@@ -24,7 +26,7 @@ const MARGIN_PX = 120;
 const RADIANS = Math.PI / 180;
 
 /** All names of a canvas in one go, over every body. Lettering is the dearest ink, so names off the screen are left out. */
-export const ItemNames = memo(function ItemNames({ items, arms, palette }: ItemNamesProps) {
+export const ItemNames = memo(function ItemNames({ items, arms, palette, lengthUnit }: ItemNamesProps) {
   return (
     <Shape
       listening={false}
@@ -55,7 +57,7 @@ export const ItemNames = memo(function ItemNames({ items, arms, palette }: ItemN
           } else if (item.kind === 'fixture' || item.kind === 'obstacle') drawOutlineName(ink, palette, px, item);
           else if (item.kind === 'guardLine') drawGuardLineName(ink, palette, px, item);
           else if (item.kind === 'conveyor') drawConveyorName(ink, palette, px, item);
-          else if (item.kind === 'walkway') drawWalkwayName(ink, palette, px, item);
+          else if (item.kind === 'walkway') drawWalkwayName(ink, palette, px, item, lengthUnit);
           ink.restore();
         }
       }}

@@ -4,6 +4,7 @@ import { memo, useMemo } from 'react';
 import type Konva from 'konva';
 import { Shape } from 'react-konva';
 import type { Item } from '@/lib/layout/items';
+import type { LengthUnit } from '@/lib/layout/length-units';
 import type { Palette } from '@/lib/layout/palette';
 import { drawConveyor } from './items/conveyor';
 import { drawDimension, drawGuardLine, drawWalkway } from './items/lines';
@@ -26,6 +27,7 @@ export interface ItemShapeProps {
   readonly chosen: boolean;
   readonly mode: DrawingMode;
   readonly palette: Palette;
+  readonly lengthUnit?: LengthUnit;
   readonly onItemPointerDown?: (itemId: string, pointer: SheetPointer) => void;
   readonly onTaskPointPointerDown?: (fixtureId: string, taskPointId: string, pointer: SheetPointer) => void;
 }
@@ -34,7 +36,7 @@ const NO_STICKS = { sticks: [], joints: [], toolPoint: [0, 0] } as const;
 
 /** One item as one canvas node, drawn by the draw function of its kind. */
 export const ItemShape = memo(function ItemShape(props: ItemShapeProps) {
-  const { item, arm, posture, verdicts, selectedTaskPointId, chosen, palette } = props;
+  const { item, arm, posture, verdicts, selectedTaskPointId, chosen, palette, lengthUnit } = props;
   const reachMm = arm?.reachMm ?? 0;
   const tool = item.kind === 'robot' ? item.tool : null;
   const robot = useMemo(
@@ -62,7 +64,7 @@ export const ItemShape = memo(function ItemShape(props: ItemShapeProps) {
       case 'walkway':
         return drawWalkway(ink, palette, px, item);
       case 'dimension':
-        return drawDimension(ink, palette, px, item);
+        return drawDimension(ink, palette, px, item, lengthUnit);
       case 'conveyor':
         return drawConveyor(ink, palette, px, item);
       case 'sectionLine':

@@ -3,6 +3,7 @@
 import { memo, useMemo } from 'react';
 import { Layer } from 'react-konva';
 import type { Item } from '@/lib/layout/items';
+import type { LengthUnit } from '@/lib/layout/length-units';
 import { ItemNames } from './item-names';
 import { ItemShape } from './item-shape';
 import type { DrawingMode, DrawnArm, DrawnBand, SheetPointer } from './types';
@@ -18,6 +19,10 @@ export interface ItemsLayerProps {
   readonly selectedTaskPointId?: string | null;
   /** Actuator values by robot id (rad or m); a robot without is drawn as its base. */
   readonly postures?: ReadonlyMap<string, readonly number[]>;
+  /** How strongly it is drawn, 0 to 1; what is chosen is always drawn in full. */
+  readonly opacity?: number;
+  /** What lengths are lettered in. */
+  readonly lengthUnit?: LengthUnit;
   /** By task point id. */
   readonly verdicts?: ReadonlyMap<string, DrawnBand>;
   /** Both listen in `edit` mode only, and must keep their identity between renders. */
@@ -63,10 +68,20 @@ interface ItemGroupProps extends ItemsLayerProps {
 }
 
 const ItemGroup = memo(function ItemGroup(props: ItemGroupProps) {
-  const { items, arms, mode, postures, verdicts, chosen, selectedTaskPointId = null } = props;
+  const {
+    items,
+    arms,
+    mode,
+    postures,
+    verdicts,
+    chosen,
+    opacity = 1,
+    lengthUnit = 'mm',
+    selectedTaskPointId = null,
+  } = props;
   const palette = usePalette(mode);
   return (
-    <Layer listening={mode === 'edit'}>
+    <Layer listening={mode === 'edit'} opacity={chosen ? 1 : opacity}>
       {items.map((item) => (
         <ItemShape
           key={item.id}
@@ -78,11 +93,12 @@ const ItemGroup = memo(function ItemGroup(props: ItemGroupProps) {
           chosen={chosen}
           mode={mode}
           palette={palette}
+          lengthUnit={lengthUnit}
           onItemPointerDown={props.onItemPointerDown}
           onTaskPointPointerDown={props.onTaskPointPointerDown}
         />
       ))}
-      <ItemNames items={items} arms={arms} palette={palette} />
+      <ItemNames items={items} arms={arms} palette={palette} lengthUnit={lengthUnit} />
     </Layer>
   );
 }, drawsAlike);
@@ -99,6 +115,8 @@ const DRAWN_PROPS = [
   'mode',
   'postures',
   'verdicts',
+  'opacity',
+  'lengthUnit',
   'selectedTaskPointId',
   'onItemPointerDown',
   'onTaskPointPointerDown',

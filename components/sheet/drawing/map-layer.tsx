@@ -20,12 +20,13 @@ export interface MapLayerProps {
   readonly threshold?: number | null;
   /** Values of the lines of equal value; leave out while a map follows a drag. Must keep its identity between renders. */
   readonly isoLines?: readonly number[] | null;
+  readonly opacity?: number;
   readonly mode?: DrawingMode;
 }
 
 /** The composite of all robots' maps, under the linework. */
 export const MapLayer = memo(function MapLayer(props: MapLayerProps) {
-  const { map, scale, range, threshold = null, isoLines = null, mode } = props;
+  const { map, scale, range, threshold = null, isoLines = null, opacity = 1, mode } = props;
   const palette = usePalette(mode);
   const [painter] = useState(() => new MapPainter());
   const image = useMemo(() => map && painter.map(map, scale, range), [painter, map, scale, range]);
@@ -44,6 +45,7 @@ export const MapLayer = memo(function MapLayer(props: MapLayerProps) {
   return (
     <Shape
       listening={false}
+      opacity={opacity}
       sceneFunc={(context, shape) => {
         const ink = inkOf(context);
         const px = pixelOf(shape);

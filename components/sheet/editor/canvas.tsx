@@ -12,6 +12,8 @@ import {
   SelectionHandles,
   SheetStage,
 } from '@/components/sheet/drawing';
+import { useLayers } from '@/lib/client/use-layers';
+import { useUnits } from '@/lib/client/use-units';
 import { inOrder } from '@/lib/editor/order';
 import { shownItems } from '@/lib/editor/sheet';
 import { useBoardRemarks } from './board-remarks';
@@ -21,6 +23,7 @@ import { useFloor } from './floor-context';
 import { PlumbMarks } from './plumb-marks';
 import { usePostures, useVerdicts } from './readings-context';
 import { sheetBounds } from './sheet-bounds';
+import { usePlanPoints } from './use-plan-points';
 import { useMapLook } from './use-map-look';
 import { useToolPointer } from './use-tool-pointer';
 
@@ -37,6 +40,9 @@ export function Canvas() {
   const postures = usePostures();
   const settings = useBoardSettings();
   const look = useMapLook();
+  const layers = useLayers();
+  const { unit } = useUnits();
+  usePlanPoints();
   const pointer = useToolPointer();
   const box = useRef<HTMLDivElement>(null);
   useMeasuredAndFitted(box);
@@ -96,14 +102,17 @@ export function Canvas() {
               range={look.range}
               threshold={measure === 'reach' ? null : thresholds[measure]}
               isoLines={isDragging ? null : look.isoLines}
+              opacity={layers.map}
             />
             <GridLayer />
-            <FloorPlanLayer floorPlan={floorPlan} pictureUrl={pictureUrl} />
+            <FloorPlanLayer floorPlan={floorPlan} pictureUrl={pictureUrl} opacity={layers.plan} />
           </GroundLayer>
           <ItemsLayer
             items={shown}
             arms={arms}
             mode="edit"
+            opacity={layers.linework}
+            lengthUnit={unit}
             selectedIds={selectedIds}
             selectedTaskPointId={selection.taskPointId}
             postures={postures}

@@ -5,9 +5,10 @@ import Link from 'next/link';
 import { Button } from '@/components/ui/button';
 import { Menu, MenuChoice, MenuHeading, MenuItem, MenuRule } from '@/components/ui/menu';
 import { toast } from '@/components/ui/toaster';
-import { sayError } from '@/lib/client/fetcher';
+import { sayError, send } from '@/lib/client/fetcher';
 import { useAnswer } from '@/lib/client/use-answer';
-import { floorPlanListSchema } from '@/lib/contracts/floor-plans';
+import { floorPlanListSchema, type FloorPlan } from '@/lib/contracts/floor-plans';
+import { carriedCalibration } from '@/lib/layout/carry-calibration';
 import { useBoard } from './board-context';
 
 const NONE = 'none';
@@ -20,10 +21,27 @@ export function useProjectFloorPlans(projectId: string) {
 /** Which floor plan lies under the sheet. */
 export function FloorPlanChoice() {
   const { projectId, floorPlan, chooseFloorPlan } = useBoard();
-  const { data } = useProjectFloorPlans(projectId);
+  const { data, mutate } = useProjectFloorPlans(projectId);
   const plans = data?.floorPlans ?? [];
   const choose = (value: string) => {
-    chooseFloorPlan(value === NONE ? null : value).catch((error: unknown) => toast.error(sayError(error)));
+    swap(value === NONE ? null : (plans.find(({ id }) => id === value) ?? null)).catch((error: unknown) =>
+      toast.error(sayError(error)),
+    );
+  };
+  /** Items stand on the floor, so they stay; a newer picture of the same sheet takes the scale of the one before it. */
+  const swap = async (next: FloorPlan | null) => {
+    const carried = next && !next.calibration && floorPlan?.calibration;
+    const calibration = carried && carriedCalibration(carried, floorPlan, next);
+    if (next && calibration) {
+      await send('PATCH', `/api/floor-plans/${encodeURIComponent(next.id)}`, { calibration });
+      await mutate();
+    }
+    await chooseFloorPlan(next?.id ?? null);
+    if (next && calibration) {
+      toast(`${next.name} has the scale and origin of ${floorPlan?.name}. Check a distance on it.`);
+    } else if (carried) {
+      toast(`${next.name} has another shape than ${floorPlan?.name}. Set it to scale by itself.`);
+    }
   };
   return (
     <Menu

@@ -8,7 +8,9 @@ import { selectTool } from '@/lib/editor/tools/select';
 import { panTool } from '@/lib/editor/tools/place';
 import { zoomAt } from '@/lib/layout/viewport';
 import { useBoard, useBoardSheet } from './board-context';
+import { EditMenu } from './edit-menu';
 import { FloorPlanChoice } from './floor-plan-choice';
+import { LayersChoice } from './layers-choice';
 import { SnapChoice } from './snap-choice';
 import { sheetBounds } from './sheet-bounds';
 
@@ -55,9 +57,11 @@ export function Toolbar({ onShortcuts }: { readonly onShortcuts: () => void }) {
       >
         <Redo2 aria-hidden className="size-4" />
       </Tool>
+      <EditMenu />
       <Gap />
       <SnapChoice />
       <FloorPlanChoice />
+      <LayersChoice />
       <span className="ml-auto" />
       <Tool label="Zoom out" hint="−" onClick={() => zoom(1 / ZOOM)}>
         <Minus aria-hidden className="size-4" />

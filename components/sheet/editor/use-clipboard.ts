@@ -2,7 +2,7 @@
 
 import { useEffect, useMemo } from 'react';
 import { copiedText, pasted, readCopied } from '@/lib/editor/clipboard';
-import { removed } from '@/lib/editor/edits';
+import { onTheirOwn, removed } from '@/lib/editor/edits';
 import { named } from '@/lib/editor/tools/move';
 import { chosen } from '@/lib/editor/tools/tool';
 import type { Item } from '@/lib/layout/items';
@@ -25,7 +25,7 @@ export function useClipboard() {
     const take = (): string | null => {
       const items = selected();
       if (items.length === 0) return null;
-      const text = copiedText(items, layout.id);
+      const text = copiedText(onTheirOwn(items, sheet.getState().items), layout.id);
       try {
         localStorage.setItem(KEPT, text);
       } catch {
@@ -59,14 +59,19 @@ export function useClipboard() {
       else sheet.commit(`Paste ${named(copied.items)}`, result.changes, chosen(...result.itemIds));
       return true;
     };
+    const copy = () => {
+      const text = take();
+      // Where the system's clipboard is closed to the page, the kept copy serves.
+      if (text) void navigator.clipboard?.writeText(text).catch(() => undefined);
+    };
     return {
       take,
       drop,
       put,
-      copy() {
-        const text = take();
-        // Where the system's clipboard is closed to the page, the kept copy serves.
-        if (text) void navigator.clipboard?.writeText(text).catch(() => undefined);
+      copy,
+      cut() {
+        copy();
+        drop();
       },
       async paste() {
         const text = await navigator.clipboard?.readText().catch(() => null);

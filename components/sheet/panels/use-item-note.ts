@@ -35,7 +35,7 @@ export function useItemNote(item: Item): ItemNote {
       return { title: item.name, words: units.length(length), tone: 'figures' };
     }
     case 'conveyor': {
-      const speed = item.speedMmS === null ? 'speed not given' : `${printed(item.speedMmS, 0)} mm/s`;
+      const speed = item.speedMmS === null ? 'speed not given' : `${units.length(item.speedMmS)}/s`;
       return { title: item.name, words: speed, tone: 'soft' };
     }
     case 'note':

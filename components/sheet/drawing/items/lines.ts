@@ -1,4 +1,5 @@
 import type { Dimension, GuardLine, Walkway } from '@/lib/layout/items';
+import { lengthFigure, lengthWords, type LengthUnit } from '@/lib/layout/length-units';
 import type { Palette } from '@/lib/layout/palette';
 import { fenceStrokes } from '@/lib/layout/guard-doors';
 import { walkwayEdges } from '@/lib/layout/walkway-edges';
@@ -59,19 +60,25 @@ export function drawWalkway(ink: Ink, palette: Palette, px: number, walkway: Wal
 }
 
 /** The name, and the clear width where the name does not say it already. */
-function walkwayWords({ name, widthMm }: Walkway): string {
-  return name.includes(String(widthMm)) ? name : `${name}, keep ${widthMm} mm clear`;
+function walkwayWords({ name, widthMm }: Walkway, unit: LengthUnit): string {
+  return name.includes(String(widthMm)) ? name : `${name}, keep ${lengthWords(widthMm, unit)} clear`;
 }
 
 /** What a walkway asks for, on its middle line near the beginning. */
-export function drawWalkwayName(ink: Ink, palette: Palette, px: number, walkway: Walkway): void {
+export function drawWalkwayName(
+  ink: Ink,
+  palette: Palette,
+  px: number,
+  walkway: Walkway,
+  unit: LengthUnit = 'mm',
+): void {
   const [[x1, y1], [x2, y2]] = walkway.pointsMm;
   const turn = radians(walkway.angleDeg);
   const along = Math.atan2(y2 - y1, x2 - x1);
   const { angleRad, flipped } = uprightAngle(along + turn);
   if (Math.hypot(x2 - x1, y2 - y1) < 80 * px) return;
   letter(ink, palette, px, {
-    text: walkwayWords(walkway),
+    text: walkwayWords(walkway, unit),
     xMm: flipped ? x2 : x1,
     yMm: flipped ? y2 : y1,
     angleRad: angleRad - turn,
@@ -85,8 +92,14 @@ export function drawWalkwayName(ink: Ink, palette: Palette, px: number, walkway:
 const ARROW_LENGTH_PX = 9;
 const ARROW_HALF_PX = 2.6;
 
-/** A dimension as a drawing office draws it: extension lines, arrows, and the length in millimetres over the line. */
-export function drawDimension(ink: Ink, palette: Palette, px: number, dimension: Dimension): void {
+/** A dimension as a drawing office draws it: extension lines, arrows, and the length over the line, in millimetres or inches. */
+export function drawDimension(
+  ink: Ink,
+  palette: Palette,
+  px: number,
+  dimension: Dimension,
+  unit: LengthUnit = 'mm',
+): void {
   const { fromMm, toMm, offsetMm } = dimension;
   const length = Math.hypot(toMm[0] - fromMm[0], toMm[1] - fromMm[1]);
   if (length === 0) return;
@@ -124,7 +137,7 @@ export function drawDimension(ink: Ink, palette: Palette, px: number, dimension:
   }
   const { flipped } = uprightAngle(along + radians(dimension.angleDeg));
   letter(ink, palette, px, {
-    text: String(Math.round(length)),
+    text: lengthFigure(length, unit, 0),
     xMm: length / 2,
     yMm: offsetMm,
     angleRad: flipped ? Math.PI : 0,
