@@ -27,6 +27,7 @@ const FIELDS = [
   'maximumToolSpeed',
   'sureSpeed',
   'limitShare',
+  'wristCoverage',
 ] as const satisfies readonly (keyof MapTile)[];
 
 /** One tile of all rows. Throws ProblemError `unreadable` where rows are missing. */
@@ -43,6 +44,7 @@ export function joinTiles(tiles: readonly MapTile[], columns: number, rows: numb
     maximumToolSpeed: new Float32Array(cells),
     sureSpeed: new Float32Array(cells),
     limitShare: new Float32Array(cells),
+    wristCoverage: new Float32Array(cells),
   };
   let joined = 0;
   for (const tile of tiles) {

@@ -64,6 +64,13 @@ export const mapRequestSchema = z
         z.object({ kind: z.literal('vector'), vector: direction }),
       ])
       .default({ kind: 'down' }),
+    /** Every sampled direction about the map's own has to be reached; values are the worst of them. Radians. */
+    cone: z
+      .object({
+        halfAngle: z.number().positive('A cone opens by more than zero.').max(Math.PI, 'A cone opens by at most π.'),
+        samples: z.number().int().min(1).max(1000).default(24),
+      })
+      .optional(),
     roll: roll.default('free'),
     wrist: z.enum(['held', 'free']).default('held'),
     branch: z.string().default('best'),
@@ -130,6 +137,7 @@ export const analyseAnswerSchema = z.object({
       maximumToolSpeed: z.array(z.number().nullable()),
       sureSpeed: z.array(z.number().nullable()),
       limitShare: z.array(z.number().nullable()),
+      wristCoverage: z.array(z.number()),
       summary: z.object({
         reachedAreaM2: z.number(),
         bestInverseConditionNumber: z.number().nullable(),

@@ -30,6 +30,7 @@ export interface MapAnswer {
   readonly maximumToolSpeed: (number | null)[];
   readonly sureSpeed: (number | null)[];
   readonly limitShare: (number | null)[];
+  readonly wristCoverage: number[];
   readonly summary: {
     readonly reachedAreaM2: number;
     readonly bestInverseConditionNumber: number | null;
@@ -92,6 +93,7 @@ function answerMap(arm: Arm, request: MapRequest): MapAnswer {
     maximumToolSpeed: plane(tile.maximumToolSpeed),
     sureSpeed: plane(tile.sureSpeed),
     limitShare: plane(tile.limitShare),
+    wristCoverage: Array.from(tile.wristCoverage),
     summary: { reachedAreaM2, bestInverseConditionNumber, fastestToolSpeed },
   };
 }

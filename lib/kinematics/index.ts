@@ -29,7 +29,7 @@ export {
 } from './measures/principal-directions';
 export { spreadDirections, wristCoverage, type Directions, type WristCoverage } from './measures/wrist-coverage';
 export { velocityOutlines, type VelocityOutline, type VelocityOutlines } from './velocity-outline';
-export { computeMapTile, makeMapComputer, type MapComputer } from './maps/compute-tile';
+export { branchNames, computeMapTile, makeMapComputer, type MapComputer } from './maps/compute-tile';
 export { decodeMapTile, encodeMapTile, makeMapTile } from './maps/tile-codec';
 export { analyse, reasonInWords, type Answers, type Questions } from './analyse';
 export { mapSummary, type MapSummary } from './maps/summary';

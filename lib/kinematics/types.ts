@@ -103,11 +103,19 @@ export interface MapGrid {
   readonly rows: number;
 }
 
+/** Directions about the map's own: `samples` of them, even over the cone that opens by `halfAngle` (rad, above 0 and at most π) to every side. */
+export interface MapCone {
+  readonly halfAngle: number;
+  readonly samples: number;
+}
+
 export interface MapRequest {
   readonly grid: MapGrid;
   /** Height of the tool point (m). */
   readonly toolHeight: number;
   readonly direction: MapDirection;
+  /** A spot is then reached where every direction of the cone is, and has the worst value of them. */
+  readonly cone?: MapCone;
   readonly roll: number | 'free';
   readonly wrist: WristMode;
   readonly branch: 'best' | string;
@@ -128,4 +136,6 @@ export interface MapTile {
   readonly sureSpeed: Float32Array;
   /** Share of range left to the nearest joint limit, 0 … 0.5. */
   readonly limitShare: Float32Array;
+  /** Share of the cone's directions that are reached, 0 … 1; without a cone 1 where reached and 0 elsewhere. Never NaN. */
+  readonly wristCoverage: Float32Array;
 }

@@ -42,6 +42,7 @@ function mapOf(
     maximumToolSpeed: value,
     sureSpeed: value,
     limitShare: value,
+    wristCoverage: Float32Array.from(reason, (code) => (code === 0 ? 1 : 0)),
   };
   return { robotId, placement, grid, tile };
 }

@@ -107,6 +107,8 @@ function addRobot(target: FloorMap, map: PlacedMap, index: number): void {
   const { grid, placement, tile } = map;
   const source = measure === 'reach' ? null : tile[measure];
   const reason = tile.reason;
+  // The share of a cone is told wherever any of it is reached.
+  const partly = measure === 'wristCoverage' ? tile.wristCoverage : null;
   const angle = (placement.angleDeg * Math.PI) / 180;
   const [cosine, sine] = [Math.cos(angle), Math.sin(angle)];
   const inverseStep = 1 / grid.stepMm;
@@ -126,7 +128,7 @@ function addRobot(target: FloorMap, map: PlacedMap, index: number): void {
       const mapRow = Math.floor(startRow + column * stepRow);
       if (mapColumn < 0 || mapRow < 0 || mapColumn >= grid.columns || mapRow >= grid.rows) continue;
       const spot = mapRow * grid.columns + mapColumn;
-      if (reason[spot] !== 0) continue;
+      if (partly ? partly[spot] === 0 : reason[spot] !== 0) continue;
       reachedBy[cell] += 1;
       const here = source === null ? 1 : source[spot];
       // Written so that NaN, the mark of a cell without a value yet, gives way, and a value that does not exist never counts.

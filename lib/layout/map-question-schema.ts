@@ -12,7 +12,15 @@ export const mapQuestionSchema = z.object({
   /** Height of the tool point above the base plate: tool height on the sheet less the riser. */
   toolHeightMm: z.number().min(-20_000).max(20_000),
   /** A fixed roll counts in the base frame. */
-  settings: mapSettingsSchema.pick({ tiltDeg: true, towards: true, rollDeg: true, wrist: true, stepMm: true }),
+  settings: mapSettingsSchema.pick({
+    tiltDeg: true,
+    towards: true,
+    coneDeg: true,
+    rollDeg: true,
+    wrist: true,
+    branch: true,
+    stepMm: true,
+  }),
   /** Heading in the base frame; only used with `towards: heading` and a tilt. */
   headingDeg: z.number().min(-720).max(720).default(0),
 });

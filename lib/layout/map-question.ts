@@ -1,3 +1,5 @@
+import { branchNames } from '@/lib/kinematics/maps/compute-tile';
+import { CONE_SAMPLES } from '@/lib/kinematics/maps/cone-sweep';
 import type { Arm, MapDirection, MapGrid, MapRequest } from '@/lib/kinematics/types';
 import type { FloorGrid } from './floor-map';
 import type { Robot } from './items';
@@ -35,8 +37,10 @@ export function questionOfRobot(robot: Robot, settings: MapSettings): MapQuestio
     settings: {
       tiltDeg: settings.tiltDeg,
       towards,
+      coneDeg: settings.coneDeg,
       rollDeg: rollInBase(robot, settings),
       wrist: settings.wrist,
+      branch: settings.branch,
       stepMm: settings.stepMm,
     },
     headingDeg: towards === 'heading' ? wrappedDeg(settings.headingDeg - robot.angleDeg) : 0,
@@ -64,16 +68,17 @@ export interface KernelQuestion {
 
 export function mapRequestOf(question: MapQuestion, arm: Arm): KernelQuestion {
   const armAndTool = armWithTool(arm, question.tool);
-  const { rollDeg, wrist } = question.settings;
+  const { coneDeg, rollDeg, wrist, branch } = question.settings;
   return {
     arm: armAndTool,
     request: {
       grid: mapGridOf(armAndTool, question.settings.stepMm),
       toolHeight: question.toolHeightMm / 1000,
       direction: directionOf(question),
+      ...(coneDeg > 0 && { cone: { halfAngle: radians(coneDeg), samples: CONE_SAMPLES } }),
       roll: rollDeg === 'free' ? 'free' : radians(rollDeg),
       wrist,
-      branch: 'best',
+      branch: branch !== 'best' && branchNames(armAndTool).includes(branch) ? branch : 'best',
     },
   };
 }

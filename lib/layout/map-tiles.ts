@@ -28,6 +28,7 @@ const PLANES = [
   'maximumToolSpeed',
   'sureSpeed',
   'limitShare',
+  'wristCoverage',
 ] as const;
 
 /**

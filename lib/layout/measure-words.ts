@@ -30,6 +30,12 @@ export const MEASURE_WORDS: Record<MapMeasure, MeasureWords> = {
     decimals: 2,
     plainly: 'darker = the tool can go faster in every direction',
   },
+  wristCoverage: {
+    name: 'Wrist coverage',
+    unit: '',
+    decimals: 2,
+    plainly: 'darker = more of the cone of tool directions is reached',
+  },
   reach: {
     name: 'Reach',
     unit: '',
@@ -55,7 +61,12 @@ export function directionWords({ tiltDeg, towards, headingDeg }: MapSettings): s
 
 /** What a sheet's map was asked: `tool down, height 850 mm, best robot`. */
 export function questionWords(settings: MapSettings): string {
-  return `${directionWords(settings)}, height ${settings.toolHeightMm} mm, best robot`;
+  const { coneDeg, branch, stackMm, stackShown } = settings;
+  const heights = stackMm.length > 0 && stackShown === 'worst' ? stackMm : [settings.toolHeightMm];
+  const height = heights.length > 1 ? `worst of ${heights.length} heights` : `height ${heights[0]} mm`;
+  const cone = coneDeg > 0 ? `, worst in a cone of ${coneDeg}°` : '';
+  const posture = branch === 'best' ? '' : `, ${branch}`;
+  return `${directionWords(settings)}${cone}, ${height}${posture}, best robot`;
 }
 
 export function wristWords(settings: Pick<MapSettings, 'wrist'>): string {

@@ -90,7 +90,7 @@ export interface ValueRange {
 
 /** A range from zero to just above the greatest of `values` (NaN left out), on a round number. One for both of two compared maps. */
 export function valueRange(measure: MapMeasure, ...values: readonly Float32Array[]): ValueRange {
-  if (measure === 'reach') return { from: 0, to: 1 };
+  if (measure === 'reach' || measure === 'wristCoverage') return { from: 0, to: 1 };
   let greatest = 0;
   for (const array of values) {
     for (let cell = 0; cell < array.length; cell += 1) if (array[cell] > greatest) greatest = array[cell];

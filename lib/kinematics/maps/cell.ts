@@ -6,6 +6,8 @@ export interface Cell {
   maximumToolSpeed: number;
   sureSpeed: number;
   limitShare: number;
+  /** Share of the directions asked for that are reached. */
+  coverage: number;
   branch: number;
   roll: number;
   reason: number;
@@ -25,6 +27,7 @@ export function emptyCell(): Cell {
     maximumToolSpeed: NaN,
     sureSpeed: NaN,
     limitShare: NaN,
+    coverage: 0,
     branch: 0,
     roll: 0,
     reason: CODE['not found'],
@@ -56,6 +59,7 @@ export function note(cell: Cell, reason: number, joint: number, by: number) {
 export function write(out: MapTile, at: number, cell: Cell) {
   out.reason[at] = cell.reason;
   out.bindingJoint[at] = cell.joint;
+  out.wristCoverage[at] = cell.coverage;
   if (cell.reason !== CODE.reached) return;
   out.branch[at] = cell.branch;
   out.inverseConditionNumber[at] = cell.value;

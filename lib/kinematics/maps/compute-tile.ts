@@ -1,4 +1,4 @@
-import { makeSolver } from '../solver';
+import { makeSolver, type Solver } from '../solver';
 import type { Arm, MapRequest, MapTile } from '../types';
 import { write } from './cell';
 import { makeFullGrid } from './full-grid';
@@ -18,12 +18,18 @@ export type MapRoute = 'auto' | 'symmetry' | 'full grid' | 'reference';
 /** Cells from which on a radial profile costs less than judging each cell. */
 const SYMMETRY_PAYS = 2000;
 
-/** Throws a RangeError where the request names a branch that the arm does not have. */
+/** Names of the classes of branch that maps of an arm can be asked for; none where it has no closed form. */
+export function branchNames(arm: Arm): string[] {
+  return namesOf(makeSolver(arm));
+}
+
+const namesOf = ({ closedForm }: Solver): string[] =>
+  closedForm ? Array.from({ length: closedForm.classes }, (_, code) => closedForm.nameOf(code)) : [];
+
+/** Throws a RangeError where the request names a branch that the arm does not have, or a cone that is none. */
 export function makeMapComputer(arm: Arm, request: MapRequest, route: MapRoute = 'auto'): MapComputer {
   const solver = makeSolver(arm);
-  const classes = solver.closedForm
-    ? Array.from({ length: solver.closedForm.classes }, (_, code) => solver.closedForm!.nameOf(code))
-    : [];
+  const classes = namesOf(solver);
   const wanted = request.branch === 'best' ? -1 : classes.indexOf(request.branch);
   if (request.branch !== 'best' && wanted < 0) throw new RangeError(`This arm has no branch "${request.branch}".`);
 
@@ -40,6 +46,7 @@ export function makeMapComputer(arm: Arm, request: MapRequest, route: MapRoute =
     if (symmetry) {
       fill ??= makeRadialRows(symmetry, request, grid);
       fill(out);
+      for (let i = 0; i < out.reason.length; i++) out.wristCoverage[i] = out.reason[i] === 0 ? 1 : 0;
       return out;
     }
     grid.start();

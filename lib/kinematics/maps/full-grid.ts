@@ -3,7 +3,8 @@ import type { Solver } from '../solver';
 import { orient } from '../target';
 import { identityTransform, type Transform } from '../transforms';
 import type { MapRequest, Vec3 } from '../types';
-import { emptyCell, resetCell, type Cell } from './cell';
+import { CODE, emptyCell, resetCell, type Cell } from './cell';
+import { makeConeSweep } from './cone-sweep';
 import { makeFamilyJudge } from './family-judge';
 import { makeNumericalJudge, makeReferenceJudge } from './reference-judge';
 import { makeRollSearch, type Judge } from './roll-search';
@@ -31,6 +32,7 @@ export function makeFullGrid(solver: Solver, request: MapRequest, wanted: number
   const lastIsFree = freeRoll && solver.toolOnLastAxis;
   const searches = freeRoll && solver.closedForm !== null && !lastIsFree;
   const outward = direction.kind === 'outward';
+  const { cone } = request;
   const gauge = makeGauge(solver.chain, solver.freedoms, request.wrist);
   const general = !solver.closedForm
     ? makeNumericalJudge(solver, gauge, freeRoll, cell)
@@ -39,7 +41,15 @@ export function makeFullGrid(solver: Solver, request: MapRequest, wanted: number
       : makeReferenceJudge(solver, gauge, wanted, lastIsFree, cell);
   const six =
     quick && solver.method === 'spherical wrist' && solver.freedoms.length === 6
-      ? makeSixAxisJudge(solver.chain, request.wrist, wanted, lastIsFree, outward || searches, searches, cell)
+      ? makeSixAxisJudge(
+          solver.chain,
+          request.wrist,
+          wanted,
+          lastIsFree,
+          outward || searches || cone !== undefined,
+          searches,
+          cell,
+        )
       : null;
 
   const visitBy = (judge: Judge): (() => boolean) => (searches ? makeRollSearch(pose, cell, judge) : () => judge(pose));
@@ -47,6 +57,17 @@ export function makeFullGrid(solver: Solver, request: MapRequest, wanted: number
   const visitQuick = six ? visitBy(six.judge) : null;
   const baseX = solver.chain.base[3];
   const baseY = solver.chain.base[7];
+
+  function visit() {
+    resetCell(cell);
+    if (visitQuick) {
+      if (visitQuick()) return;
+      resetCell(cell);
+    }
+    visitGeneral();
+  }
+
+  const sweep = cone ? makeConeSweep(cone, roll, pose, cell, visit) : null;
 
   return {
     cell,
@@ -60,12 +81,9 @@ export function makeFullGrid(solver: Solver, request: MapRequest, wanted: number
       pose[7] = origin[1] + row * step;
       pose[11] = toolHeight;
       if (direction.kind === 'outward') orientOutward(pose, baseX, baseY, direction.tilt, roll);
-      resetCell(cell);
-      if (visitQuick) {
-        if (visitQuick()) return;
-        resetCell(cell);
-      }
-      visitGeneral();
+      if (sweep) return sweep();
+      visit();
+      cell.coverage = cell.reason === CODE.reached ? 1 : 0;
     },
   };
 }

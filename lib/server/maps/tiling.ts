@@ -25,7 +25,11 @@ interface Question {
   readonly request: MapRequest;
 }
 
-function workPerSpot({ arm, request }: Question): number {
+function workPerSpot(question: Question): number {
+  return workPerDirection(question) * (question.request.cone?.samples ?? 1);
+}
+
+function workPerDirection({ arm, request }: Question): number {
   const { closedForm, toolOnLastAxis } = makeSolver(arm);
   if (!closedForm) return NUMERICAL_WORK;
   const searches = request.roll === 'free' && !toolOnLastAxis;
