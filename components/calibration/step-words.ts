@@ -15,7 +15,7 @@ export const STEP_WORDS: Record<StepName, { title: string; body: string }> = {
   },
   origin: {
     title: 'Origin',
-    body: 'The floor point x 0, y 0. It starts in the lower left corner of the picture.',
+    body: 'Click the floor point that is x 0, y 0: a column, a corner of the bay. It starts in the lower left corner of the picture.',
   },
 };
 

@@ -46,7 +46,11 @@ function reduce(state: State, action: Action): State {
   const { draft, selected } = state;
   switch (action.type) {
     case 'openStep':
-      return { ...state, step: action.step, selected: missingHandle(draft, action.step) };
+      return {
+        ...state,
+        step: action.step,
+        selected: action.step === 'origin' ? 'origin' : missingHandle(draft, action.step),
+      };
     case 'select':
       return { ...state, selected: action.handle, step: action.handle ? stepOf(action.handle) : state.step };
     case 'place': {
@@ -112,8 +116,9 @@ export function useCalibration(floorPlan: FloorPlan) {
     }),
     [floorPlan],
   );
-  /** The selected point has not been picked yet: a click on the picture places it. */
-  const isPicking = state.selected !== null && pointOf(state.draft, state.selected) === null;
+  /** A click on the picture places the selected point: one that has not been picked yet, or the origin, which is always somewhere. */
+  const isPicking =
+    state.selected !== null && (state.selected === 'origin' || pointOf(state.draft, state.selected) === null);
   return { ...state, ...reading, isPicking, deeds };
 }
 
