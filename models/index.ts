@@ -19,6 +19,8 @@ import { initRemarkReply } from './remark-reply';
 import { initRemark } from './remark';
 import { initRevision } from './revision';
 import { initShareLink } from './share-link';
+import { initStudySlice } from './study-slice';
+import { initStudy } from './study';
 import { initUser } from './user';
 
 /** Import models from here only: it is this file that binds them to the database and to one another. */
@@ -41,6 +43,8 @@ initRemarkReply(sequelize);
 initRemark(sequelize);
 initRevision(sequelize);
 initShareLink(sequelize);
+initStudySlice(sequelize);
+initStudy(sequelize);
 initUser(sequelize);
 associate();
 
@@ -63,6 +67,8 @@ export { RemarkReply } from './remark-reply';
 export { Remark } from './remark';
 export { Revision } from './revision';
 export { ShareLink } from './share-link';
+export { StudySlice } from './study-slice';
+export { Study } from './study';
 export { User } from './user';
 export type { AuthorSide } from './remark';
 export type { FloorPlanMediaType } from './floor-plan';

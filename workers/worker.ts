@@ -67,7 +67,7 @@ for (const signal of ['SIGTERM', 'SIGINT'] as const) process.on(signal, () => vo
 
 try {
   await boss.start();
-  jobInHand = await takeJobs(boss, { maps, log }, threads);
+  jobInHand = await takeJobs(boss, { maps, studies: maps, log }, threads);
   log.info({ threads }, 'worker ready');
 } catch (error) {
   log.fatal({ err: error }, 'worker cannot start: is the database there, and has the migrate step been run?');

@@ -1,9 +1,11 @@
 import type { Logger } from 'pino';
 import type { MapComputer } from '@/lib/server/maps/computer';
+import type { StudyComputer } from '@/lib/server/studies/computer';
 
 /** What a worker process lends to its jobs. */
 export interface JobContext {
   readonly maps: MapComputer;
+  readonly studies: StudyComputer;
   readonly log: Logger;
 }
 

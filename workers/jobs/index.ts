@@ -1,4 +1,4 @@
-import { mailJob, mapTileJob, type JobDefinition } from '@/lib/server/jobs';
+import { mailJob, mapTileJob, studySliceJob, type JobDefinition } from '@/lib/server/jobs';
 import type { JobHandler } from './handler';
 
 interface Registration {
@@ -17,6 +17,12 @@ export const REGISTRATIONS: readonly Registration[] = [
     atOnce: 'threads',
     pollSeconds: 0.5,
     load: async () => (await import('./map-tile')).handler,
+  },
+  {
+    definition: studySliceJob,
+    atOnce: 'threads',
+    pollSeconds: 0.5,
+    load: async () => (await import('./study-slice')).handler,
   },
   { definition: mailJob, atOnce: 2, pollSeconds: 1, load: async () => (await import('./mail')).handler },
 ];

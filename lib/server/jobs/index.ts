@@ -1,10 +1,12 @@
 import type { JobDefinition } from './definition';
 import { mailJob } from './mail';
 import { mapTileJob } from './map-tile';
+import { studySliceJob } from './study-slice';
 
 export { deadLetterOf, type JobDefinition } from './definition';
 export { mailJob, type MailJob } from './mail';
 export { mapTileJob, type MapTileJob } from './map-tile';
+export { studySliceJob, type StudySliceJob } from './study-slice';
 
 /** Every kind of job: the migrate step makes a queue for each, the worker takes from each. */
-export const JOBS: readonly JobDefinition[] = [mapTileJob, mailJob];
+export const JOBS: readonly JobDefinition[] = [mapTileJob, studySliceJob, mailJob];

@@ -5,6 +5,7 @@ import { dimensionSchema } from '@/lib/layout/items';
 import { armContent, unique, uniqueEmail } from '@/tests/factories';
 import type { CallOptions } from '@/tests/factories';
 import { newQuestion } from './access-world';
+import { newStudyQuestion } from './study-jobs';
 import type { AccessWorld } from './access-world';
 import { uploadForm } from './upload';
 
@@ -140,6 +141,11 @@ export const TABLE: readonly Row[] = [
   row('GET',    'maps/[mapId]/tiles',                       [401, 401,  404,  404,     200,   200,  200,   200], map),
   row('POST',   'maps/[mapId]/cancel',                      [401, 401,  403,  404,     403,   200,  200,   200], async (world) => ({ params: { mapId: (await world.addQueuedMap()).id } })),
   row('POST',   'maps/[mapId]/retry',                       [401, 401,  403,  404,     403,   200,  200,   200], async (world) => ({ params: { mapId: (await world.addFailedMap()).id } })),
+
+  row('POST',   'studies',                                  [401, 401,  403,  404,     403,   202,  202,   202], ({ armId }) => ({ body: newStudyQuestion(armId) })),
+  row('GET',    'studies/[studyId]',                        [401, 401,  403,  404,     403,   200,  200,   200], async (world) => ({ params: { studyId: (await world.addQueuedStudy()).id } })),
+  row('POST',   'studies/[studyId]/cancel',                 [401, 401,  403,  404,     403,   200,  200,   200], async (world) => ({ params: { studyId: (await world.addQueuedStudy()).id } })),
+  row('POST',   'studies/[studyId]/retry',                  [401, 401,  403,  404,     403,   200,  200,   200], async (world) => ({ params: { studyId: (await world.addFailedStudy()).id } })),
 
   row('GET',    'revisions/[revisionId]',                   [401, 401,  404,  404,     200,   200,  200,   200], revision),
   row('GET',    'revisions/[revisionId]/remarks',           [401, 401,  404,  404,     200,   200,  200,   200], revision),

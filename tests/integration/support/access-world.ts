@@ -3,10 +3,12 @@ import sharp from 'sharp';
 import { POST as uploadPlan } from '@/app/api/projects/[projectId]/floor-plans/route';
 import { floorPlanSchema } from '@/lib/contracts/floor-plans';
 import { askMap } from '@/lib/server/maps';
+import { askStudy } from '@/lib/server/studies';
 import { invitationRequestSchema } from '@/lib/contracts/accounts';
 import { mapQuestionSchema } from '@/lib/contracts/maps';
 import { createInvitation } from '@/lib/server/invitations/create-invitation';
-import type { DexterityMap } from '@/models';
+import type { DexterityMap, Study } from '@/models';
+import { newStudyQuestion } from './study-jobs';
 import {
   createArm,
   createFinishedMap,
@@ -62,6 +64,7 @@ export async function buildAccessWorld() {
   const { token } = await createShareLink({ revisionId: revision.id });
 
   const askNewMap = (): Promise<DexterityMap> => askMap(planner.actor, newQuestion(arm.id));
+  const askNewStudy = (): Promise<Study> => askStudy(planner.actor, newStudyQuestion(arm.id));
   return {
     projectId,
     callers,
@@ -83,6 +86,8 @@ export async function buildAccessWorld() {
         callers.admin.actor,
         invitationRequestSchema.parse({ email: uniqueEmail(), role: 'viewer', projectIds: [projectId] }),
       ),
+    addQueuedStudy: askNewStudy,
+    addFailedStudy: async () => (await askNewStudy()).update({ state: 'failed', failure: 'It failed' }),
     addQueuedMap: askNewMap,
     addFailedMap: async () => (await askNewMap()).update({ state: 'failed', failure: 'It failed' }),
   };

@@ -1,0 +1,8 @@
+import { z } from 'zod';
+import { idSchema } from '@/lib/contracts/common';
+import { route } from '@/lib/server/http';
+import { presentStudy, cancelStudy } from '@/lib/server/studies';
+
+export const POST = route({ role: 'planner', params: z.object({ studyId: idSchema }) }, async ({ actor, params }) =>
+  presentStudy(await cancelStudy(actor, params.studyId)),
+);
