@@ -2,7 +2,7 @@ import { z } from 'zod';
 import { itemSchema, type Item } from '@/lib/layout/items';
 import type { Change, Items } from './changes';
 import { withFreshIds, withoutStrangers } from './fresh-ids';
-import { freeName } from './make-items';
+import { freeName, kindWords } from './make-items';
 import { lastPlace } from './order';
 
 /**
@@ -88,7 +88,7 @@ export function pasted(copied: readonly Item[], { items, byMm, knowsArm, newId }
     const isTaken = [...now.values()].some(({ name }) => name === copy.name);
     const after: Item = {
       ...copy,
-      name: isTaken ? freeName(now, copy.kind) : copy.name,
+      name: isTaken ? freeName(now, copy.kind, kindWords(copy)) : copy.name,
       xMm: copy.xMm + byMm,
       yMm: copy.yMm - byMm,
       order: lastPlace(now),

@@ -1,8 +1,9 @@
-import { outlineFault } from '@/lib/layout/geometry';
+import { detached, isAttached, settledDimension } from '@/lib/layout/attached-dimensions';
+import { itemFault } from '@/lib/layout/item-fault';
 import { itemSchema, type Fixture, type Item, type TaskPoint } from '@/lib/layout/items';
 import { put, remove, type Change, type Items } from './changes';
 import { withFreshIds } from './fresh-ids';
-import { freeName } from './make-items';
+import { freeName, kindWords } from './make-items';
 import { lastPlace } from './order';
 import { normalAngle, tidy } from './snapping';
 
@@ -23,16 +24,9 @@ export function edited<T extends Item>(item: T, patch: Partial<T>): Edit<T> {
     const own = /^(Give|Write|A |An |That)/.test(issue.message);
     return { ok: false, message: own ? issue.message : (MESSAGES[issue.code] ?? issue.message) };
   }
-  const fault = faultOf(checked.data);
+  const fault = itemFault(checked.data);
   // Parsing keeps the kind, so what comes out is what went in.
   return fault ? { ok: false, message: fault } : { ok: true, value: checked.data as T };
-}
-
-/** Rules that one field alone cannot state. */
-function faultOf(item: Item): string | null {
-  if (item.kind !== 'fixture' && item.kind !== 'obstacle') return null;
-  if (item.zToMm <= item.zFromMm) return 'The top must be above the bottom. Write a larger top or a smaller bottom.';
-  return outlineFault(item.outlineMm);
 }
 
 export function editedTaskPoint(fixture: Fixture, taskPointId: string, patch: Partial<TaskPoint>): Edit<Fixture> {
@@ -70,8 +64,21 @@ export function turnedBy(items: Items, ids: readonly string[], byDeg: number): C
   return movable(items, ids).map((item) => put(items, { ...item, angleDeg: normalAngle(item.angleDeg + byDeg) }));
 }
 
+/** Takes items away; locked ones stay. Dimensions that followed one of them stay where they stand. */
 export function removed(items: Items, ids: readonly string[]): Change[] {
-  return movable(items, ids).map((item) => remove(items, item.id));
+  const gone = new Set(movable(items, ids).map(({ id }) => id));
+  const left = [...items.values()].filter((item) => isAttached(item) && !gone.has(item.id)).filter(isAttached);
+  const released = left.map((dimension) =>
+    detached(
+      dimension,
+      (id) => gone.has(id),
+      (id) => items.get(id),
+    ),
+  );
+  return [
+    ...[...gone].map((id) => remove(items, id)),
+    ...released.flatMap((dimension) => (dimension ? [put(items, dimension)] : [])),
+  ];
 }
 
 /** Locks, unlocks, hides or shows items; locked ones too. */
@@ -94,10 +101,10 @@ export function duplicated(
   const changes: Change[] = [];
   const now = new Map(items);
   const originals = ids.map((id) => items.get(id)).filter((item): item is Item => item !== undefined);
-  for (const fresh of withFreshIds(originals, newId)) {
+  for (const fresh of withFreshIds(onTheirOwn(originals, items), newId)) {
     const copy: Item = {
       ...fresh,
-      name: freeName(now, fresh.kind),
+      name: freeName(now, fresh.kind, kindWords(fresh)),
       xMm: fresh.xMm + byMm,
       yMm: fresh.yMm - byMm,
       order: lastPlace(now),
@@ -107,4 +114,14 @@ export function duplicated(
     changes.push({ itemId: copy.id, before: null, after: copy });
   }
   return { changes, copies: changes.map(({ itemId }) => itemId) };
+}
+
+/** Items as they stand now, the dimensions among them holding on to nothing outside: a copy does not follow its original's items. */
+export function onTheirOwn(chosen: readonly Item[], items: Items): Item[] {
+  const together = new Set(chosen.map(({ id }) => id));
+  const itemOf = (id: string) => items.get(id);
+  return chosen.map((item) => {
+    if (!isAttached(item)) return item;
+    return detached(item, (id) => !together.has(id), itemOf) ?? settledDimension(item, itemOf);
+  });
 }

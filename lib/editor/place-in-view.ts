@@ -1,3 +1,4 @@
+import { settledItems } from '@/lib/layout/attached-dimensions';
 import { boundsOfPoints } from '@/lib/layout/viewport';
 import type { Item, ItemKind } from '@/lib/layout/items';
 import { put, type Change, type Items } from './changes';
@@ -126,5 +127,9 @@ const placeOf = (item: Item): Measured => ({ atMm: [item.xMm, item.yMm], item })
 
 /** The part of the floor that the items take; null on an empty sheet. */
 export function boundsOfItems(items: Items) {
-  return boundsOfPoints([...items.values()].filter(({ hidden }) => !hidden).flatMap(footprint));
+  return boundsOfPoints(
+    settledItems([...items.values()])
+      .filter(({ hidden }) => !hidden)
+      .flatMap(footprint),
+  );
 }

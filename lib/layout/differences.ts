@@ -115,12 +115,21 @@ function pairDifferences({ left, right }: ItemPair): ItemDifference[] {
   if (left.kind === 'fixture' && right.kind === 'fixture') fixtureDifferences(left, right, note);
   if ('outlineMm' in left && 'outlineMm' in right) {
     if (!same(left.outlineMm, right.outlineMm)) note(`${right.name} outline`, 'redrawn');
-    if (left.zToMm !== right.zToMm) note(`${right.name} height`, fromTo(left.zToMm, right.zToMm));
+  }
+  if ('zToMm' in left && 'zToMm' in right && left.zToMm !== right.zToMm) {
+    note(`${right.name} height`, fromTo(left.zToMm, right.zToMm));
   }
   if ('pointsMm' in left && 'pointsMm' in right && !same(left.pointsMm, right.pointsMm)) note(right.name, 'redrawn');
-  if (left.kind === 'walkway' && right.kind === 'walkway' && left.widthMm !== right.widthMm) {
+  if ('widthMm' in left && 'widthMm' in right && left.widthMm !== right.widthMm) {
     note(`${right.name} width`, fromTo(left.widthMm, right.widthMm));
   }
+  if (left.kind === 'conveyor' && right.kind === 'conveyor' && left.speedMmS !== right.speedMmS) {
+    note(`${right.name} speed`, `${left.speedMmS ?? 'not given'} → ${right.speedMmS ?? 'not given'} mm/s`);
+  }
+  if (left.kind === 'guardLine' && right.kind === 'guardLine' && !same(left.doors, right.doors)) {
+    note(`${right.name} doors`, countOrRedrawn(left.doors.length, right.doors.length));
+  }
+  if (left.kind === 'note' && right.kind === 'note' && left.text !== right.text) note(right.name, 'other words');
   return found;
 }
 

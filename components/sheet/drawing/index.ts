@@ -9,6 +9,7 @@ export { MovedMarks } from './moved-marks';
 export { RemarkPins, type PinnedRemark } from './remark-pins';
 export { SelectionHandles } from './selection-handles';
 export { SheetStage, type SheetStageProps } from './sheet-stage';
+export { TaskWorkLayer } from './task-work-layer';
 export type { DrawingMode, DrawnArm, DrawnBand, SheetPointer } from './types';
 export { usePalette } from './use-palette';
 export { useStageFrame } from './viewport-context';

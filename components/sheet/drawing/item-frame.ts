@@ -28,8 +28,10 @@ function pointsOf(item: Exclude<Item, { kind: 'robot' }>): readonly PointMm[] {
   switch (item.kind) {
     case 'fixture':
     case 'obstacle':
+    case 'zone':
       return item.outlineMm;
     case 'guardLine':
+    case 'protectiveDevice':
       return item.pointsMm;
     case 'walkway':
     case 'conveyor':

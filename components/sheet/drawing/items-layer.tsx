@@ -2,6 +2,7 @@
 
 import { memo, useMemo } from 'react';
 import { Layer } from 'react-konva';
+import { settledItems } from '@/lib/layout/attached-dimensions';
 import type { Item } from '@/lib/layout/items';
 import type { LengthUnit } from '@/lib/layout/length-units';
 import { ItemNames } from './item-names';
@@ -50,7 +51,10 @@ const DEPTH: Record<Item['kind'], number> = {
 export const ItemsLayer = memo(function ItemsLayer(props: ItemsLayerProps) {
   const { items, selectedIds = NOTHING } = props;
   const ordered = useMemo(
-    () => items.filter(({ hidden }) => !hidden).sort((a, b) => DEPTH[a.kind] - DEPTH[b.kind]),
+    () =>
+      settledItems(items)
+        .filter(({ hidden }) => !hidden)
+        .sort((a, b) => DEPTH[a.kind] - DEPTH[b.kind]),
     [items],
   );
   const resting = ordered.filter(({ id }) => !selectedIds.has(id));

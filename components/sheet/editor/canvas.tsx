@@ -11,11 +11,14 @@ import {
   RemarkPins,
   SelectionHandles,
   SheetStage,
+  TaskWorkLayer,
 } from '@/components/sheet/drawing';
 import { useLayers } from '@/lib/client/use-layers';
 import { useUnits } from '@/lib/client/use-units';
 import { inOrder } from '@/lib/editor/order';
 import { shownItems } from '@/lib/editor/sheet';
+import { settledItems } from '@/lib/layout/attached-dimensions';
+import { floorWork } from '@/lib/layout/judging/drawn-work';
 import { useBoardRemarks } from './board-remarks';
 import { useBoard, useBoardSettings, useBoardSheet, useView } from './board-context';
 import { DraftMarks } from './draft-marks';
@@ -36,7 +39,7 @@ export function Canvas() {
   const selection = useBoardSheet((state) => state.selection);
   const tool = useBoardSheet((state) => state.tool);
   const { floorMap, isDragging } = useFloor();
-  const { byPoint } = useVerdicts();
+  const { byPoint, cell } = useVerdicts();
   const postures = usePostures();
   const settings = useBoardSettings();
   const look = useMapLook();
@@ -47,7 +50,7 @@ export function Canvas() {
   const box = useRef<HTMLDivElement>(null);
   useMeasuredAndFitted(box);
 
-  const shown = useMemo(() => inOrder(shownItems({ items, draft })), [items, draft]);
+  const shown = useMemo(() => settledItems(inOrder(shownItems({ items, draft }))), [items, draft]);
   const selectedIds = useMemo(
     () => new Set([...selection.itemIds, ...(draft?.items.map(({ id }) => id) ?? [])]),
     [selection, draft],
@@ -60,6 +63,7 @@ export function Canvas() {
     () => new Map([...byPoint].map(([pointId, { best }]) => [pointId, best?.band ?? ('unknown' as const)])),
     [byPoint],
   );
+  const work = useMemo(() => floorWork(shown, cell), [shown, cell]);
   const { remarks, chosenId: chosenRemarkId, choose: onRemark } = useBoardRemarks();
   const pins = useMemo(
     () => (remarks ?? []).map((remark) => ({ ...remark, resolved: remark.resolvedAt !== null })),
@@ -120,6 +124,7 @@ export function Canvas() {
             onItemPointerDown={tool.name === 'pan' ? undefined : pointer.onItem}
             onTaskPointPointerDown={tool.name === 'pan' ? undefined : pointer.onTaskPoint}
           />
+          <TaskWorkLayer {...work} chosenId={selection.taskPointId} mode="edit" />
           <OverlayLayer>
             {tool.name === 'select' && (
               <SelectionHandles items={chosenItems} arms={arms} onHandlePointerDown={pointer.onHandle} />

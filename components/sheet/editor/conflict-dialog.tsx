@@ -4,7 +4,7 @@ import { Button } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
 import type { Conflict } from '@/lib/editor/sync';
 import { itemDifferences } from '@/lib/editor/item-differences';
-import { KIND_WORDS } from '@/lib/editor/make-items';
+import { kindWords } from '@/lib/editor/make-items';
 import type { Item } from '@/lib/layout/items';
 import { useBoard, useBoardSheet } from './board-context';
 
@@ -58,7 +58,7 @@ function OneConflict({ conflict, mine, onDecide }: OneConflictProps) {
   return (
     <li className="border border-rule">
       <h3 className="border-b border-hair px-3 py-1.5 font-semibold">
-        {KIND_WORDS[named.kind]} {named.name}
+        {kindWords(named)} {named.name}
       </h3>
       <table className="w-full text-left text-sm">
         <thead>

@@ -4,7 +4,8 @@ import { useMemo } from 'react';
 import { placeInView, placeTaskPointInView } from '@/lib/editor/place-in-view';
 import { dimensionTool } from '@/lib/editor/tools/dimension';
 import { lineTool } from '@/lib/editor/tools/line';
-import { blockTool, panTool, plumbTool, robotTool, taskPointTool } from '@/lib/editor/tools/place';
+import { blockTool, noteTool, panTool, plumbTool, robotTool, taskPointTool } from '@/lib/editor/tools/place';
+import { sectionTool } from '@/lib/editor/tools/section';
 import { selectTool } from '@/lib/editor/tools/select';
 import type { Tool, ToolName } from '@/lib/editor/tools/tool';
 import { useBoard } from './board-context';
@@ -25,14 +26,22 @@ export function usePlace() {
         }
         case 'fixture':
         case 'obstacle':
+        case 'column':
+        case 'zone':
           return blockTool(name);
         case 'guardLine':
         case 'walkway':
+        case 'conveyor':
+        case 'protectiveDevice':
           return lineTool(name);
         case 'taskPoint':
           return taskPointTool();
         case 'dimension':
           return dimensionTool();
+        case 'sectionLine':
+          return sectionTool();
+        case 'note':
+          return noteTool();
         case 'plumb':
           return plumbTool();
         case 'pan':

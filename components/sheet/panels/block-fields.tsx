@@ -1,51 +1,18 @@
 'use client';
 
-import { rectangleOutline } from '@/lib/layout/geometry';
+import { SegmentedControl } from '@/components/ui/segmented-control';
 import type { Fixture, Obstacle } from '@/lib/layout/items';
-import { CornerList } from './corner-list';
+import { OutlineFields } from './outline-fields';
 import { useItemEdit } from './use-item-edit';
 import { ValueField } from './value-field';
 
-/** Width and depth where the outline is a rectangle about its place; null for any other outline. */
-export function rectangleSize(outline: Fixture['outlineMm']): { width: number; depth: number } | null {
-  if (outline.length !== 4) return null;
-  const xs = [...new Set(outline.map(([x]) => x))];
-  const ys = [...new Set(outline.map(([, y]) => y))];
-  if (xs.length !== 2 || ys.length !== 2 || xs[0] + xs[1] !== 0 || ys[0] + ys[1] !== 0) return null;
-  return { width: Math.abs(xs[0] - xs[1]), depth: Math.abs(ys[0] - ys[1]) };
-}
-
-/** Size and height of a fixture or obstacle. */
+/** Outline and height of a fixture, an obstacle or a column. */
 export function BlockFields({ item }: { readonly item: Fixture | Obstacle }) {
   const edit = useItemEdit<Fixture | Obstacle>(item);
-  const size = rectangleSize(item.outlineMm);
-  const resize = (width: number, depth: number) =>
-    width <= 0 || depth <= 0
-      ? 'A side is longer than zero.'
-      : edit('Size', { outlineMm: rectangleOutline(width, depth) });
   return (
     <>
-      <div className="mt-2 grid grid-cols-4 gap-x-3">
-        {size && (
-          <>
-            <ValueField
-              label="Width"
-              kind="length"
-              value={size.width}
-              step={50}
-              disabled={item.locked}
-              onCommit={(width) => resize(width, size.depth)}
-            />
-            <ValueField
-              label="Depth"
-              kind="length"
-              value={size.depth}
-              step={50}
-              disabled={item.locked}
-              onCommit={(depth) => resize(size.width, depth)}
-            />
-          </>
-        )}
+      <OutlineFields item={item} />
+      <div className="mt-2 grid grid-cols-4 items-end gap-x-3">
         <ValueField
           label="Bottom"
           kind="length"
@@ -62,15 +29,25 @@ export function BlockFields({ item }: { readonly item: Fixture | Obstacle }) {
           disabled={item.locked}
           onCommit={(zToMm) => edit('Top', { zToMm })}
         />
+        {item.kind === 'obstacle' && <FormChoice item={item} />}
       </div>
-      {!size && (
-        <CornerList
-          points={item.outlineMm}
-          least={3}
-          disabled={item.locked}
-          onChange={(outlineMm) => edit('Outline', { outlineMm })}
-        />
-      )}
     </>
+  );
+}
+
+function FormChoice({ item }: { readonly item: Obstacle }) {
+  const edit = useItemEdit(item);
+  return (
+    <SegmentedControl
+      label="What it is"
+      className="col-span-2"
+      value={item.form}
+      disabled={item.locked}
+      onValueChange={(form) => edit('Form', { form })}
+      options={[
+        { value: 'obstacle', label: 'Obstacle' },
+        { value: 'column', label: 'Column' },
+      ]}
+    />
   );
 }

@@ -5,11 +5,13 @@ import { useBoardSheet } from '@/components/sheet/editor/board-context';
 import { SelectionPanel } from '@/components/sheet/editor/selection-panel';
 import { useSelectionCommands } from '@/components/sheet/editor/use-selection-commands';
 import { Button } from '@/components/ui/button';
-import { KIND_WORDS } from '@/lib/editor/make-items';
+import { kindWords } from '@/lib/editor/make-items';
 import type { Item } from '@/lib/layout/items';
 import { BlockFields } from './block-fields';
-import { DimensionFields, GuardLineFields, WalkwayFields } from './line-fields';
+import { ConveyorFields, GuardLineFields, WalkwayFields } from './line-fields';
+import { DimensionFields, SectionLineFields } from './measure-fields';
 import { NameField } from './name-field';
+import { NoteFields } from './note-fields';
 import { PlaceFields } from './place-fields';
 import { RobotFields } from './robot-fields';
 import { TaskPointFields } from './task-point-fields';
@@ -40,7 +42,7 @@ function OneItem({ item }: { readonly item: Item }) {
     <>
       <div className="flex items-center gap-1">
         <NameField
-          label={`Name of the ${KIND_WORDS[item.kind].toLowerCase()}`}
+          label={`Name of the ${kindWords(item).toLowerCase()}`}
           value={item.name}
           onCommit={(name) => edit('Name', { name })}
         />
@@ -64,7 +66,7 @@ function OneItem({ item }: { readonly item: Item }) {
         </Button>
         <Copies label={item.name} locked={item.locked} />
       </div>
-      <PlaceFields item={item} />
+      {!(item.kind === 'dimension' && item.fromItemId) && <PlaceFields item={item} />}
       <OwnFields item={item} />
     </>
   );
@@ -89,6 +91,12 @@ function OwnFields({ item }: { readonly item: Item }) {
       return <WalkwayFields item={item} />;
     case 'dimension':
       return <DimensionFields item={item} />;
+    case 'conveyor':
+      return <ConveyorFields item={item} />;
+    case 'sectionLine':
+      return <SectionLineFields item={item} />;
+    case 'note':
+      return <NoteFields item={item} />;
   }
 }
 

@@ -1,8 +1,9 @@
 'use client';
 
 import { Checkbox } from '@/components/ui/checkbox';
-import type { Dimension, GuardLine, Walkway } from '@/lib/layout/items';
+import type { Conveyor, GuardLine, Walkway } from '@/lib/layout/items';
 import { CornerList } from './corner-list';
+import { DoorList } from './door-list';
 import { useItemEdit } from './use-item-edit';
 import { ValueField } from './value-field';
 
@@ -27,9 +28,11 @@ export function GuardLineFields({ item }: { readonly item: GuardLine }) {
           onCheckedChange={(closed) => edit('Closing', { closed })}
         />
       </div>
+      <DoorList guard={item} />
       <CornerList
         points={item.pointsMm}
         least={2}
+        closed={item.closed}
         disabled={item.locked}
         onChange={(pointsMm) => edit('Corners', { pointsMm })}
       />
@@ -61,33 +64,54 @@ export function WalkwayFields({ item }: { readonly item: Walkway }) {
   );
 }
 
-export function DimensionFields({ item }: { readonly item: Dimension }) {
+export function ConveyorFields({ item }: { readonly item: Conveyor }) {
   const edit = useItemEdit(item);
-  const [toX, toY] = item.toMm;
   return (
-    <div className="mt-2 grid grid-cols-3 gap-x-3">
-      <ValueField
-        label="To x, from its place"
-        kind="length"
-        value={toX}
+    <>
+      <div className="mt-2 grid grid-cols-3 gap-x-3 gap-y-1.5">
+        <ValueField
+          label="Width"
+          kind="length"
+          value={item.widthMm}
+          step={50}
+          disabled={item.locked}
+          onCommit={(widthMm) => edit('Width', { widthMm })}
+        />
+        <ValueField
+          label="Underside"
+          kind="length"
+          value={item.zFromMm}
+          step={50}
+          disabled={item.locked}
+          onCommit={(zFromMm) => edit('Underside', { zFromMm })}
+        />
+        <ValueField
+          label="Carrying height"
+          kind="length"
+          value={item.zToMm}
+          step={50}
+          disabled={item.locked}
+          onCommit={(zToMm) => edit('Carrying height', { zToMm })}
+        />
+        <ValueField
+          className="col-span-2"
+          label="Speed, 0 where not known"
+          kind="number"
+          unit="mm/s"
+          value={item.speedMmS ?? 0}
+          step={50}
+          disabled={item.locked}
+          onCommit={(speed) =>
+            speed < 0 ? 'Write a speed above zero, or 0.' : edit('Speed', { speedMmS: speed === 0 ? null : speed })
+          }
+        />
+      </div>
+      <CornerList
+        points={item.pointsMm}
+        least={2}
         disabled={item.locked}
-        onCommit={(x) => edit('Second point', { toMm: [x, toY] })}
+        onChange={(pointsMm) => edit('Corners', { pointsMm })}
       />
-      <ValueField
-        label="To y"
-        kind="length"
-        value={toY}
-        disabled={item.locked}
-        onCommit={(y) => edit('Second point', { toMm: [toX, y] })}
-      />
-      <ValueField
-        label="Stands off"
-        kind="length"
-        value={item.offsetMm}
-        step={50}
-        disabled={item.locked}
-        onCommit={(offsetMm) => edit('Offset', { offsetMm })}
-      />
-    </div>
+    </>
   );
 }

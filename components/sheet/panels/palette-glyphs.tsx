@@ -17,6 +17,26 @@ const GLYPHS: Partial<Record<ToolName, ReactNode>> = {
   guardLine: (
     <path d="M3 4.5h16v13H3z" stroke="var(--red)" strokeWidth="1.9" strokeDasharray="0.1 3.2" strokeLinecap="round" />
   ),
+  column: (
+    <>
+      <path d="M5.5 5.5h11v11h-11z" fill="var(--hair)" stroke="var(--ink-soft)" />
+      <path d="m5.5 11 5.5 5.5M5.5 6l10.5 10.5M11 5.5 16.5 11" stroke="var(--ink-soft)" strokeWidth="0.9" />
+    </>
+  ),
+  conveyor: (
+    <>
+      <path d="M2.5 7.5h17v7h-17z" />
+      <path d="M6 7.5v7M9.5 7.5v7M13 7.5v7M16.5 7.5v7" strokeWidth="0.8" />
+    </>
+  ),
+  note: <path d="M4 5.5h14M4 9.5h14M4 13.5h9" />,
+  sectionLine: (
+    <>
+      <path d="M3.5 13.5h4M14.5 13.5h4" strokeWidth="2.2" />
+      <path d="M9 13.5h1.2M11.8 13.5H13M3.5 13.5V8M18.5 13.5V8" />
+      <path d="m3.5 5.5 1.7 3H1.8zM18.5 5.5l1.7 3h-3.4z" fill="currentColor" stroke="none" />
+    </>
+  ),
   walkway: <path d="M2 6.5h18M2 15.5h18" stroke="var(--ink-soft)" strokeDasharray="6 1.8 1 1.8" />,
   taskPoint: <path d="m11 4.8 5.6 6.2-5.6 6.2L5.4 11z" fill="var(--green)" stroke="none" />,
   dimension: (

@@ -10,13 +10,17 @@ import { Glyph } from './palette-glyphs';
 
 const PLACED: readonly { tool: ToolName; label: string; shortcut: string }[] = [
   { tool: 'fixture', label: 'Fixture', shortcut: 'F' },
+  { tool: 'conveyor', label: 'Conveyor', shortcut: 'C' },
   { tool: 'obstacle', label: 'Obstacle', shortcut: 'O' },
+  { tool: 'column', label: 'Column', shortcut: 'K' },
   { tool: 'guardLine', label: 'Guard line', shortcut: 'G' },
   { tool: 'walkway', label: 'Walkway', shortcut: 'W' },
   { tool: 'taskPoint', label: 'Task point', shortcut: 'T' },
+  { tool: 'note', label: 'Note', shortcut: 'N' },
 ];
 const MEASURES: readonly { tool: ToolName; label: string; shortcut: string }[] = [
   { tool: 'dimension', label: 'Dimension', shortcut: 'D' },
+  { tool: 'sectionLine', label: 'Section line', shortcut: 'S' },
   { tool: 'plumb', label: 'Plumb', shortcut: 'P' },
 ];
 

@@ -9,6 +9,9 @@ import { editedTaskPoint, reorderedTaskPoint, withoutTaskPoint } from '@/lib/edi
 import { placeTaskPointInView } from '@/lib/editor/place-in-view';
 import { printed } from '@/lib/editor/measure-text';
 import type { Fixture, TaskPoint } from '@/lib/layout/items';
+import { DoneBy } from '@/components/sheet/judging/done-by';
+import { TaskPathFields } from '@/components/sheet/judging/task-path-fields';
+import { TaskPatternFields } from '@/components/sheet/judging/task-pattern-fields';
 import { NameField } from './name-field';
 import { ValueField } from './value-field';
 
@@ -57,6 +60,8 @@ export function TaskPointFields({ fixture }: { readonly fixture: Fixture }) {
           </li>
         ))}
       </ol>
+      <TaskPathFields fixture={fixture} />
+      <TaskPatternFields fixture={fixture} />
     </div>
   );
 }
@@ -162,6 +167,7 @@ function OnePoint({ fixture, point }: { readonly fixture: Fixture; readonly poin
           onCheckedChange={(free) => edit('Roll', { rollDeg: free ? 'free' : 0 })}
         />
       </div>
+      <DoneBy robotId={point.robotId} disabled={fixture.locked} onChange={(robotId) => edit('Robot', { robotId })} />
     </div>
   );
 }

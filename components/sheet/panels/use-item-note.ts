@@ -1,10 +1,12 @@
 'use client';
 
-import { useBoard } from '@/components/sheet/editor/board-context';
+import { useBoard, useBoardSheet } from '@/components/sheet/editor/board-context';
 import { useVerdicts } from '@/components/sheet/editor/readings-context';
 import { useUnits } from '@/lib/client/use-units';
 import { placeWords } from '@/lib/editor/measure-text';
-import type { Item } from '@/lib/layout/items';
+import { settledDimension } from '@/lib/layout/attached-dimensions';
+import { distanceMm } from '@/lib/layout/geometry';
+import type { Dimension, Item } from '@/lib/layout/items';
 import { fixtureWords } from './verdict-order';
 
 export interface ItemNote {
@@ -17,6 +19,8 @@ export interface ItemNote {
 export function useItemNote(item: Item): ItemNote {
   const { arms } = useBoard();
   const { byPoint } = useVerdicts();
+  // A number, so that the row of a dimension is drawn again only when its length changes.
+  const lengthMm = useBoardSheet(({ items }) => (item.kind === 'dimension' ? lengthOf(item, items) : 0));
   const units = useUnits();
   const place = placeWords(item, units.unit);
   switch (item.kind) {
@@ -30,10 +34,8 @@ export function useItemNote(item: Item): ItemNote {
       const { words, isTrouble } = fixtureWords(verdicts, item.taskPoints.length);
       return { title: item.name, words, tone: isTrouble ? 'red' : 'soft' };
     }
-    case 'dimension': {
-      const length = Math.hypot(item.toMm[0] - item.fromMm[0], item.toMm[1] - item.fromMm[1]);
-      return { title: item.name, words: units.length(length), tone: 'figures' };
-    }
+    case 'dimension':
+      return { title: item.name, words: units.length(lengthMm), tone: 'figures' };
     case 'conveyor': {
       const speed = item.speedMmS === null ? 'speed not given' : `${units.length(item.speedMmS)}/s`;
       return { title: item.name, words: speed, tone: 'soft' };
@@ -45,4 +47,9 @@ export function useItemNote(item: Item): ItemNote {
     default:
       return { title: item.name, words: place, tone: 'figures' };
   }
+}
+
+function lengthOf(dimension: Dimension, items: ReadonlyMap<string, Item>): number {
+  const { fromMm, toMm } = settledDimension(dimension, (id) => items.get(id));
+  return distanceMm(fromMm, toMm);
 }

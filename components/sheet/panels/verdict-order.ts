@@ -1,3 +1,4 @@
+import type { TaskRow } from '@/lib/layout/judging/task-rows';
 import type { VerdictBand } from '@/lib/layout/verdict-words';
 import type { PointVerdict } from '@/lib/layout/verdicts';
 
@@ -9,16 +10,16 @@ export const BAND_WORDS: Record<VerdictBand, string> = {
   out: 'Out of reach',
 };
 
-/** Not reached before too slow before badly conditioned; the better conditioned the later. */
-export function worstFirst(one: PointVerdict, other: PointVerdict): number {
-  return worth(one) - worth(other);
+/** What stands behind the name of a task that is not a point. */
+export function kindOfTask(kind: TaskRow['kind']): string | null {
+  return kind === 'path' ? 'a path' : kind === 'pattern' ? 'a pattern' : null;
 }
 
-function worth({ best }: PointVerdict): number {
-  if (!best) return -3;
-  if (!best.reached) return -2;
-  const conditioning = best.posture?.inverseConditionNumber ?? 0;
-  return best.met ? conditioning : conditioning - 1;
+/** "0.62 m/s, 0.22 above the 0.40 wanted."; null where no speed is wanted or the task is not reached. */
+export function marginWords({ speedMmS, wantedSpeedMmS, marginMmS }: TaskRow): string | null {
+  if (speedMmS === null || wantedSpeedMmS === null || marginMmS === null) return null;
+  const metres = (mm: number): string => (Math.abs(mm) / 1000).toFixed(2);
+  return `${metres(speedMmS)} m/s, ${metres(marginMmS)} ${marginMmS < 0 ? 'below' : 'above'} the ${metres(wantedSpeedMmS)} wanted.`;
 }
 
 /** "3 task points, all met", and whether that is trouble. */

@@ -1,31 +1,34 @@
 'use client';
 
+import { useMemo } from 'react';
 import { useBoard, useBoardSheet } from '@/components/sheet/editor/board-context';
 import { useVerdicts } from '@/components/sheet/editor/readings-context';
 import { classNames } from '@/components/ui/class-names';
 import { Tag } from '@/components/ui/tag';
-import type { PointVerdict } from '@/lib/layout/verdicts';
-import { BAND_WORDS, worstFirst } from './verdict-order';
+import { taskRows, type TaskRow } from '@/lib/layout/judging/task-rows';
+import { BAND_WORDS, kindOfTask, marginWords } from './verdict-order';
 
-/** Every task point with its verdict, the worst first. A row chooses its point; the plumb then hangs there. */
+/** Every task with its verdict, the worst first. A row chooses its task; the plumb then hangs there, or at its worst place. */
 export function VerdictTable() {
   const { sheet } = useBoard();
-  const { verdicts } = useVerdicts();
+  const { cell } = useVerdicts();
   const items = useBoardSheet((state) => state.items);
   const chosenId = useBoardSheet((state) => state.selection.taskPointId);
-  const choose = ({ fixtureId, pointId }: PointVerdict) =>
-    sheet.select({ itemIds: [fixtureId], taskPointId: pointId === chosenId ? null : pointId });
+  const rows = useMemo(() => taskRows(cell), [cell]);
+  const choose = ({ fixtureId, id }: TaskRow) =>
+    sheet.select({ itemIds: [fixtureId], taskPointId: id === chosenId ? null : id });
   return (
     <section aria-labelledby="points-title" className="border-b border-rule pt-3 pb-2.5">
       <h2 id="points-title" className="px-3.5 text-[0.8125rem] font-medium text-ink-soft">
         Task points
       </h2>
-      {verdicts.length === 0 ? (
+      {rows.length === 0 ? (
         <p className="mt-1 px-3.5 text-sm text-ink-soft">
           None yet. Place a fixture and put task points on it; each gets its verdict here.
         </p>
       ) : (
         <table className="mt-0.5 w-full border-collapse text-[0.9375rem]">
+          <caption className="sr-only">Task points, paths and patterns with their verdicts, the worst first</caption>
           <thead>
             <tr className="text-[0.8125rem] text-ink-soft">
               <Head className="pl-3.5 text-left">Point</Head>
@@ -36,7 +39,7 @@ export function VerdictTable() {
                 </abbr>
               </Head>
               <Head className="text-right">
-                <abbr title="speed in every direction, m/s" className="no-underline">
+                <abbr title="speed in every direction, or along a path, m/s" className="no-underline">
                   Speed
                 </abbr>
               </Head>
@@ -46,13 +49,13 @@ export function VerdictTable() {
             </tr>
           </thead>
           <tbody>
-            {[...verdicts].sort(worstFirst).map((verdict) => (
+            {rows.map((row) => (
               <Row
-                key={verdict.pointId}
-                verdict={verdict}
-                robotName={items.get(verdict.best?.robotId ?? '')?.name ?? '–'}
-                isChosen={verdict.pointId === chosenId}
-                onChoose={() => choose(verdict)}
+                key={row.id}
+                row={row}
+                robotName={items.get(row.robotId ?? '')?.name ?? '–'}
+                isChosen={row.id === chosenId}
+                onChoose={() => choose(row)}
               />
             ))}
           </tbody>
@@ -75,22 +78,23 @@ function Head({ className, children }: { readonly className?: string; readonly c
 }
 
 interface RowProps {
-  readonly verdict: PointVerdict;
+  readonly row: TaskRow;
   readonly robotName: string;
   readonly isChosen: boolean;
   readonly onChoose: () => void;
 }
 
-function Row({ verdict, robotName, isChosen, onChoose }: RowProps) {
-  const { best, pointName, wantedSpeedMmS } = verdict;
-  const band = best?.band ?? null;
+function Row({ row, robotName, isChosen, onChoose }: RowProps) {
+  const { band, name } = row;
   const figures = 'px-1.5 text-right font-mono text-sm tabular-nums whitespace-nowrap';
-  const isSlow = best !== null && best.reached && !best.met;
+  const isSlow = row.marginMmS !== null && row.marginMmS < 0;
+  const kind = kindOfTask(row.kind);
+  const margin = marginWords(row);
   return (
     <>
       <tr
         data-verdict={band ?? 'none'}
-        data-point={pointName}
+        data-point={name}
         className={classNames('border-t border-hair', isChosen ? 'bg-petrol-wash' : 'hover:bg-petrol-wash')}
       >
         <th scope="row" className="h-[1.72rem] max-w-28 pl-3.5 text-left font-normal">
@@ -98,25 +102,42 @@ function Row({ verdict, robotName, isChosen, onChoose }: RowProps) {
             type="button"
             aria-pressed={isChosen}
             onClick={onChoose}
+            title={name}
             className="block w-full truncate text-left hover:text-petrol pointer-coarse:min-h-11"
           >
-            {pointName}
+            {name}
+            {kind && <span className="sr-only">, {kind}</span>}
           </button>
         </th>
-        <td className="px-1.5 text-right">{robotName}</td>
-        <td className={figures}>{best?.posture ? best.posture.inverseConditionNumber.toFixed(2) : '–'}</td>
+        <td className="px-1.5 text-right whitespace-nowrap">
+          {robotName}
+          {row.assignment === 'by hand' && (
+            <>
+              <span aria-hidden title="Given to this robot by hand">
+                *
+              </span>
+              <span className="sr-only"> by hand</span>
+            </>
+          )}
+        </td>
+        <td className={figures}>{row.inverseConditionNumber?.toFixed(2) ?? '–'}</td>
         <td className={classNames(figures, isSlow && 'text-red')}>
-          {best?.posture ? (best.posture.sureSpeedMmS / 1000).toFixed(2) : '–'}
+          {row.speedMmS === null ? '–' : (row.speedMmS / 1000).toFixed(2)}
         </td>
         <td className="pr-3.5 pl-1.5 text-right">
           {band ? <Tag tone={band}>{BAND_WORDS[band]}</Tag> : <Tag>No robot</Tag>}
         </td>
       </tr>
-      {isChosen && best?.reason && (
+      {isChosen && (
         <tr className="bg-petrol-wash">
-          <td colSpan={5} className="px-3.5 pb-1.5 text-sm text-red">
-            {best.reason}
-            {isSlow && wantedSpeedMmS !== null && ` Wanted: ${(wantedSpeedMmS / 1000).toFixed(2)} m/s.`}
+          <td colSpan={5} className="px-3.5 pb-1.5 text-sm">
+            {row.reason && <p className="text-red">{row.reason}</p>}
+            {margin && <p>{margin}</p>}
+            {row.notes.map((note) => (
+              <p key={note} className="text-ink-soft">
+                {note}
+              </p>
+            ))}
           </td>
         </tr>
       )}

@@ -2,11 +2,9 @@ import { distanceMm, type PointMm } from '@/lib/layout/geometry';
 import type { Item } from '@/lib/layout/items';
 import { put } from '../changes';
 import { onRoundAngle } from '../snapping';
-import { newLine } from '../make-items';
+import { newLine, type LineKind } from '../make-items';
 import { selectTool } from './select';
 import { chosen, state, type Press, type Reply, type Tool, type View } from './tool';
-
-type LineKind = 'guardLine' | 'walkway';
 
 const DRAFT_ID = '00000000-0000-4000-8000-000000000001';
 const HINTS: Record<LineKind, { first: string; next: string }> = {
@@ -17,6 +15,14 @@ const HINTS: Record<LineKind, { first: string; next: string }> = {
   walkway: {
     first: 'Click where the walkway starts.',
     next: 'Click the next corner. Enter or a double click ends the walkway, Escape drops it.',
+  },
+  conveyor: {
+    first: 'Click where the conveyor begins; it carries the way you draw it.',
+    next: 'Click the next corner. Enter or a double click ends the conveyor, Escape drops it.',
+  },
+  protectiveDevice: {
+    first: 'Click where the protective device begins.',
+    next: 'Click the next corner. Enter or a double click ends the device, Escape drops it.',
   },
 };
 

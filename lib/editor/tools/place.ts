@@ -2,7 +2,7 @@ import { floorToItem } from '@/lib/layout/geometry';
 import type { Item } from '@/lib/layout/items';
 import { fixtureAt } from '../footprint';
 import { put } from '../changes';
-import { KIND_WORDS, newBlock, newRobot, newTaskPoint } from '../make-items';
+import { newBlock, newColumn, newNote, newRobot, newTaskPoint, newZone, type NewItem } from '../make-items';
 import { tidy } from '../snapping';
 
 import { selectTool } from './select';
@@ -32,13 +32,27 @@ export function robotTool(armId: string): Tool {
 /** The id of what follows the pointer before it is placed; it never leaves the draft. */
 const GHOST = '00000000-0000-4000-8000-000000000000';
 
-/** A fixture or obstacle: a click places the usual size, a drag draws one. */
-export function blockTool(kind: 'fixture' | 'obstacle'): Tool {
-  const hint = `Click to place ${kind === 'fixture' ? 'a fixture' : 'an obstacle'}, or drag to draw its size.`;
-  const self: Tool = state(kind, hint, {
+type BlockKind = 'fixture' | 'obstacle' | 'column' | 'zone';
+type SizeMm = { readonly width: number; readonly depth: number };
+
+const BLOCK_WORDS: Record<BlockKind, string> = {
+  fixture: 'a fixture',
+  obstacle: 'an obstacle',
+  column: 'a column',
+  zone: 'a zone',
+};
+
+function block(items: View['items'], kind: BlockKind, at: NewItem, sizeMm?: SizeMm): Item {
+  if (kind === 'column') return newColumn(items, at, sizeMm);
+  return kind === 'zone' ? newZone(items, at, sizeMm) : newBlock(items, kind, at, sizeMm);
+}
+
+/** What has an outline: a click places the usual size, a drag draws one. */
+export function blockTool(kind: BlockKind): Tool {
+  const self: Tool = state(kind, `Click to place ${BLOCK_WORDS[kind]}, or drag to draw its size.`, {
     move: (press, view) => {
       const spot = view.snap(press, press);
-      return { tool: self, draft: { items: [newBlock(view.items, kind, { id: GHOST, ...spot })] } };
+      return { tool: self, draft: { items: [block(view.items, kind, { id: GHOST, ...spot })] } };
     },
     press: (press) => ({ tool: drawingBlock(kind, press) }),
     cancel: selectTool,
@@ -47,21 +61,33 @@ export function blockTool(kind: 'fixture' | 'obstacle'): Tool {
   return self;
 }
 
-function drawingBlock(kind: 'fixture' | 'obstacle', start: Press): Tool {
+function drawingBlock(kind: BlockKind, start: Press): Tool {
   const at = (press: Press, view: View, id: string): Item => {
     const from = view.snap(start, press);
     const to = view.snap(press, press);
     const size = { width: tidy(Math.abs(to.xMm - from.xMm)), depth: tidy(Math.abs(to.yMm - from.yMm)) };
-    if (size.width < LEAST_SIZE_MM || size.depth < LEAST_SIZE_MM) return newBlock(view.items, kind, { id, ...from });
+    if (size.width < LEAST_SIZE_MM || size.depth < LEAST_SIZE_MM) return block(view.items, kind, { id, ...from });
     const middle = { xMm: tidy((from.xMm + to.xMm) / 2), yMm: tidy((from.yMm + to.yMm) / 2) };
-    return newBlock(view.items, kind, { id, ...middle }, size);
+    return block(view.items, kind, { id, ...middle }, size);
   };
-  const self: Tool = state(kind, `Release to place the ${KIND_WORDS[kind].toLowerCase()}.`, {
+  const self: Tool = state(kind, `Release to place ${BLOCK_WORDS[kind]}.`, {
     busy: true,
     move: (press, view) => ({ tool: self, draft: { items: [at(press, view, GHOST)] } }),
     release: (press, view) => placedReply(at(press, view, view.newId()), view),
     cancel: selectTool,
     interrupted: () => blockTool(kind),
+  });
+  return self;
+}
+
+/** A note hangs where it is clicked; its words are typed beside the sheet. */
+export function noteTool(): Tool {
+  const at = (press: Press, view: View, id: string) => newNote(view.items, { id, ...view.snap(press, press) });
+  const self: Tool = state('note', 'Click where the note begins, then type its words.', {
+    busy: true,
+    move: (press, view) => ({ tool: self, draft: { items: [at(press, view, GHOST)] } }),
+    release: (press, view) => placedReply(at(press, view, view.newId()), view),
+    cancel: selectTool,
   });
   return self;
 }

@@ -1,3 +1,4 @@
+import { settledItems } from '@/lib/layout/attached-dimensions';
 import { boundsOfPoints } from '@/lib/layout/viewport';
 import type { PointMm } from '@/lib/layout/geometry';
 import { footprint, liesInside } from '../footprint';
@@ -77,7 +78,7 @@ function pressed(start: Press, target: Target, selection: Selection, wasChosen: 
 function marquee(from: PointMm, kept: Selection): Tool {
   const reply = (at: Press, view: View): Selection => {
     const area = boundsOfPoints([from, [at.xMm, at.yMm]]);
-    const inside = [...view.items.values()].filter((item) => {
+    const inside = settledItems([...view.items.values()]).filter((item) => {
       const bounds = boundsOfPoints(footprint(item));
       return !item.hidden && bounds && area && liesInside(bounds, area);
     });

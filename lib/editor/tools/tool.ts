@@ -78,10 +78,16 @@ export type ToolName =
   | 'robot'
   | 'fixture'
   | 'obstacle'
+  | 'column'
   | 'guardLine'
   | 'walkway'
+  | 'conveyor'
+  | 'zone'
+  | 'protectiveDevice'
+  | 'note'
   | 'taskPoint'
   | 'dimension'
+  | 'sectionLine'
   | 'plumb';
 
 /**

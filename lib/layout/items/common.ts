@@ -34,6 +34,8 @@ export const outline = z
     const fault = points.length < 3 ? null : outlineFault(points);
     if (fault !== null) context.addIssue({ code: 'custom', message: fault });
   });
+/** Set where the corners of a rectangle move one by one; otherwise it stays a rectangle while it is drawn larger or smaller. */
+export const cornersFree = z.boolean().optional();
 export const heightRange = {
   zFromMm: millimetres.default(0),
   zToMm: millimetres,
