@@ -16,6 +16,7 @@ import {
   type Exchange,
   type Sync,
 } from './sync';
+import { hasTask } from './task-edits';
 import { carrying } from './tools/move';
 import { selectTool } from './tools/select';
 import { NOTHING, type Draft, type Press, type Reply, type Selection, type Tool, type View } from './tools/tool';
@@ -273,7 +274,7 @@ function stillThere(selection: Selection, items: Items): Selection {
   if (selection.itemIds.every((id) => items.has(id))) {
     if (!selection.taskPointId) return selection;
     const [item] = selection.itemIds.map((id) => items.get(id));
-    const there = item?.kind === 'fixture' && item.taskPoints.some(({ id }) => id === selection.taskPointId);
+    const there = item?.kind === 'fixture' && hasTask(item, selection.taskPointId);
     return there ? selection : { ...selection, taskPointId: null };
   }
   return { itemIds: selection.itemIds.filter((id) => items.has(id)), taskPointId: null };

@@ -33,7 +33,8 @@ export function poseOnFloor(fixture: Placement, place: ToolPlace): Transform {
   return multiplyTransforms(frameOnFloor(fixture), inFixture, inFixture);
 }
 
-function onFloor(fixture: Fixture, point: TaskPoint): FloorTaskPoint {
+/** A task point where its fixture puts it. */
+export function onFloor(fixture: Fixture, point: TaskPoint): FloorTaskPoint {
   const pose = poseOnFloor(fixture, point);
   return {
     point,

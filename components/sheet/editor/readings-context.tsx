@@ -14,11 +14,14 @@ import {
 import { restPosture } from '@/lib/editor/rest-posture';
 import { shownItems } from '@/lib/editor/sheet';
 import type { Robot } from '@/lib/layout/items';
-import { judgeItems, type PointVerdict } from '@/lib/layout/verdicts';
+import { makeCellJudge, type CellVerdicts, type PointVerdict } from '@/lib/layout/verdicts';
+import { placeOfTask } from '@/lib/layout/judging/task-place';
 import { useBoard, useBoardSettings, useBoardSheet } from './board-context';
 
-/** Verdicts on the task points; they may lag a moment behind what is dragged. */
+/** Verdicts on the work; they may lag a moment behind what is dragged. */
 export interface Verdicts {
+  /** Of task points, paths and patterns. */
+  readonly cell: CellVerdicts;
   readonly verdicts: readonly PointVerdict[];
   readonly byPoint: ReadonlyMap<string, PointVerdict>;
 }
@@ -62,21 +65,25 @@ export function ReadingsProvider({ children }: { readonly children: ReactNode })
   const ordered = useMemo(() => inOrder(shownItems({ items, draft })).filter(({ hidden }) => !hidden), [items, draft]);
   // Verdicts may come a moment after the picture while something is dragged.
   const judged = useDeferredValue(ordered);
-  const verdicts = useMemo(
-    () => judgeItems(judged, (armId) => arms.get(armId)?.definition, settings.wrist),
-    [judged, arms, settings.wrist],
+  // Remembers from one look to the next what did not change: a drag judges only what it moves.
+  const [judge] = useState(makeCellJudge);
+  const cell = useMemo(
+    () => judge(judged, (armId) => arms.get(armId)?.definition, settings.wrist),
+    [judge, judged, arms, settings.wrist],
   );
+  const verdicts = cell.points;
   const judgement = useMemo(
-    () => ({ verdicts, byPoint: new Map(verdicts.map((verdict) => [verdict.pointId, verdict])) }),
-    [verdicts],
+    () => ({ cell, verdicts: cell.points, byPoint: new Map(cell.points.map((verdict) => [verdict.pointId, verdict])) }),
+    [cell],
   );
 
   const hung = useBoardSheet((state) => state.plumb);
   const taskPointId = useBoardSheet((state) => state.selection.taskPointId);
-  const spot = useMemo(
-    () => (taskPointId ? plumbOnTaskPoint(ordered, taskPointId) : hung && plumbOnFloor(hung, settings)),
-    [taskPointId, ordered, hung, settings],
-  );
+  const spot = useMemo(() => {
+    if (!taskPointId) return hung && plumbOnFloor(hung, settings);
+    const worst = plumbOnTaskPoint(ordered, taskPointId) ? null : placeOfTask(ordered, cell, taskPointId);
+    return worst ? { positionMm: worst.positionMm, taskPoint: worst } : plumbOnTaskPoint(ordered, taskPointId);
+  }, [taskPointId, ordered, cell, hung, settings]);
   const [chosenRobotId, chooseRobot] = useState<string | null>(null);
   const [branch, chooseBranch] = useState('');
 

@@ -9,6 +9,7 @@ import {
   MapLayer,
   OverlayLayer,
   SheetStage,
+  TaskWorkLayer,
   type SheetPointer,
 } from '@/components/sheet/drawing';
 import type { SheetDocument } from '@/lib/client/sheet-document';
@@ -71,6 +72,7 @@ export function SheetReader(props: SheetReaderProps) {
         postures={reading.postures}
         verdicts={reading.bands}
       />
+      <TaskWorkLayer {...reading.work} mode="share" />
       {children && <OverlayLayer>{children}</OverlayLayer>}
     </SheetStage>
   );

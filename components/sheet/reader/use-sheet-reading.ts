@@ -7,13 +7,17 @@ import { restPosture } from '@/lib/editor/rest-posture';
 import type { Robot } from '@/lib/layout/items';
 import type { MapSettings } from '@/lib/layout/map-settings';
 import type { VerdictBand } from '@/lib/layout/verdict-words';
-import { judgeItems, type PointVerdict } from '@/lib/layout/verdicts';
+import { floorWork, type FloorWork } from '@/lib/layout/judging/drawn-work';
+import { judgeCell, type CellVerdicts, type PointVerdict } from '@/lib/layout/verdicts';
 import type { FloorBounds } from '@/lib/layout/viewport';
 
 /** What the browser's own kernel says of a sheet that nobody is editing. */
 export interface SheetReading {
   readonly robots: readonly Robot[];
+  /** Of task points, paths and patterns. */
+  readonly cell: CellVerdicts;
   readonly verdicts: readonly PointVerdict[];
+  readonly work: FloorWork;
   readonly bands: ReadonlyMap<string, VerdictBand>;
   readonly postures: ReadonlyMap<string, readonly number[]>;
   readonly bounds: FloorBounds | null;
@@ -22,7 +26,8 @@ export interface SheetReading {
 export function readSheet({ items, arms }: SheetDocument, wrist: MapSettings['wrist']): SheetReading {
   const shown = items.filter(({ hidden }) => !hidden);
   const robots = shown.filter((item): item is Robot => item.kind === 'robot' && arms.has(item.armId));
-  const verdicts = judgeItems(shown, (armId) => arms.get(armId)?.definition, wrist);
+  const cell = judgeCell(shown, (armId) => arms.get(armId)?.definition, wrist);
+  const verdicts = cell.points;
   const postures = new Map<string, readonly number[]>();
   for (const robot of robots) {
     const arm = arms.get(robot.armId)!;
@@ -32,7 +37,7 @@ export function readSheet({ items, arms }: SheetDocument, wrist: MapSettings['wr
     if (posture) postures.set(robot.id, posture);
   }
   const bands = new Map(verdicts.flatMap(({ pointId, best }) => (best ? [[pointId, best.band] as const] : [])));
-  return { robots, verdicts, bands, postures, bounds: readingBounds(shown, arms) };
+  return { robots, cell, verdicts, work: floorWork(shown, cell), bands, postures, bounds: readingBounds(shown, arms) };
 }
 
 export function useSheetReading(document: SheetDocument | null, wrist: MapSettings['wrist']): SheetReading | null {

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { BUILT_IN_ARMS } from '@/lib/kinematics/library';
 import type { Arm } from '@/lib/kinematics/types';
-import { fixtureSchema, robotSchema, type Fixture, type Item, type Robot } from '../items';
+import { fixtureSchema, robotSchema, type Fixture, type Item, type Point3, type Robot } from '../items';
 import { onlyWords } from '../verdict-words';
 import { judgeCell, judgeItems, makeCellJudge } from '../verdicts';
 import { pathLine } from './path-line';
@@ -51,7 +51,7 @@ const planar: Arm = {
   })),
 };
 const BENT = { xMm: 700, yMm: 400 * Math.sin(Math.PI / 3), zMm: 0 };
-const corner = (dx: number, dy: number, arcVia: object | null = null) => ({
+const corner = (dx: number, dy: number, arcVia: Point3 | null = null) => ({
   ...BENT,
   xMm: BENT.xMm + dx,
   yMm: BENT.yMm + dy,
