@@ -1,4 +1,6 @@
+import { ApiToken } from './api-token';
 import { Arm } from './arm';
+import { AuditEvent } from './audit-event';
 import { DexterityMap } from './dexterity-map';
 import { FloorPlan } from './floor-plan';
 import { Invitation } from './invitation';
@@ -8,12 +10,20 @@ import { MapTile } from './map-tile';
 import { Membership } from './membership';
 import { Organisation } from './organisation';
 import { PasswordReset } from './password-reset';
+import { Presence } from './presence';
 import { Project } from './project';
 import { ProjectViewer } from './project-viewer';
 import { Remark } from './remark';
 import { RemarkReply } from './remark-reply';
+import { Report } from './report';
 import { Revision } from './revision';
 import { ShareLink } from './share-link';
+import { Comparison } from './comparison';
+import { RemarkMention } from './remark-mention';
+import { RemarkPicture } from './remark-picture';
+import { RemarkRead } from './remark-read';
+import { ShareOpen } from './share-open';
+import { SignOff } from './sign-off';
 import { User } from './user';
 
 /** Every association, named in one place; the foreign keys themselves are made by the migrations. */
@@ -23,6 +33,8 @@ export function associate(): void {
   Membership.hasMany(ProjectViewer, { as: 'projectViewers', foreignKey: 'membershipId' });
   User.hasOne(Membership, { as: 'membership', foreignKey: 'userId' });
   Organisation.hasMany(Membership, { as: 'memberships', foreignKey: 'organisationId' });
+
+  Presence.belongsTo(User, { as: 'user', foreignKey: 'userId' });
 
   Project.belongsTo(Organisation, { as: 'organisation', foreignKey: 'organisationId' });
   Project.hasMany(Layout, { as: 'layouts', foreignKey: 'projectId' });
@@ -51,10 +63,27 @@ export function associate(): void {
   Remark.hasMany(RemarkReply, { as: 'replies', foreignKey: 'remarkId' });
   RemarkReply.belongsTo(Remark, { as: 'remark', foreignKey: 'remarkId' });
   RemarkReply.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  Remark.belongsTo(User, { as: 'assignee', foreignKey: 'assigneeId' });
+  Remark.hasMany(RemarkMention, { as: 'mentions', foreignKey: 'remarkId' });
+  Remark.hasMany(RemarkPicture, { as: 'pictures', foreignKey: 'remarkId' });
+  Remark.hasMany(RemarkRead, { as: 'reads', foreignKey: 'remarkId' });
+  RemarkMention.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+
+  Revision.hasMany(SignOff, { as: 'signOffs', foreignKey: 'revisionId' });
+  SignOff.belongsTo(Revision, { as: 'revision', foreignKey: 'revisionId' });
+  ShareLink.hasMany(ShareOpen, { as: 'opens', foreignKey: 'shareLinkId' });
+  Comparison.belongsTo(Project, { as: 'project', foreignKey: 'projectId' });
+  Comparison.belongsTo(User, { as: 'author', foreignKey: 'createdBy' });
 
   DexterityMap.hasMany(MapTile, { as: 'tiles', foreignKey: 'mapId' });
 
   Invitation.belongsTo(Organisation, { as: 'organisation', foreignKey: 'organisationId' });
   Invitation.belongsTo(User, { as: 'inviter', foreignKey: 'invitedBy' });
   PasswordReset.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+
+  ApiToken.belongsTo(Membership, { as: 'membership', foreignKey: 'membershipId' });
+  AuditEvent.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  AuditEvent.belongsTo(ShareLink, { as: 'shareLink', foreignKey: 'shareLinkId' });
+  Report.belongsTo(Layout, { as: 'layout', foreignKey: 'layoutId' });
+  Report.belongsTo(User, { as: 'asker', foreignKey: 'askedBy' });
 }

@@ -5,6 +5,7 @@ import {
   type LayoutChanges,
   type OperationBatch,
 } from '@/lib/contracts/layouts';
+import { presenceAnswerSchema, type PresenceAnswer, type PresenceReport } from '@/lib/contracts/presence';
 import type { SendAnswer } from '@/lib/editor/autosave';
 import { fetcher, ProblemError, sayError, send } from './fetcher';
 
@@ -42,6 +43,15 @@ export async function sendBatch(layoutId: string, batch: OperationBatch): Promis
 export async function askChanges(layoutId: string, since: number): Promise<LayoutChanges | null> {
   try {
     return await fetcher(`${address(layoutId)}/changes?since=${since}`, layoutChangesSchema);
+  } catch {
+    return null;
+  }
+}
+
+/** Says where this planner is; answers where the others are, null where that cannot be had just now. */
+export async function reportPresence(layoutId: string, report: PresenceReport): Promise<PresenceAnswer | null> {
+  try {
+    return await send('POST', `${address(layoutId)}/presence`, report, presenceAnswerSchema);
   } catch {
     return null;
   }

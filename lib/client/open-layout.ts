@@ -6,8 +6,9 @@ import { Sheet } from '@/lib/editor/sheet';
 import { watchChanges } from '@/lib/editor/watch-changes';
 import { browserTimer } from './browser-timer';
 import { fetcher, ProblemError, sayError, send } from './fetcher';
+import { PresenceKeeper } from '@/lib/editor/presence';
 import { keptStore } from './kept-store';
-import { askChanges, isPassing, sendBatch } from './layout-transport';
+import { askChanges, isPassing, reportPresence, sendBatch } from './layout-transport';
 
 /** A layout on the board: the document and the things that keep it and the server of one mind. */
 export interface OpenLayout {
@@ -15,6 +16,8 @@ export interface OpenLayout {
   readonly sheet: Sheet;
   readonly autosave: Autosave;
   readonly settings: SettingsKeeper;
+  /** Other planners on this sheet. */
+  readonly presence: PresenceKeeper;
   close(): void;
 }
 
@@ -56,7 +59,9 @@ export async function openLayout({ layoutId, userId, onFloorPlan }: OpenOptions)
     save: (mapSettings) => saveSettings(layoutId, mapSettings),
     timer: browserTimer,
   });
+  let askNow = () => {};
   const unwatch = watchChanges(sheet, {
+    onReady: (ask) => (askNow = ask),
     ask: (since) => askChanges(layoutId, since),
     timer: browserTimer,
     isAwake: () => document.visibilityState === 'visible',
@@ -65,17 +70,29 @@ export async function openLayout({ layoutId, userId, onFloorPlan }: OpenOptions)
       onFloorPlan(changes.floorPlanId);
     },
   });
+  const presence = new PresenceKeeper({
+    report: (report) => reportPresence(layoutId, report),
+    timer: browserTimer,
+    isAwake: () => document.visibilityState === 'visible',
+    seat: newId(),
+    chosenIds: () => sheet.getState().selection.itemIds,
+    onVersion: (layoutVersion) => {
+      const { sync } = sheet.getState();
+      if (layoutVersion > sync.layoutVersion && !sync.inFlight) askNow();
+    },
+  });
   const wake = () => autosave.wake();
   window.addEventListener('online', wake);
   document.addEventListener('visibilitychange', wake);
   const close = () => {
     unwatch();
+    presence.stop();
     autosave.stop();
     settings.stop();
     window.removeEventListener('online', wake);
     document.removeEventListener('visibilitychange', wake);
   };
-  return { layout, sheet, autosave, settings, close };
+  return { layout, sheet, autosave, settings, presence, close };
 }
 
 async function saveSettings(layoutId: string, mapSettings: Layout['mapSettings']) {

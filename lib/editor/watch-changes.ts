@@ -9,6 +9,8 @@ export interface WatchPorts {
   /** Nobody looks at a hidden page. */
   readonly isAwake: () => boolean;
   readonly onChanges?: (changes: LayoutChanges) => void;
+  /** Hands out a function that asks at once: word of a newer version came by another way. */
+  readonly onReady?: (askNow: () => void) => void;
 }
 
 /** A colleague's edit is seen within two seconds. */
@@ -20,12 +22,15 @@ export function watchChanges(sheet: Sheet, ports: WatchPorts): () => void {
   let ended = false;
   let waitMs = ASK_EVERY_MS;
   let cancel = ports.timer(turn, waitMs);
+  let asking = false;
 
   async function turn(): Promise<void> {
     const { sync } = sheet.getState();
     // With a batch on its way an answer could be from before it or after it; the next turn knows.
     if (ports.isAwake() && !sync.inFlight) {
+      asking = true;
       const changes = await ports.ask(sync.layoutVersion);
+      asking = false;
       waitMs = changes ? ASK_EVERY_MS : Math.min(LONGEST_WAIT_MS, waitMs * 2);
       const isCurrent = sheet.getState().sync.exchanges === sync.exchanges;
       if (changes && isCurrent && !ended) {
@@ -35,6 +40,12 @@ export function watchChanges(sheet: Sheet, ports: WatchPorts): () => void {
     }
     if (!ended) cancel = ports.timer(turn, waitMs);
   }
+
+  ports.onReady?.(() => {
+    if (asking || ended) return;
+    cancel();
+    void turn();
+  });
 
   return () => {
     ended = true;

@@ -10,6 +10,7 @@ import {
   OverlayLayer,
   RemarkPins,
   SelectionHandles,
+  ShapeGrips,
   SheetStage,
   TaskWorkLayer,
 } from '@/components/sheet/drawing';
@@ -23,6 +24,7 @@ import { useBoardRemarks } from './board-remarks';
 import { useBoard, useBoardSettings, useBoardSheet, useView } from './board-context';
 import { DraftMarks } from './draft-marks';
 import { useFloor } from './floor-context';
+import { OtherPlanners } from './other-planners';
 import { PlumbMarks } from './plumb-marks';
 import { usePostures, useVerdicts } from './readings-context';
 import { sheetBounds } from './sheet-bounds';
@@ -38,7 +40,7 @@ export function Canvas() {
   const draft = useBoardSheet((state) => state.draft);
   const selection = useBoardSheet((state) => state.selection);
   const tool = useBoardSheet((state) => state.tool);
-  const { floorMap, isDragging } = useFloor();
+  const { floorMap, isDragging, isLive } = useFloor();
   const { byPoint, cell } = useVerdicts();
   const postures = usePostures();
   const settings = useBoardSettings();
@@ -105,7 +107,8 @@ export function Canvas() {
               scale={look.scale}
               range={look.range}
               threshold={measure === 'reach' ? null : thresholds[measure]}
-              isoLines={isDragging ? null : look.isoLines}
+              isoLines={isDragging || isLive ? null : look.isoLines}
+              showsBranches={!isDragging && !isLive}
               opacity={layers.map}
             />
             <GridLayer />
@@ -129,8 +132,16 @@ export function Canvas() {
             {tool.name === 'select' && (
               <SelectionHandles items={chosenItems} arms={arms} onHandlePointerDown={pointer.onHandle} />
             )}
+            {(tool.name === 'select' || tool.name === 'outline') && (
+              <ShapeGrips
+                items={chosenItems}
+                chosenPointId={selection.taskPointId}
+                onGripPointerDown={pointer.onGrip}
+              />
+            )}
             <PlumbMarks />
             <DraftMarks />
+            <OtherPlanners />
             <RemarkPins remarks={pins} chosenId={chosenRemarkId} onPinPointerDown={onRemark} />
           </OverlayLayer>
         </SheetStage>

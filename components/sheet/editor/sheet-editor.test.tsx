@@ -223,3 +223,11 @@ describe('remarks', () => {
     expect(screen.getByRole('button', { name: 'Settle' })).toBeVisible();
   });
 });
+
+describe('another planner on the sheet', () => {
+  it('is named over the sheet, and announced', async () => {
+    server.others = [{ seat: fakeId(40), name: 'Ilse Varnholt', at: { xMm: 1, yMm: 2 }, itemIds: [tray.id] }];
+    await open();
+    expect(await screen.findByText('Ilse Varnholt is here too')).toBeVisible();
+  });
+});

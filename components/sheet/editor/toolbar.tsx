@@ -8,6 +8,7 @@ import { selectTool } from '@/lib/editor/tools/select';
 import { panTool } from '@/lib/editor/tools/place';
 import { zoomAt } from '@/lib/layout/viewport';
 import { useBoard, useBoardSheet } from './board-context';
+import { WhoElse } from './who-else';
 import { EditMenu } from './edit-menu';
 import { FloorPlanChoice } from './floor-plan-choice';
 import { LayersChoice } from './layers-choice';
@@ -62,7 +63,7 @@ export function Toolbar({ onShortcuts }: { readonly onShortcuts: () => void }) {
       <SnapChoice />
       <FloorPlanChoice />
       <LayersChoice />
-      <span className="ml-auto" />
+      <WhoElse />
       <Tool label="Zoom out" hint="−" onClick={() => zoom(1 / ZOOM)}>
         <Minus aria-hidden className="size-4" />
       </Tool>

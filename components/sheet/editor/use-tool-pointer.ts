@@ -2,6 +2,7 @@
 
 import { useMemo, useRef } from 'react';
 import type { SheetPointer } from '@/components/sheet/drawing';
+import type { Grip } from '@/lib/editor/grips';
 import type { Press, Target } from '@/lib/editor/tools/tool';
 import { useBoard } from './board-context';
 
@@ -12,7 +13,7 @@ const FINGER_SLACK_PX = 9;
 
 /** Hands the canvas's pointers to the tool that is in hand. */
 export function useToolPointer() {
-  const { sheet, view } = useBoard();
+  const { sheet, view, presence } = useBoard();
   const down = useRef<{ target: Target | null } | null>(null);
   return useMemo(() => {
     const pressOf = ({ floor, event }: SheetPointer, target: Target | null): Press => ({
@@ -37,7 +38,11 @@ export function useToolPointer() {
         const [itemId] = sheet.getState().selection.itemIds;
         if (itemId) press(pointer, { part: handle === 'rotate' ? 'turn' : 'item', itemId });
       },
-      onMove: (pointer: SheetPointer) => sheet.move(pressOf(pointer, null)),
+      onGrip: (itemId: string, grip: Grip, pointer: SheetPointer) => press(pointer, { part: 'grip', itemId, grip }),
+      onMove: (pointer: SheetPointer) => {
+        presence.pointAt({ xMm: Math.round(pointer.floor.xMm), yMm: Math.round(pointer.floor.yMm) });
+        sheet.move(pressOf(pointer, null));
+      },
       onUp: (pointer: SheetPointer) => {
         if (!down.current) return;
         // What was pressed stays the target to the end, so that a click means the same when pressed and when let go.
@@ -50,10 +55,11 @@ export function useToolPointer() {
         sheet.interrupt();
       },
       onLeave: () => {
+        presence.pointAt(null);
         // A ghost that follows the pointer has nothing to follow; a gesture in hand goes on outside.
         if (!down.current && sheet.getState().draft) sheet.use(sheet.getState().tool);
       },
       onFinish: () => sheet.finish(),
     };
-  }, [sheet, view]);
+  }, [sheet, view, presence]);
 }

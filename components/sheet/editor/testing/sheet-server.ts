@@ -2,6 +2,7 @@ import { http, HttpResponse } from 'msw';
 import { BUILT_IN_ARMS } from '@/lib/kinematics/library';
 import type { LibraryArm } from '@/lib/contracts/arms';
 import type { Layout, OperationBatch } from '@/lib/contracts/layouts';
+import type { OtherPlanner } from '@/lib/contracts/presence';
 import type { Remark } from '@/lib/contracts/remarks';
 import { FakeLayoutServer } from '@/lib/editor/testing/fake-layout-server';
 import type { Item } from '@/lib/layout/items';
@@ -32,6 +33,7 @@ export class SheetServer {
   readonly batches: OperationBatch[] = [];
   readonly mapQuestions: unknown[] = [];
   remarks: Remark[] = [];
+  others: OtherPlanner[] = [];
   line: 'up' | 'down' = 'up';
   /** Runs once, just before the next batch is looked at: somebody was faster. */
   faster: (() => void) | null = null;
@@ -64,6 +66,9 @@ export class SheetServer {
         HttpResponse.json(this.layout.changes(Number(new URL(request.url).searchParams.get('since')))),
       ),
       http.post(`${layout}/operations`, async ({ request }) => this.take((await request.json()) as OperationBatch)),
+      http.post(`${layout}/presence`, () =>
+        HttpResponse.json({ layoutVersion: this.layout.version, others: this.others }),
+      ),
       http.get(`${layout}/remarks`, () => HttpResponse.json({ remarks: this.remarks })),
       http.get('*/api/arms', () => HttpResponse.json({ arms: [ARM] })),
       http.get(`*/api/projects/${this.projectId}/floor-plans`, () => HttpResponse.json({ floorPlans: [] })),
