@@ -1,5 +1,7 @@
 import { DataTypes, Model } from 'sequelize';
-import type { CreationOptional, InferAttributes, InferCreationAttributes, Sequelize } from 'sequelize';
+import type { CreationOptional, InferAttributes, InferCreationAttributes, NonAttribute, Sequelize } from 'sequelize';
+import type { ShareLink } from './share-link';
+import type { User } from './user';
 
 export class AuditEvent extends Model<InferAttributes<AuditEvent>, InferCreationAttributes<AuditEvent>> {
   declare id: CreationOptional<string>;
@@ -11,6 +13,9 @@ export class AuditEvent extends Model<InferAttributes<AuditEvent>, InferCreation
   declare subjectId: CreationOptional<string | null>;
   declare details: CreationOptional<Record<string, unknown>>;
   declare createdAt: CreationOptional<Date>;
+
+  declare user?: NonAttribute<User | null>;
+  declare shareLink?: NonAttribute<ShareLink | null>;
 }
 
 export function initAuditEvent(sequelize: Sequelize): void {

@@ -1,5 +1,8 @@
 import { DataTypes, Model } from 'sequelize';
 import type { CreationOptional, InferAttributes, InferCreationAttributes, NonAttribute, Sequelize } from 'sequelize';
+import type { RemarkMention } from './remark-mention';
+import type { RemarkPicture } from './remark-picture';
+import type { RemarkRead } from './remark-read';
 import type { RemarkReply } from './remark-reply';
 import type { Revision } from './revision';
 import type { User } from './user';
@@ -23,6 +26,9 @@ export class Remark extends Model<InferAttributes<Remark>, InferCreationAttribut
   declare shareLinkId: CreationOptional<string | null>;
   /** As it was when they wrote: roles change later. */
   declare authorSide: AuthorSide;
+  /** Whose it is to deal with, a member, and until when (ISO date). */
+  declare assigneeId: CreationOptional<string | null>;
+  declare dueOn: CreationOptional<string | null>;
   declare resolvedAt: CreationOptional<Date | null>;
   declare resolvedBy: CreationOptional<string | null>;
   declare createdAt: CreationOptional<Date>;
@@ -31,6 +37,10 @@ export class Remark extends Model<InferAttributes<Remark>, InferCreationAttribut
   declare revision?: NonAttribute<Revision>;
   declare user?: NonAttribute<User | null>;
   declare replies?: NonAttribute<RemarkReply[]>;
+  declare assignee?: NonAttribute<User | null>;
+  declare mentions?: NonAttribute<RemarkMention[]>;
+  declare pictures?: NonAttribute<RemarkPicture[]>;
+  declare reads?: NonAttribute<RemarkRead[]>;
 }
 
 export function initRemark(sequelize: Sequelize): void {
@@ -49,6 +59,8 @@ export function initRemark(sequelize: Sequelize): void {
       guestEmail: DataTypes.TEXT,
       shareLinkId: DataTypes.UUID,
       authorSide: { type: DataTypes.TEXT, allowNull: false },
+      assigneeId: DataTypes.UUID,
+      dueOn: DataTypes.DATEONLY,
       resolvedAt: DataTypes.DATE,
       resolvedBy: DataTypes.UUID,
       createdAt: DataTypes.DATE,

@@ -3,6 +3,7 @@ import type { CreationOptional, InferAttributes, InferCreationAttributes, NonAtt
 import type { LayoutState } from '@/lib/contracts/layouts';
 import type { Snapshot } from '@/lib/contracts/revisions';
 import type { Layout } from './layout';
+import type { SignOff } from './sign-off';
 import type { User } from './user';
 
 /** A frozen copy of a layout. Only its state may change; the database refuses everything else. */
@@ -23,6 +24,7 @@ export class Revision extends Model<InferAttributes<Revision>, InferCreationAttr
 
   declare layout?: NonAttribute<Layout>;
   declare issuer?: NonAttribute<User | null>;
+  declare signOffs?: NonAttribute<SignOff[]>;
 }
 
 export function initRevision(sequelize: Sequelize): void {

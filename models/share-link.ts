@@ -1,6 +1,7 @@
 import { DataTypes, Model } from 'sequelize';
 import type { CreationOptional, InferAttributes, InferCreationAttributes, NonAttribute, Sequelize } from 'sequelize';
 import type { Revision } from './revision';
+import type { ShareOpen } from './share-open';
 
 export class ShareLink extends Model<InferAttributes<ShareLink>, InferCreationAttributes<ShareLink>> {
   declare id: CreationOptional<string>;
@@ -9,6 +10,7 @@ export class ShareLink extends Model<InferAttributes<ShareLink>, InferCreationAt
   declare tokenHash: string;
   declare label: CreationOptional<string>;
   declare mayRemark: CreationOptional<boolean>;
+  declare maySign: CreationOptional<boolean>;
   declare expiresAt: Date;
   declare revokedAt: CreationOptional<Date | null>;
   declare openCount: CreationOptional<number>;
@@ -18,6 +20,7 @@ export class ShareLink extends Model<InferAttributes<ShareLink>, InferCreationAt
   declare updatedAt: CreationOptional<Date>;
 
   declare revision?: NonAttribute<Revision>;
+  declare opens?: NonAttribute<ShareOpen[]>;
 }
 
 export function initShareLink(sequelize: Sequelize): void {
@@ -28,6 +31,7 @@ export function initShareLink(sequelize: Sequelize): void {
       tokenHash: { type: DataTypes.TEXT, allowNull: false },
       label: { type: DataTypes.TEXT, allowNull: false, defaultValue: '' },
       mayRemark: { type: DataTypes.BOOLEAN, allowNull: false, defaultValue: true },
+      maySign: { type: DataTypes.BOOLEAN, allowNull: false, defaultValue: false },
       expiresAt: { type: DataTypes.DATE, allowNull: false },
       revokedAt: DataTypes.DATE,
       openCount: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 0 },

@@ -5,6 +5,7 @@ import { floorPlanSchema } from './floor-plans';
 import { libraryArmSchema } from './arms';
 import { idSchema, timestampSchema } from './common';
 import { layoutStateSchema } from './layouts';
+import { signOffSchema } from './sign-offs';
 
 /** POST /api/layouts/[layoutId]/revisions: issue a frozen copy; GET there lists what was issued, newest first. */
 export const issueRequestSchema = z.object({ note: z.string().trim().max(2000).default('') });
@@ -19,6 +20,7 @@ export const revisionSummarySchema = z.object({
   sha256: z.string().length(64),
   issuedAt: timestampSchema,
   issuedBy: z.string(),
+  signOffs: z.array(signOffSchema),
 });
 export type RevisionSummary = z.infer<typeof revisionSummarySchema>;
 export const revisionListSchema = z.object({ revisions: z.array(revisionSummarySchema) });

@@ -24,6 +24,7 @@ export interface ShareActor {
   projectId: string;
   revisionId: string;
   mayRemark: boolean;
+  maySign: boolean;
 }
 
 export type Actor = MemberActor | ShareActor;

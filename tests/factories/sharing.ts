@@ -24,6 +24,7 @@ export async function createRevision(options: RevisionOptions = {}): Promise<Rev
 interface ShareLinkOptions {
   revisionId?: string;
   mayRemark?: boolean;
+  maySign?: boolean;
   expiresAt?: Date;
   revokedAt?: Date;
 }
@@ -39,6 +40,7 @@ export async function createShareLink(
     revisionId: options.revisionId ?? (await createRevision()).id,
     tokenHash: hashToken(token),
     mayRemark: options.mayRemark ?? true,
+    maySign: options.maySign ?? false,
     expiresAt: options.expiresAt ?? new Date(Date.now() + 24 * 3600 * 1000),
     revokedAt: options.revokedAt ?? null,
     createdAt,

@@ -1,6 +1,7 @@
-import { createHash, randomUUID } from 'node:crypto';
+import { randomUUID } from 'node:crypto';
 import type { ArmContent, LibraryArm } from '@/lib/contracts/arms';
 import type { Snapshot } from '@/lib/contracts/revisions';
+import { snapshotHash } from '@/lib/server/revisions/snapshot';
 import { mapSettingsSchema } from '@/lib/layout/map-settings';
 import { robotSchema } from '@/lib/layout/items';
 import type { Item } from '@/lib/layout/items';
@@ -167,5 +168,5 @@ export function emptySnapshot(layout: Layout, parts: Partial<Snapshot> = {}): { 
     ...parts,
   };
   // Of plain JSON; the product's own hash is of canonical JSON.
-  return { snapshot, sha256: createHash('sha256').update(JSON.stringify(snapshot)).digest('hex') };
+  return { snapshot, sha256: snapshotHash(snapshot) };
 }

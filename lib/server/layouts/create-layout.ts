@@ -12,7 +12,7 @@ import { storedItemsOf } from './data';
 import { nextLetter } from './letters';
 import { summaryOf } from './read-layouts';
 
-async function letterFor(project: Project, transaction: Transaction): Promise<string> {
+export async function letterFor(project: Project, transaction: Transaction): Promise<string> {
   const given = await Layout.findAll({ where: { projectId: project.id }, attributes: ['letter'], transaction });
   const letter = nextLetter(given.map((layout) => layout.letter));
   if (letter === null)

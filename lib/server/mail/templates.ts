@@ -2,6 +2,7 @@ import { z } from 'zod';
 import type { Message } from './message';
 import { composeInvitation } from './invitation';
 import { composePasswordReset } from './password-reset';
+import { composeIssue, composeSignOff, composeSignOffReceipt, issueDataSchema, signOffDataSchema } from './revision';
 import { composeRemark, composeReply, remarkDataSchema, replyDataSchema } from './remark';
 
 /** The job's own id and whom the mail is for. */
@@ -29,6 +30,9 @@ export const TEMPLATES = {
   'password-reset': template(z.object({}), composePasswordReset),
   remark: template(remarkDataSchema, composeRemark),
   reply: template(replyDataSchema, composeReply),
+  issue: template(issueDataSchema, composeIssue),
+  'sign-off': template(signOffDataSchema, composeSignOff),
+  'sign-off-receipt': template(signOffDataSchema, composeSignOffReceipt),
 };
 
 export type TemplateName = keyof typeof TEMPLATES;

@@ -1,5 +1,5 @@
 import { Op, type Includeable, type Transaction } from 'sequelize';
-import { Layout, Project, Revision, User } from '@/models';
+import { Layout, Project, Revision, SignOff, User } from '@/models';
 import { notFound } from '../errors';
 import { projectScope, type Actor } from '../policy';
 
@@ -14,7 +14,10 @@ const around = (actor: Actor): Includeable[] => [
     include: [{ model: Project, as: 'project', required: true, where: projectScope(actor) }],
   },
   { model: User, as: 'issuer' },
+  { model: SignOff, as: 'signOffs' },
 ];
+
+const signOffsInOrder: [string, string, string] = ['signOffs', 'createdAt', 'ASC'];
 
 /** The revision if the actor may see it; a guest sees the shared one only. Throws not_found. */
 export async function findRevision(
@@ -26,6 +29,7 @@ export async function findRevision(
   const revision = await Revision.findOne({
     where: { [Op.and]: [{ id: revisionId }, shared] },
     include: around(actor),
+    order: [signOffsInOrder],
     transaction,
   });
   if (!revision) throw notFound('revision');
@@ -37,8 +41,11 @@ export async function revisionsOf(layout: Layout, transaction?: Transaction): Pr
   return Revision.findAll({
     where: { layoutId: layout.id },
     attributes: { exclude: ['snapshot'] },
-    include: [{ model: User, as: 'issuer' }],
-    order: [['number', 'DESC']],
+    include: [
+      { model: User, as: 'issuer' },
+      { model: SignOff, as: 'signOffs' },
+    ],
+    order: [['number', 'DESC'], signOffsInOrder],
     transaction,
   });
 }

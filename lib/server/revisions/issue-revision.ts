@@ -7,6 +7,7 @@ import { conflict } from '../errors';
 import { findLayout } from '../layouts/data';
 import type { MemberActor } from '../policy';
 import { findRevision } from './data';
+import { notifyOfIssue } from './notify-issue';
 import { presentRevision } from './present';
 import { snapshotHash, takeSnapshot } from './snapshot';
 
@@ -24,12 +25,17 @@ export async function issueRevision(
       throw conflict('nothing_to_issue', 'This sheet is still empty. Place something on the floor, then issue it.');
     }
     const last = (await Revision.max<number | null, Revision>('number', { where: { layoutId }, transaction })) ?? 0;
-    await Revision.update({ state: 'superseded' }, { where: { layoutId, state: 'issued' }, transaction });
+    await Revision.update(
+      { state: 'superseded' },
+      { where: { layoutId, state: ['issued', 'changes_requested'] }, transaction },
+    );
     const { id } = await Revision.create(
       { layoutId, number: last + 1, note, snapshot, sha256: snapshotHash(snapshot), issuedBy: actor.userId },
       { transaction },
     );
     await recordAudit(actor, { action: 'revision.issued', subjectId: id, details: { number: last + 1 } }, transaction);
-    return presentRevision(await findRevision(actor, id, transaction));
+    const revision = await findRevision(actor, id, transaction);
+    await notifyOfIssue(actor, revision, transaction);
+    return presentRevision(actor, revision);
   }, outer);
 }

@@ -1,8 +1,10 @@
 import type { Revision as RevisionAnswer, RevisionSummary } from '@/lib/contracts/revisions';
 import type { Revision } from '@/models';
+import type { Actor } from '../policy';
+import { presentSignOff } from '../sign-offs/present';
 import type { PlacedRevision } from './data';
 
-export function presentRevisionSummary(revision: Revision, projectId: string): RevisionSummary {
+export function presentRevisionSummary(actor: Actor, revision: Revision, projectId: string): RevisionSummary {
   return {
     id: revision.id,
     layoutId: revision.layoutId,
@@ -13,9 +15,10 @@ export function presentRevisionSummary(revision: Revision, projectId: string): R
     sha256: revision.sha256,
     issuedAt: revision.createdAt.toISOString(),
     issuedBy: revision.issuer?.name ?? 'a former member',
+    signOffs: (revision.signOffs ?? []).map((signOff) => presentSignOff(signOff, actor)),
   };
 }
 
-export function presentRevision(revision: PlacedRevision): RevisionAnswer {
-  return { ...presentRevisionSummary(revision, revision.layout.projectId), snapshot: revision.snapshot };
+export function presentRevision(actor: Actor, revision: PlacedRevision): RevisionAnswer {
+  return { ...presentRevisionSummary(actor, revision, revision.layout.projectId), snapshot: revision.snapshot };
 }

@@ -13,7 +13,7 @@ export async function listRevisions(
 ): Promise<RevisionSummary[]> {
   const layout = await findLayout(actor, layoutId, transaction);
   const revisions = await revisionsOf(layout, transaction);
-  return revisions.map((revision) => presentRevisionSummary(revision, layout.projectId));
+  return revisions.map((revision) => presentRevisionSummary(actor, revision, layout.projectId));
 }
 
 export async function readRevision(
@@ -21,5 +21,5 @@ export async function readRevision(
   revisionId: string,
   transaction?: Transaction,
 ): Promise<RevisionAnswer> {
-  return presentRevision(await findRevision(actor, revisionId, transaction));
+  return presentRevision(actor, await findRevision(actor, revisionId, transaction));
 }

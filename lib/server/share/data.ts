@@ -1,8 +1,11 @@
 import { Op, type Transaction } from 'sequelize';
-import { Layout, Project, Revision, ShareLink } from '@/models';
+import { Layout, Project, Revision, ShareLink, ShareOpen } from '@/models';
 import { notFound } from '../errors';
 import { projectScope, type MemberActor, type ShareActor } from '../policy';
 import { hashToken } from '../tokens';
+
+/** A link that is opened every day for a year need not fill the dialog. */
+const SHOWN_OPENS = 20;
 
 const aroundLink = (where?: ReturnType<typeof projectScope>) => ({
   model: Revision,
@@ -41,6 +44,7 @@ export async function openToken(
     projectId: project.id,
     revisionId: link.revisionId,
     mayRemark: link.mayRemark,
+    maySign: link.maySign,
   };
   return { actor, link };
 }
@@ -65,6 +69,8 @@ export async function findShareLink(
 export async function shareLinksOf(revisionId: string, transaction?: Transaction): Promise<ShareLink[]> {
   return ShareLink.findAll({
     where: { revisionId },
+    // Apart, or the limit would count the rows of the join.
+    include: [{ model: ShareOpen, as: 'opens', separate: true, order: [['createdAt', 'DESC']], limit: SHOWN_OPENS }],
     order: [
       ['createdAt', 'DESC'],
       ['id', 'ASC'],

@@ -1,5 +1,5 @@
 import { literal } from 'sequelize';
-import { Organisation, ShareLink } from '@/models';
+import { Organisation, Revision, ShareLink } from '@/models';
 import type { SharedRevision } from '@/lib/contracts/share-links';
 import { inTransaction } from '../database';
 import { notFound } from '../errors';
@@ -8,9 +8,11 @@ import { pictureResponse } from '../floor-plans/read-stored-picture';
 import { findRevision } from '../revisions/data';
 import { presentRevision } from '../revisions/present';
 import { openToken } from './data';
+import { readGuestMark } from './guest-mark';
+import { recordOpen } from './opens';
 
 /** The revision behind a token, for somebody who opens the link; counts the opening. */
-export async function readShared(token: string): Promise<SharedRevision> {
+export async function readShared(token: string, request: Request): Promise<SharedRevision> {
   return inTransaction(async (transaction) => {
     const { actor, link } = await openToken(token, transaction);
     const revision = await findRevision(actor, actor.revisionId, transaction);
@@ -20,12 +22,20 @@ export async function readShared(token: string): Promise<SharedRevision> {
       { openCount: literal('open_count + 1'), lastOpenedAt: new Date() },
       { where: { id: link.id }, transaction },
     );
+    const guest = { userAgent: request.headers.get('user-agent'), guestMark: readGuestMark(request) };
+    await recordOpen(link.id, guest, transaction);
+    const newest = await Revision.max<number, Revision>('number', {
+      where: { layoutId: revision.layoutId },
+      transaction,
+    });
     return {
       organisationName: organisation.name,
       customerName: revision.snapshot.customerName,
       mayRemark: link.mayRemark,
+      maySign: link.maySign,
+      newerNumber: newest > revision.number ? newest : null,
       expiresAt: link.expiresAt.toISOString(),
-      revision: presentRevision(revision),
+      revision: presentRevision(actor, revision),
     };
   });
 }

@@ -17,7 +17,7 @@ const DAY_MS = 24 * 3600 * 1000;
 export async function createShareLink(
   actor: MemberActor,
   revisionId: string,
-  { label, mayRemark, expiresInDays }: ShareLinkRequest,
+  { label, mayRemark, maySign, expiresInDays }: ShareLinkRequest,
   outer?: Transaction,
 ): Promise<z.infer<typeof newShareLinkSchema>> {
   return inTransaction(async (transaction) => {
@@ -29,6 +29,7 @@ export async function createShareLink(
         tokenHash: hashToken(token),
         label,
         mayRemark,
+        maySign,
         expiresAt: new Date(Date.now() + expiresInDays * DAY_MS),
         createdBy: actor.userId,
       },
@@ -36,7 +37,7 @@ export async function createShareLink(
     );
     await recordAudit(
       actor,
-      { action: 'share_link.created', subjectId: link.id, details: { revisionId } },
+      { action: 'share_link.created', subjectId: link.id, details: { revisionId, mayRemark, maySign } },
       transaction,
     );
     return { ...presentShareLink(link), url: new URL(`/share/${token}`, env.APP_URL).href };

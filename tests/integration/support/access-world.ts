@@ -61,7 +61,7 @@ export async function buildAccessWorld() {
   const snapshot = { projectName: `Project ${SECRET}`, floorPlan, maps };
   const revision = await createRevision({ layoutId: layout.id, issuedBy: planner.user.id, snapshot });
   const remark = await createRemark({ revisionId: revision.id, userId: callers.viewer.user.id });
-  const { token } = await createShareLink({ revisionId: revision.id });
+  const { token } = await createShareLink({ revisionId: revision.id, maySign: true });
 
   const askNewMap = (): Promise<DexterityMap> => askMap(planner.actor, newQuestion(arm.id));
   const askNewStudy = (): Promise<Study> => askStudy(planner.actor, newStudyQuestion(arm.id));
@@ -74,6 +74,7 @@ export async function buildAccessWorld() {
     mapId: map.id,
     layoutId: layout.id,
     revisionId: revision.id,
+    sha256: revision.sha256,
     remarkId: remark.id,
     // What a caller may take away is made anew for each of them.
     addArm: () => createArm({ organisationId }),
