@@ -110,6 +110,13 @@ export class Sheet {
     this.take(this.state.tool.finish(this.view([])), NO_GUIDES);
   }
 
+  /** Takes away what the tool has in hand; false where it holds nothing that can go. */
+  removeInHand(): boolean {
+    const reply = this.state.tool.remove?.();
+    if (reply) this.take(reply, NO_GUIDES);
+    return reply !== undefined;
+  }
+
   /** Takes back what is under way; at rest it lets the selection go. */
   cancel(): void {
     const { tool, draft } = this.state;
@@ -184,6 +191,11 @@ export class Sheet {
   /** Makes one step of the history. Fields that a colleague changed meanwhile and the step does not touch stay theirs. */
   commit(label: string, changes: readonly Change[], selection?: Selection): void {
     this.set({ draft: null, ...this.afterStep(label, changes), ...(selection && { selection }) });
+  }
+
+  /** Shows items as they would become while something beside the drawing is dragged; `commit` or `interrupt` ends it. */
+  preview(items: readonly Item[]): void {
+    this.set({ draft: { items } });
   }
 
   private afterStep(label: string, changes: readonly Change[]): Partial<SheetState> {

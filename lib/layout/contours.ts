@@ -1,5 +1,5 @@
 import { contours } from 'd3';
-import type { FloorGrid } from './floor-map';
+import type { FloorGrid, FloorMap } from './floor-map';
 
 /** Lines and outlines of a floor map, in floor millimetres. Cells that are not reached (NaN) bound everything. */
 
@@ -71,9 +71,19 @@ export function belowOutline(map: ValueGrid, threshold: number): PointMm[][] {
  * @param owner one number a cell; equal numbers are one realm.
  */
 export function realmEdges(map: ValueGrid, owner: Uint8Array): Float32Array {
+  return edgesWhere(map, (a, b) => owner[a] !== owner[b]);
+}
+
+/** The same where one robot goes on with another branch: its tool cannot pass there without the arm turning over. */
+export function branchEdges(map: Pick<FloorMap, 'grid' | 'value' | 'robot' | 'branch'>): Float32Array {
+  const { robot, branch } = map;
+  return edgesWhere(map, (a, b) => robot[a] === robot[b] && branch[a] !== branch[b]);
+}
+
+function edgesWhere(map: ValueGrid, changes: (a: number, b: number) => boolean): Float32Array {
   const { columns, rows, stepMm, originMm } = map.grid;
   const edges: number[] = [];
-  const differ = (a: number, b: number) => owner[a] !== owner[b] && !Number.isNaN(map.value[a] + map.value[b]);
+  const differ = (a: number, b: number) => changes(a, b) && !Number.isNaN(map.value[a] + map.value[b]);
   const x = (column: number) => originMm[0] + (column - 0.5) * stepMm;
   const y = (row: number) => originMm[1] + (row - 0.5) * stepMm;
   for (let row = 0; row < rows; row += 1) {

@@ -36,6 +36,8 @@ export interface FloorMap {
   readonly value: Float32Array;
   /** Index of the robot with that value among the maps given, else NO_ROBOT. */
   readonly robot: Uint8Array;
+  /** That robot's class of branch there, a number of its own arm. */
+  readonly branch: Uint8Array;
   /** How many robots reach the cell. */
   readonly reachedBy: Uint8Array;
 }
@@ -81,6 +83,7 @@ function blankFloorMap(grid: FloorGrid, measure: MapMeasure, like?: FloorMap): F
     measure,
     value: (fits ? like.value : new Float32Array(cells)).fill(NaN),
     robot: (fits ? like.robot : new Uint8Array(cells)).fill(NO_ROBOT),
+    branch: (fits ? like.branch : new Uint8Array(cells)).fill(0),
     reachedBy: (fits ? like.reachedBy : new Uint8Array(cells)).fill(0),
   };
 }
@@ -103,7 +106,7 @@ export function composeFloorMap(
 }
 
 function addRobot(target: FloorMap, map: PlacedMap, index: number): void {
-  const { grid: floor, measure, value, robot, reachedBy } = target;
+  const { grid: floor, measure, value, robot, branch, reachedBy } = target;
   const { grid, placement, tile } = map;
   const source = measure === 'reach' ? null : tile[measure];
   const reason = tile.reason;
@@ -135,6 +138,7 @@ function addRobot(target: FloorMap, map: PlacedMap, index: number): void {
       if (!(here <= value[cell]) && !Number.isNaN(here)) {
         value[cell] = here;
         robot[cell] = index;
+        branch[cell] = tile.branch[spot];
       }
     }
   }

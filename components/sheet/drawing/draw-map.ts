@@ -81,8 +81,8 @@ export function drawHatchEdge(ink: Ink, palette: Palette, px: number, reached: P
   ink.restore();
 }
 
-/** A thin edge where the best robot changes. */
-export function drawRealmEdges(ink: Ink, palette: Palette, px: number, edges: Float32Array): void {
+/** A thin edge where the best robot changes, or with less width its best branch. */
+export function drawRealmEdges(ink: Ink, palette: Palette, px: number, edges: Float32Array, widthPx = 1.2): void {
   if (edges.length === 0) return;
   ink.beginPath();
   for (let index = 0; index < edges.length; index += 4) {
@@ -90,7 +90,7 @@ export function drawRealmEdges(ink: Ink, palette: Palette, px: number, edges: Fl
     ink.lineTo(edges[index + 2], edges[index + 3]);
   }
   ink.globalAlpha = 0.55;
-  strokeInk(ink, palette.sheet, 1.2 * px);
+  strokeInk(ink, palette.sheet, widthPx * px);
   ink.globalAlpha = 1;
 }
 

@@ -4,6 +4,7 @@ import { useDeferredValue, useEffect, useRef } from 'react';
 import { MapKey } from '@/components/sheet/map-key/map-key';
 import { useBoard, useBoardSettings } from './board-context';
 import { useFloor } from './floor-context';
+import { StackSlider } from './map-height';
 import { MapQuestionPopover } from './map-question-popover';
 import { mapWork } from './map-work';
 import { useMapLook } from './use-map-look';
@@ -15,7 +16,7 @@ const MARGIN_PX = 16;
 export function MapPanel({ floating = false }: { readonly floating?: boolean }) {
   const { settings: keeper, view } = useBoard();
   const settings = useBoardSettings();
-  const { floorMap, byRobot, unfinished, robotCount, cancel, retry } = useFloor();
+  const { floorMap, entries, unfinished, robotCount, cancel, retry } = useFloor();
   const look = useMapLook();
   // The key may follow a moment behind the picture while a base is dragged.
   const keyedMap = useDeferredValue(floorMap);
@@ -32,9 +33,9 @@ export function MapPanel({ floating = false }: { readonly floating?: boolean }) 
     };
   }, [floating, view]);
 
-  const work = mapWork([...byRobot.values()], robotCount, unfinished);
+  const work = mapWork(entries, robotCount, unfinished);
   const each = (act: (key: string) => void, states: readonly string[]) => {
-    const keys = [...byRobot.values()].filter(({ state }) => states.includes(state)).map(({ key }) => key);
+    const keys = entries.filter(({ state }) => states.includes(state)).map(({ key }) => key);
     for (const key of new Set(keys)) act(key);
   };
   const key = (
@@ -54,7 +55,12 @@ export function MapPanel({ floating = false }: { readonly floating?: boolean }) 
       }}
       onCancel={() => each(cancel, ['queued', 'running'])}
       onRetry={() => each(retry, ['failed', 'cancelled', 'unreachable'])}
-      questionAction={<MapQuestionPopover />}
+      questionAction={
+        <>
+          <MapQuestionPopover />
+          <StackSlider />
+        </>
+      }
     />
   );
   if (!floating) return key;

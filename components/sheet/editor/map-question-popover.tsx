@@ -6,8 +6,10 @@ import { Field } from '@/components/ui/field';
 import { SegmentedControl } from '@/components/ui/segmented-control';
 import { Select } from '@/components/ui/select';
 import { ValueField } from '@/components/sheet/panels/value-field';
-import { mapSettingsSchema, type MapSettings } from '@/lib/layout/map-settings';
 import { useBoard, useBoardSettings } from './board-context';
+import { MapBranch } from './map-branch';
+import { MapHeight, StackFields } from './map-height';
+import { useSettingChange } from './use-setting-change';
 
 const STEPS = [10, 20, 25, 40, 50, 100] as const;
 
@@ -16,12 +18,7 @@ export function MapQuestionPopover() {
   const { settings: keeper } = useBoard();
   const settings = useBoardSettings();
   const isUpright = settings.tiltDeg === 0 || settings.tiltDeg === 180;
-  const change = (patch: Partial<MapSettings>, refusal: string): string | null => {
-    const checked = mapSettingsSchema.safeParse({ ...keeper.getSettings(), ...patch });
-    if (!checked.success) return refusal;
-    keeper.change(patch);
-    return null;
-  };
+  const change = useSettingChange();
   const stepChoices = [...new Set([...STEPS, settings.stepMm])].sort((one, other) => one - other);
   return (
     <Popover.Root>
@@ -35,16 +32,10 @@ export function MapQuestionPopover() {
           sideOffset={8}
           collisionPadding={8}
           aria-label="What the map asks"
-          className="z-40 w-80 max-w-[94vw] border border-rule bg-sheet p-3.5 text-ink focus-visible:outline-none"
+          className="z-40 max-h-[min(80vh,var(--radix-popover-content-available-height))] w-80 max-w-[94vw] overflow-y-auto border border-rule bg-sheet p-3.5 text-ink focus-visible:outline-none"
         >
           <div className="grid grid-cols-2 gap-x-4 gap-y-2.5">
-            <ValueField
-              label="Tool height over floor"
-              kind="length"
-              step={50}
-              value={settings.toolHeightMm}
-              onCommit={(toolHeightMm) => change({ toolHeightMm }, 'Write −5000 to 20000 mm.')}
-            />
+            <MapHeight />
             <ValueField
               label="Tilt from straight down"
               kind="angle"
@@ -73,6 +64,13 @@ export function MapQuestionPopover() {
                 onCommit={(headingDeg) => change({ headingDeg }, 'Write −360 to 360 degrees.')}
               />
             )}
+            <ValueField
+              label="Cone about it, half angle"
+              kind="angle"
+              step={5}
+              value={settings.coneDeg}
+              onCommit={(coneDeg) => change({ coneDeg }, 'Write 0 (one direction) to 90 degrees.')}
+            />
             <SegmentedControl
               className="col-span-2 self-start"
               label="Roll of the tool"
@@ -92,6 +90,8 @@ export function MapQuestionPopover() {
                 onCommit={(rollDeg) => change({ rollDeg }, 'Write −360 to 360 degrees.')}
               />
             )}
+            <MapBranch />
+            <StackFields />
             <Field label="A value every" className="col-span-2">
               <Select
                 value={String(settings.stepMm)}

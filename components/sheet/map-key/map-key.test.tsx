@@ -11,6 +11,7 @@ const map: FloorMap = {
   measure: 'inverseConditionNumber',
   value: Float32Array.of(0.3, 0.3, 0.3, 0.3, 0.3, 0.3, 0.05, 0.05, NaN, NaN),
   robot: Uint8Array.of(0, 0, 0, 0, 0, 0, 0, 0, NO_ROBOT, NO_ROBOT),
+  branch: new Uint8Array(10),
   reachedBy: Uint8Array.of(2, 1, 1, 1, 1, 1, 1, 1, 0, 0),
 };
 

@@ -79,10 +79,10 @@ export function MapKey(props: MapKeyProps) {
           options={WRISTS}
           className="self-start"
         />
-        <p className="flex flex-wrap items-center gap-x-2 text-[0.8125rem] leading-tight text-ink-soft">
+        <div className="flex flex-wrap items-center gap-x-2 text-[0.8125rem] leading-tight text-ink-soft">
           <span>{questionWords(settings)}</span>
           {props.questionAction}
-        </p>
+        </div>
       </div>
       <div className="flex min-w-0 flex-col justify-center px-3.5 py-2.5">
         {isDrawn ? (

@@ -1,4 +1,4 @@
-import { makeSolver } from '@/lib/kinematics/solver';
+import { mapWorkPerSpot } from '@/lib/kinematics/maps/work';
 import type { Arm, MapGrid, MapRequest } from '@/lib/kinematics/types';
 
 /** How a map is cut into jobs. Work is counted in plain spots: one closed-form solution each, some 50 µs. */
@@ -11,31 +11,12 @@ const SPOT_LIMIT = 1_000_000;
 const WORK_LIMIT = 30_000_000;
 const SECONDS_PER_WORK = 50e-6;
 
-/**
- * Measured against a plain spot: a roll that has to be searched takes dozens of solutions, and so do the postures of a redundant arm; an arm without
- * a closed form iterates.
- */
-const SEARCHED_ROLL_WORK = 80;
-const FAMILY_WORK = 8;
-const SEARCHED_FAMILY_WORK = 100;
-const NUMERICAL_WORK = 800;
-
 interface Question {
   readonly arm: Arm;
   readonly request: MapRequest;
 }
 
-function workPerSpot(question: Question): number {
-  return workPerDirection(question) * (question.request.cone?.samples ?? 1);
-}
-
-function workPerDirection({ arm, request }: Question): number {
-  const { closedForm, toolOnLastAxis } = makeSolver(arm);
-  if (!closedForm) return NUMERICAL_WORK;
-  const searches = request.roll === 'free' && !toolOnLastAxis;
-  if (closedForm.family) return searches ? SEARCHED_FAMILY_WORK : FAMILY_WORK;
-  return searches ? SEARCHED_ROLL_WORK : 1;
-}
+const workPerSpot = ({ arm, request }: Question): number => mapWorkPerSpot(arm, request);
 
 /** Spots that a map of this arm may have. */
 export function spotLimitOf(question: Question): number {
