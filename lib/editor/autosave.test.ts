@@ -71,6 +71,22 @@ describe('autosave', () => {
     expect(at.autosave.getStatus().state).toBe('saved');
   });
 
+  it('leaves undo and redo as they were, and saves what they do', async () => {
+    at.add(block('One'));
+    await at.runTimers();
+    at.add(block('Two'));
+    await at.runTimers();
+    at.sheet.undo();
+    at.sheet.undo();
+    at.sheet.redo();
+    await at.runTimers();
+    expect(at.server.items.map(({ item }) => item.name)).toEqual(['One']);
+    expect(at.autosave.getStatus().state).toBe('saved');
+    at.sheet.redo();
+    await at.runTimers();
+    expect(at.server.items.map(({ item }) => item.name)).toEqual(['One', 'Two']);
+  });
+
   it('sends a batch without an answer again under the same id, and later edits after it', async () => {
     at.line.state = 'answer lost';
     at.add(block('One'));

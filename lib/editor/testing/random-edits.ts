@@ -1,6 +1,9 @@
 import type { Item } from '@/lib/layout/items';
 import type { Change } from '../changes';
-import { duplicated, edited, moved, removed, turnedBy } from '../edits';
+import { aligned, distributed } from '../arrange';
+import { copiedText, pasted, readCopied } from '../clipboard';
+import { duplicated, edited, flagged, moved, removed, turnedBy } from '../edits';
+import { grouped, ungrouped } from '../groups';
 import { newBlock, newDimension, newLine, newRobot } from '../make-items';
 import { reorder } from '../order';
 import type { Sheet } from '../sheet';
@@ -46,7 +49,7 @@ export function randomEdit(random: Seeded, sheet: Sheet): boolean {
 function changesOf(random: Seeded, sheet: Sheet, ids: string[]): readonly Change[] {
   const { items } = sheet.getState();
   const [first] = ids;
-  switch (random.below(7)) {
+  switch (random.below(14)) {
     case 0:
       return removed(items, ids);
     case 1:
@@ -60,7 +63,29 @@ function changesOf(random: Seeded, sheet: Sheet, ids: string[]): readonly Change
       const named = item && edited(item, { name: `Item ${random.below(1e6)}` });
       return named?.ok ? [{ itemId: first, before: item ?? null, after: named.value }] : [];
     }
+    case 5:
+      return grouped(items, ids, random.id());
+    case 6:
+      return ungrouped(items, ids);
+    case 7:
+      return aligned(items, ids, random.pick(['left', 'centre', 'right', 'far', 'middle', 'near']));
+    case 8:
+      return distributed(items, ids, random.pick(['across', 'away']));
+    case 9:
+      return flagged(items, ids, random.chance(0.5) ? { locked: random.chance(0.3) } : { hidden: random.chance(0.3) });
+    case 10:
+      return copiedAndPasted(random, sheet, ids);
     default:
       return moved(items, ids, random.below(2000) - 1000, random.below(2000) - 1000);
   }
+}
+
+/** Through the text of the clipboard, as from one sheet to another. */
+function copiedAndPasted(random: Seeded, sheet: Sheet, ids: string[]): readonly Change[] {
+  const { items } = sheet.getState();
+  const chosen = ids.map((id) => items.get(id)).filter((item): item is Item => item !== undefined);
+  const copied = readCopied(copiedText(chosen, 'here'));
+  if (copied.kind !== 'items') throw new Error('What the sheet copies it can read.');
+  const result = pasted(copied.items, { items, byMm: 250, knowsArm: () => true, newId: random.id });
+  return result.ok ? result.changes : [];
 }
