@@ -20,6 +20,8 @@ export interface LiveMapTask {
 export interface LiveMap {
   readonly grid: FloorGrid;
   readonly tile: MapTile;
+  /** Over the base plate: a map that follows the hand may be of a moment ago. */
+  readonly toolHeightMm: number;
 }
 
 /** ms that one map may take. */
@@ -49,7 +51,7 @@ export function makeLiveMapper(now: () => number): (task: LiveMapTask) => LiveMa
     const took = ((now() - began) * 1000) / (request.grid.rows * request.grid.columns);
     // The slower of the last two, so that one lucky map does not make the next one late.
     costs.set(kind, Math.max(took, 0.5 * (usPerCell + took)));
-    return { grid: gridInMm(request.grid), tile };
+    return { grid: gridInMm(request.grid), tile, toolHeightMm: question.toolHeightMm };
   };
 }
 

@@ -2,6 +2,7 @@ import { arch, cpus, loadavg } from 'node:os';
 import { compareAnalysisAndInverse } from '../bench/analysis-and-inverse';
 import { compareWithBaseRate } from '../bench/base-rate';
 import { heapGrowth } from '../bench/heap';
+import { liveMap } from '../bench/browser/live-map';
 import { compareRoutes, growth } from '../bench/maps';
 import { say, title } from '../bench/print';
 import { ROUNDS } from '../bench/rounds';
@@ -20,6 +21,7 @@ const PARTS: Record<string, () => Promise<void>> = {
   growth,
   heap: heapGrowth,
   workers: compareWorkers,
+  live: liveMap,
 };
 
 const asked = process.argv.slice(2);
@@ -34,4 +36,8 @@ say(`Medians of ${ROUNDS} interleaved rounds. "ours is 2.00×" means twice as qu
 say(
   'Pin it to one processor for steady numbers, for instance: taskset -c 1 npm run bench -- base library inverse maps',
 );
-for (const name of asked.length > 0 ? asked : Object.keys(PARTS)) await PARTS[name]();
+/** These need the product running, so they only run when asked for. */
+const ON_REQUEST: readonly string[] = ['live'];
+
+const usual = Object.keys(PARTS).filter((name) => !ON_REQUEST.includes(name));
+for (const name of asked.length > 0 ? asked : usual) await PARTS[name]();

@@ -40,7 +40,7 @@ export function Canvas() {
   const draft = useBoardSheet((state) => state.draft);
   const selection = useBoardSheet((state) => state.selection);
   const tool = useBoardSheet((state) => state.tool);
-  const { floorMap, isDragging, isLive } = useFloor();
+  const { floorMap, isDragging, isLive, laidHeightMm } = useFloor();
   const { byPoint, cell } = useVerdicts();
   const postures = usePostures();
   const settings = useBoardSettings();
@@ -84,6 +84,7 @@ export function Canvas() {
       data-canvas
       data-viewport={JSON.stringify(viewport)}
       data-tool={tool.name}
+      data-map-height={laidHeightMm ?? undefined}
     >
       {size.width > 0 && (
         <SheetStage

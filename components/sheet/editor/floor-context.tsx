@@ -25,6 +25,8 @@ export interface Floor {
   readonly unfinished: number;
   /** What is laid on the floor, for whoever wants its range of values. */
   readonly tiles: readonly MapTile[];
+  /** Tool height over the floor of the first robot's map as it is laid; null without one. */
+  readonly laidHeightMm: number | null;
   /** Some of it comes from the browser's own kernel, coarse, until the stored map is there. */
   readonly isLive: boolean;
   /** Robots that stand on the sheet. */
@@ -50,7 +52,9 @@ const NO_ROBOTS: readonly Robot[] = [];
 /** The live map is only there while the stored one is not; what was stored before stays until the first live one comes. */
 function oneMap(entry: MapEntry | undefined, live: LiveMap | undefined): LiveMap | null {
   if (live) return live;
-  return entry?.tile && entry.map ? { grid: entry.map.grid, tile: entry.tile } : null;
+  return entry?.tile && entry.map
+    ? { grid: entry.map.grid, tile: entry.tile, toolHeightMm: entry.question.toolHeightMm }
+    : null;
 }
 
 /** The worst of each robot's stack, where all of its maps are there. */
@@ -63,7 +67,8 @@ function worstByRobot(
   for (const [robotId, entries] of shownByRobot) {
     const tiles = entries.flatMap(({ tile }) => (tile ? [tile] : []));
     const { map } = entries[0];
-    if (map && tiles.length === heightCount) worst.set(robotId, { grid: map.grid, tile: worstOfStack(tiles) });
+    if (map && tiles.length === heightCount)
+      worst.set(robotId, { grid: map.grid, tile: worstOfStack(tiles), toolHeightMm: entries[0].question.toolHeightMm });
   }
   return worst;
 }
@@ -90,15 +95,17 @@ export function FloorProvider({ children }: { readonly children: ReactNode }) {
     const placed: PlacedMap[] = [];
     const standing: Robot[] = [];
     let isLive = false;
+    let laidHeightMm: number | null = null;
     for (const robot of shown) {
       const map = isOneHeight ? oneMap(byRobot.get(robot.id), live.get(robot.id)?.result) : stacks.get(robot.id);
       if (!map) continue;
       if (map === live.get(robot.id)?.result) isLive = true;
       placed.push({ robotId: robot.id, placement: robot, grid: map.grid, tile: map.tile });
       standing.push(robot);
+      laidHeightMm ??= map.toolHeightMm + robot.riserMm;
     }
     const floorMap = composer.compose(placed, settings.stepMm, settings.measure);
-    return { floorMap, robots: standing, tiles: placed.map(({ tile }) => tile), isLive };
+    return { floorMap, robots: standing, tiles: placed.map(({ tile }) => tile), isLive, laidHeightMm };
   }, [shown, isOneHeight, byRobot, live, stacks, composer, settings.stepMm, settings.measure]);
 
   const isDragging = draft?.items.some(({ kind }) => kind === 'robot') ?? false;
