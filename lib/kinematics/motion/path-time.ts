@@ -52,11 +52,13 @@ export function timePath(chain: Chain, samples: readonly PathSample[], upperSpee
     ceiling[k] = Math.min(allowed[k], curve, upperSpeed);
   }
 
-  ramp(chain, samples, slope, bend, ceiling, gone);
+  const accelerationAt = accelerations(chain, slope, bend);
+  ramp(samples, accelerationAt, ceiling, gone);
   for (let k = 1; k < count; k++) {
     const step = samples[k].atM - samples[k - 1].atM;
-    const speed = gone[k] + gone[k - 1];
-    at[k] = at[k - 1] + (step === 0 ? 0 : speed > 0 ? (2 * step) / speed : Infinity);
+    const acceleration = Math.min(accelerationAt(k - 1, gone[k - 1]), accelerationAt(k, gone[k]));
+    const cap = Math.min(ceiling[k - 1], ceiling[k]);
+    at[k] = at[k - 1] + intervalTime(step, gone[k - 1], gone[k], acceleration, cap);
   }
   return { seconds: at[count - 1], allowed, gone, at, binding };
 }
@@ -77,18 +79,26 @@ function differentiate(n: number, samples: readonly PathSample[], slope: Float64
   }
 }
 
-/** Speeds up from rest as fast as the joints let it, then takes away what cannot be braked in time. */
-function ramp(
-  chain: Chain,
-  samples: readonly PathSample[],
-  slope: Float64Array,
-  bend: Float64Array,
-  ceiling: Float64Array,
-  gone: Float64Array,
-): void {
+/**
+ * Time (s) of one interval between two speeds: up as far as there is room for, on at the cap, and down again. Without it a ramp that is
+ * shorter than an interval would be drawn out over all of it.
+ */
+function intervalTime(step: number, from: number, to: number, acceleration: number, cap: number): number {
+  if (step === 0) return 0;
+  // No joint moves: nothing takes time.
+  if (acceleration === Infinity) return cap === Infinity ? 0 : step / cap;
+  if (acceleration <= 0) return from + to > 0 ? (2 * step) / (from + to) : Infinity;
+  const peak = Math.max(from, to, Math.min(cap, Math.sqrt(acceleration * step + (from * from + to * to) / 2)));
+  const ramps = (2 * peak * peak - from * from - to * to) / (2 * acceleration);
+  return (2 * peak - from - to) / acceleration + Math.max(0, step - ramps) / peak;
+}
+
+/** Acceleration along the path (m/s²) that all joints can give at a sample and a speed; infinite where none moves. */
+type AccelerationAt = (k: number, speed: number) => number;
+
+function accelerations(chain: Chain, slope: Float64Array, bend: Float64Array): AccelerationAt {
   const n = chain.actuators;
-  /** Acceleration along the path (m/s²) that all joints can give at this speed. */
-  const acceleration = (k: number, speed: number): number => {
+  return (k, speed) => {
     let least = Infinity;
     for (let i = 0; i < n; i++) {
       const q1 = Math.abs(slope[k * n + i]);
@@ -98,17 +108,21 @@ function ramp(
     }
     return least;
   };
+}
+
+/** Speeds up from rest as fast as the joints let it, then takes away what cannot be braked in time. */
+function ramp(
+  samples: readonly PathSample[],
+  accelerationAt: AccelerationAt,
+  ceiling: Float64Array,
+  gone: Float64Array,
+): void {
   const last = samples.length - 1;
+  const reachable = (k: number, step: number): number =>
+    step === 0 ? gone[k] : Math.sqrt(gone[k] ** 2 + 2 * step * accelerationAt(k, gone[k]));
   gone[0] = 0;
-  for (let k = 0; k < last; k++) {
-    const step = samples[k + 1].atM - samples[k].atM;
-    const most = Math.sqrt(gone[k] ** 2 + 2 * step * acceleration(k, gone[k]));
-    gone[k + 1] = Math.min(ceiling[k + 1], step === 0 ? gone[k] : most);
-  }
+  for (let k = 0; k < last; k++)
+    gone[k + 1] = Math.min(ceiling[k + 1], reachable(k, samples[k + 1].atM - samples[k].atM));
   gone[last] = 0;
-  for (let k = last; k > 0; k--) {
-    const step = samples[k].atM - samples[k - 1].atM;
-    const most = Math.sqrt(gone[k] ** 2 + 2 * step * acceleration(k, gone[k]));
-    gone[k - 1] = Math.min(gone[k - 1], step === 0 ? gone[k] : most);
-  }
+  for (let k = last; k > 0; k--) gone[k - 1] = Math.min(gone[k - 1], reachable(k, samples[k].atM - samples[k - 1].atM));
 }
