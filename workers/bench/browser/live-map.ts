@@ -3,9 +3,9 @@ import { say, table, title } from '../print';
 import { browserPath, withSheet } from './sheet-page';
 
 /** Pointer moves a drag, and how far apart in time: a mouse reports about as often as a screen is drawn. */
-const MOVES = 120;
+const MOVES = 100;
 const EVERY_MS = 16;
-const DRAGS = 5;
+const DRAGS = 3;
 
 interface Watched {
   /** ms from each pointer move that changed the height to the first picture that shows it or a newer one. */
