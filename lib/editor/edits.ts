@@ -21,7 +21,8 @@ export function edited<T extends Item>(item: T, patch: Partial<T>): Edit<T> {
   const checked = itemSchema.safeParse({ ...item, ...patch });
   if (!checked.success) {
     const [issue] = checked.error.issues;
-    const own = /^(Give|Write|A |An |That)/.test(issue.message);
+    // Words of our own stand; those that the schema library made up speak of types.
+    const own = !/^(Too|Invalid|Expected|Unrecognized)\b/.test(issue.message);
     return { ok: false, message: own ? issue.message : (MESSAGES[issue.code] ?? issue.message) };
   }
   const fault = itemFault(checked.data);

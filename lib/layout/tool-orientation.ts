@@ -50,3 +50,14 @@ export function frameOf(transform: Transform): Frame {
   if (level < UPRIGHT) return { xyz, rpy: [0, pitch, Math.atan2(-t[1], t[5])] };
   return { xyz, rpy: [Math.atan2(t[9], t[10]), pitch, Math.atan2(t[4], t[0])] };
 }
+
+/** The tool's own x and y axes (unit length) at a tilt, an azimuth and a roll; a free roll is taken as 0. */
+export function toolAxes(held: {
+  readonly tiltDeg: number;
+  readonly azimuthDeg: number;
+  readonly rollDeg: number | 'free';
+}): { readonly x: Vec3; readonly y: Vec3 } {
+  const roll = held.rollDeg === 'free' ? 0 : (held.rollDeg * Math.PI) / 180;
+  const t = toolOrientation(toolDirection(held.tiltDeg, held.azimuthDeg), roll);
+  return { x: [t[0], t[4], t[8]], y: [t[1], t[5], t[9]] };
+}

@@ -39,6 +39,10 @@ export function traceHit(context: Konva.Context, shape: Konva.Shape, item: Item,
         }
       }
       return;
+    case 'zone':
+      return along(item.outlineMm, true);
+    case 'protectiveDevice':
+      return along(item.pointsMm, false);
     case 'guardLine':
       return along(item.pointsMm, item.closed);
     case 'walkway':

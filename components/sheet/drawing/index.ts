@@ -8,6 +8,7 @@ export { MapLayer, type MapLayerProps } from './map-layer';
 export { MovedMarks } from './moved-marks';
 export { RemarkPins, type PinnedRemark } from './remark-pins';
 export { SelectionHandles } from './selection-handles';
+export { ShapeGrips } from './shape-grips';
 export { SheetStage, type SheetStageProps } from './sheet-stage';
 export { TaskWorkLayer } from './task-work-layer';
 export type { DrawingMode, DrawnArm, DrawnBand, SheetPointer } from './types';

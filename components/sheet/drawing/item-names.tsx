@@ -11,6 +11,7 @@ import { drawConveyorName } from './items/conveyor';
 import { drawGuardLineName, drawWalkwayName } from './items/lines';
 import { drawOutlineName } from './items/outlined';
 import { drawRobotName } from './items/robot';
+import { drawProtectiveDeviceName, drawZoneName } from './items/zones';
 import { robotSizes } from './robot-sticks';
 import type { DrawnArm } from './types';
 
@@ -56,6 +57,8 @@ export const ItemNames = memo(function ItemNames({ items, arms, palette, lengthU
             drawRobotName(ink, palette, px, item, robotSizes(reachMm).baseRadiusMm);
           } else if (item.kind === 'fixture' || item.kind === 'obstacle') drawOutlineName(ink, palette, px, item);
           else if (item.kind === 'guardLine') drawGuardLineName(ink, palette, px, item);
+          else if (item.kind === 'zone') drawZoneName(ink, palette, px, item);
+          else if (item.kind === 'protectiveDevice') drawProtectiveDeviceName(ink, palette, px, item);
           else if (item.kind === 'conveyor') drawConveyorName(ink, palette, px, item);
           else if (item.kind === 'walkway') drawWalkwayName(ink, palette, px, item, lengthUnit);
           ink.restore();
@@ -68,7 +71,7 @@ export const ItemNames = memo(function ItemNames({ items, arms, palette, lengthU
 /** How far an item's own points lie from its place, mm. */
 function sizeOf(item: Item): number {
   const points =
-    item.kind === 'fixture' || item.kind === 'obstacle' ? item.outlineMm : 'pointsMm' in item ? item.pointsMm : [];
+    'outlineMm' in item ? item.outlineMm : 'pointsMm' in item ? item.pointsMm : [];
   let size = 0;
   for (const [x, y] of points) size = Math.max(size, Math.abs(x), Math.abs(y));
   return size * Math.SQRT2;

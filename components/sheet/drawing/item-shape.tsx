@@ -13,6 +13,7 @@ import { drawFixture, drawObstacle } from './items/outlined';
 import { drawReachRing, drawRobot } from './items/robot';
 import { drawSectionLine } from './items/section-line';
 import { drawTaskPoints, taskPointAt } from './items/task-points';
+import { drawProtectiveDevice, drawZone } from './items/zones';
 import { traceHit } from './hit-areas';
 import { inkOf, pixelOf } from './ink';
 import { robotSizes, robotSticks } from './robot-sticks';
@@ -56,7 +57,7 @@ export const ItemShape = memo(function ItemShape(props: ItemShapeProps) {
         return drawRobot(ink, palette, px, robot, posture !== undefined);
       case 'fixture':
         drawFixture(ink, palette, px, item);
-        return drawTaskPoints(ink, palette, px, item, verdicts, selectedTaskPointId);
+        return drawTaskPoints(ink, palette, px, item, verdicts, selectedTaskPointId, chosen);
       case 'obstacle':
         return drawObstacle(ink, palette, px, item);
       case 'guardLine':
@@ -71,6 +72,10 @@ export const ItemShape = memo(function ItemShape(props: ItemShapeProps) {
         return drawSectionLine(ink, palette, px, item);
       case 'note':
         return drawNote(ink, palette, px, item);
+      case 'zone':
+        return drawZone(ink, palette, px, item);
+      case 'protectiveDevice':
+        return drawProtectiveDevice(ink, palette, px, item);
     }
   };
 

@@ -48,6 +48,7 @@ export function usePlace() {
           return panTool();
         case 'select':
         case 'carry':
+        case 'outline':
           return selectTool();
       }
     }
@@ -63,7 +64,7 @@ export function usePlace() {
       placeAtOnce(name: ToolName, armId?: string) {
         const { items, selection, snapping } = sheet.getState();
         const middle = view.middle();
-        if (name === 'select' || name === 'carry' || name === 'pan')
+        if (name === 'select' || name === 'carry' || name === 'outline' || name === 'pan')
           return sheet.use(name === 'pan' ? panTool() : selectTool());
         if (name === 'plumb') return sheet.hangPlumb({ xMm: Math.round(middle.xMm), yMm: Math.round(middle.yMm) });
         if (name === 'taskPoint') {

@@ -66,6 +66,7 @@ export function useSelectionCommands() {
         sheet.commit(`Turn ${named(selected())}`, turnedBy(items, ids(), byDeg));
       },
       remove() {
+        if (sheet.removeInHand()) return;
         const { items } = sheet.getState();
         if (ids().length === 0) return;
         const point = chosenTaskPoint(sheet.getState());

@@ -1,49 +1,12 @@
-import { distanceMm, itemToFloor, turned, type PointMm } from '@/lib/layout/geometry';
-import type { Item } from '@/lib/layout/items';
+import { distanceMm, turned } from '@/lib/layout/geometry';
 import { put } from '../changes';
-import { footprint } from '../footprint';
 import { newDimension, type Measured } from '../make-items';
+import { measuredSpot } from '../marks';
 import { tidy } from '../snapping';
 import { selectTool } from './select';
 import { chosen, state, type Press, type Tool, type View } from './tool';
 
 const DRAFT_ID = '00000000-0000-4000-8000-000000000002';
-
-/** How near to a corner or a task point a click must be to measure from there, in slacks of the pointer. */
-const NEAR_SLACKS = 3;
-
-/**
- * What is clicked is measured from its nearest corner, task point or place, and the dimension follows it; with Alt, and beside
- * everything, the floor spot counts.
- */
-export function measuredSpot(press: Press, view: View): Measured {
-  const target = press.target?.part === 'item' || press.target?.part === 'taskPoint' ? press.target : null;
-  const item = target && view.items.get(target.itemId);
-  if (item && item.kind !== 'dimension' && !press.alt) {
-    const atMm = markNear(item, press);
-    if (atMm) return { atMm, item };
-  }
-  const spot = view.snap(press, press);
-  return {
-    atMm: [spot.xMm, spot.yMm],
-    item: press.alt || item?.kind === 'dimension' ? undefined : (item ?? undefined),
-  };
-}
-
-/** The mark of an item nearest to the press; a robot's and a fixture's place from anywhere on them. */
-function markNear(item: Item, press: Press): PointMm | null {
-  const place: PointMm = [item.xMm, item.yMm];
-  const points = item.kind === 'fixture' ? item.taskPoints : [];
-  const marks: PointMm[] = [
-    place,
-    ...(item.kind === 'robot' ? [] : footprint(item)),
-    ...points.map((point) => itemToFloor(item, [point.xMm, point.yMm])),
-  ];
-  const distance = ([x, y]: PointMm) => Math.hypot(x - press.xMm, y - press.yMm);
-  const nearest = marks.reduce((best, mark) => (distance(mark) < distance(best) ? mark : best));
-  if (distance(nearest) <= press.slackMm * NEAR_SLACKS) return [tidy(nearest[0]), tidy(nearest[1])];
-  return item.kind === 'robot' || item.kind === 'fixture' ? place : null;
-}
 
 /** From point, to point, then where the dimension line stands. */
 export function dimensionTool(): Tool {

@@ -1,4 +1,4 @@
-import { settledItems } from '@/lib/layout/attached-dimensions';
+import { isAttached, settledItems } from '@/lib/layout/attached-dimensions';
 import { boundsOfPoints } from '@/lib/layout/viewport';
 import type { PointMm } from '@/lib/layout/geometry';
 import { footprint, liesInside } from '../footprint';
@@ -14,6 +14,7 @@ import {
   type Tool,
   type View,
 } from './tool';
+import { gripping } from './grip';
 import { movingItems } from './move';
 import { movingTaskPoint } from './move-task-point';
 import { turning } from './turn';
@@ -27,6 +28,7 @@ function press(at: Press, view: View): Reply {
   const { target } = at;
   if (!target) return { tool: marquee([at.xMm, at.yMm], at.shift ? view.selection : NOTHING) };
   if (target.part === 'turn') return { tool: turning(at, view, selectTool) };
+  if (target.part === 'grip') return { tool: gripping(at, target.itemId, target.grip, view, selectTool) };
   const selection = selectionAfter(target, at.shift, view);
   const wasChosen = view.selection.itemIds.includes(target.itemId);
   return { tool: pressed(at, target, selection, wasChosen), selection };
@@ -59,11 +61,7 @@ function pressed(start: Press, target: Target, selection: Selection, wasChosen: 
     busy: true,
     move: (at, view) => {
       if (Math.hypot(at.xMm - start.xMm, at.yMm - start.yMm) < start.slackMm) return { tool: self };
-      const dragging =
-        target.part === 'taskPoint'
-          ? movingTaskPoint(start, target, view, selectTool)
-          : movingItems(start, selection, view, selectTool);
-      return dragging.move(at, view);
+      return dragging(start, target, selection, view).move(at, view);
     },
     release: (_, view) => {
       const narrows = target.part === 'item' && !start.shift && wasChosen && selection.itemIds.length > 1;
@@ -72,6 +70,16 @@ function pressed(start: Press, target: Target, selection: Selection, wasChosen: 
     cancel: selectTool,
   });
   return self;
+}
+
+function dragging(start: Press, target: Target, selection: Selection, view: View): Tool {
+  if (target.part === 'taskPoint') return movingTaskPoint(start, target, view, selectTool);
+  const item = view.items.get(target.itemId);
+  // What a dimension measures keeps its ends in place, so only its line can go elsewhere.
+  const isHeld = item !== undefined && isAttached(item) && selection.itemIds.length === 1;
+  return isHeld
+    ? gripping(start, target.itemId, { kind: 'offset' }, view, selectTool)
+    : movingItems(start, selection, view, selectTool);
 }
 
 /** A rectangle drawn from an empty spot chooses what lies wholly inside; a plain click chooses nothing. */

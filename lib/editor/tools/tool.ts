@@ -1,4 +1,5 @@
 import type { Change, Items } from '../changes';
+import type { Grip } from '../grips';
 import type { Moved } from '../snap-lines';
 import type { Snapping } from '../snapping';
 import type { Item } from '@/lib/layout/items';
@@ -18,7 +19,9 @@ export type Target =
   | { readonly part: 'item'; readonly itemId: string }
   | { readonly part: 'taskPoint'; readonly itemId: string; readonly taskPointId: string }
   /** The handle that turns the chosen items. */
-  | { readonly part: 'turn'; readonly itemId: string };
+  | { readonly part: 'turn'; readonly itemId: string }
+  /** A corner, an end or a knob of the chosen item. */
+  | { readonly part: 'grip'; readonly itemId: string; readonly grip: Grip };
 
 /** A pointer on the floor. */
 export interface Press {
@@ -74,6 +77,7 @@ export interface Reply {
 export type ToolName =
   | 'select'
   | 'carry'
+  | 'outline'
   | 'pan'
   | 'robot'
   | 'fixture'
@@ -105,6 +109,8 @@ export interface Tool {
   release(at: Press, view: View): Reply;
   /** Enter or a double click: ends a line. */
   finish(view: View): Reply;
+  /** Delete, where the tool holds something that can be taken away; otherwise what is chosen goes. */
+  readonly remove?: () => Reply;
   cancel(): Tool;
   /** The press was taken away (a second finger, the system): the state before it. */
   interrupted(): Tool;

@@ -29,7 +29,7 @@ export const placed = {
 export const outline = z
   .array(pointMm)
   .min(3, 'An outline needs at least three corners.')
-  .max(200)
+  .max(200, 'An outline has at most 200 corners. Delete one first.')
   .superRefine((points, context) => {
     const fault = points.length < 3 ? null : outlineFault(points);
     if (fault !== null) context.addIssue({ code: 'custom', message: fault });

@@ -16,7 +16,10 @@ export const doorSchema = z.object({
 export const guardLineSchema = z.object({
   kind: z.literal('guardLine'),
   ...placed,
-  pointsMm: z.array(pointMm).min(2, 'A guard line needs at least two points.').max(200),
+  pointsMm: z
+    .array(pointMm)
+    .min(2, 'A guard line needs at least two points.')
+    .max(200, 'A guard line has at most 200 points. Delete one first.'),
   closed: z.boolean().default(true),
   heightMm: z.number().min(0).max(20_000).default(2000),
   doors: z.array(doorSchema).max(50, 'A guard line has at most 50 doors.').default([]),
@@ -25,7 +28,10 @@ export const guardLineSchema = z.object({
 export const walkwaySchema = z.object({
   kind: z.literal('walkway'),
   ...placed,
-  pointsMm: z.array(pointMm).min(2, 'A walkway needs at least two points.').max(200),
+  pointsMm: z
+    .array(pointMm)
+    .min(2, 'A walkway needs at least two points.')
+    .max(200, 'A walkway has at most 200 points. Delete one first.'),
   widthMm: z.number().positive('A walkway has a width above zero.').max(20_000),
 });
 
