@@ -12,12 +12,12 @@ import { useShareLinkActions } from '@/lib/client/use-share-links';
 import { shareLinkRequestSchema } from '@/lib/contracts/share-links';
 import { applyProblem } from './apply-problem';
 
-/** For whom, for how long, and whether they may remark. */
+/** For whom, for how long, and what they may do: look, remark, sign. */
 export function NewShareLinkForm({ revisionId, onMade }: { revisionId: string; onMade: (address: string) => void }) {
   const { create } = useShareLinkActions(revisionId);
   const form = useForm({
     resolver: zodResolver(shareLinkRequestSchema),
-    defaultValues: { label: '', mayRemark: true, expiresInDays: 30 },
+    defaultValues: { label: '', mayRemark: true, maySign: false, expiresInDays: 30 },
   });
   const { errors, isSubmitting } = form.formState;
   const submit = form.handleSubmit(async (request) => {
@@ -58,13 +58,26 @@ export function NewShareLinkForm({ revisionId, onMade }: { revisionId: string; o
         </Field>
       </div>
       <div className="flex flex-wrap items-center justify-between gap-3">
-        <Controller
-          control={form.control}
-          name="mayRemark"
-          render={({ field }) => (
-            <Checkbox checked={field.value ?? true} onCheckedChange={field.onChange} label="May pin remarks" />
-          )}
-        />
+        <div className="grid gap-1.5">
+          <Controller
+            control={form.control}
+            name="mayRemark"
+            render={({ field }) => (
+              <Checkbox checked={field.value ?? true} onCheckedChange={field.onChange} label="May pin remarks" />
+            )}
+          />
+          <Controller
+            control={form.control}
+            name="maySign"
+            render={({ field }) => (
+              <Checkbox
+                checked={field.value ?? false}
+                onCheckedChange={field.onChange}
+                label="May accept it or ask for changes"
+              />
+            )}
+          />
+        </div>
         <Button type="submit" variant="action" busy={isSubmitting} busyLabel="Making the link…">
           Make a link
         </Button>

@@ -46,7 +46,7 @@ describe('ShareLinkDialog', () => {
     await user.click(screen.getByRole('button', { name: 'Make a link' }));
 
     expect(await screen.findByLabelText('Address')).toHaveValue(ADDRESS);
-    expect(asked).toEqual([{ label: 'Vera, Quillfen', mayRemark: false, expiresInDays: 14 }]);
+    expect(asked).toEqual([{ label: 'Vera, Quillfen', mayRemark: false, maySign: false, expiresInDays: 14 }]);
     await user.click(screen.getByRole('button', { name: 'Copy the address' }));
     expect(await screen.findByRole('button', { name: 'Copied' })).toBeVisible();
     expect(await navigator.clipboard.readText()).toBe(ADDRESS);

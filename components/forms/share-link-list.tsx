@@ -8,9 +8,13 @@ import { Moment } from '@/components/ui/moment';
 import { Notice } from '@/components/ui/notice';
 import { Tag } from '@/components/ui/tag';
 import { useShareLinkActions, useShareLinks } from '@/lib/client/use-share-links';
+import { ShareLinkOpens } from './share-link-opens';
 import type { ShareLink } from '@/lib/contracts/share-links';
 
 const nameOf = (link: ShareLink): string => link.label || 'Link without a note';
+
+const rightsOf = ({ mayRemark, maySign }: ShareLink): string =>
+  ` · look${mayRemark ? ', remark' : ''}${maySign ? ', sign' : ''}`;
 
 function stateOf(link: ShareLink, now: Date): 'open' | 'revoked' | 'expired' {
   if (link.revokedAt) return 'revoked';
@@ -57,8 +61,9 @@ export function ShareLinkList({ revisionId }: { revisionId: string }) {
                       · works until <Moment iso={link.expiresAt} />
                     </>
                   )}
-                  {link.mayRemark ? '' : ' · no remarks'}
+                  {rightsOf(link)}
                 </p>
+                <ShareLinkOpens link={link} />
               </div>
               {state === 'open' ? (
                 <Button

@@ -10,6 +10,8 @@ import { RemarkForm } from './remark-form';
 import { RemarkList } from './remark-list';
 import { ReviewDrawing } from './review-drawing';
 import type { ReviewSubject } from './review-subject';
+import { SignOffBar } from './sign-off-bar';
+import { SignOffList } from './sign-off-list';
 import { TaskPointTable } from './task-point-table';
 import { useReviewMap } from './use-review-map';
 
@@ -110,6 +112,7 @@ export function Review({ subject }: { readonly subject: ReviewSubject }) {
             </div>
           )}
         </Panel>
+        <SignOffList signOffs={subject.signOffs.now?.signOffs ?? []} />
         <Panel title="Task points" className="border-x-0 border-t-0">
           <TaskPointTable verdicts={verdicts} robots={robots} />
         </Panel>
@@ -123,6 +126,9 @@ export function Review({ subject }: { readonly subject: ReviewSubject }) {
           Planning figures, computed from the data typed in. Guarding, stopping distances and protective devices need a
           risk assessment, measured stopping times, local codes and licensed or competent persons.
         </p>
+        {subject.maySign && !spot && (
+          <SignOffBar signOffs={subject.signOffs} sha256={subject.sha256} number={subject.number} asGuest={asGuest} />
+        )}
       </div>
     </div>
   );

@@ -5,16 +5,17 @@ import { ShareLinkDialog } from '@/components/forms/share-link-dialog';
 import { STATE_WORDS } from '@/components/projects/state-words';
 import { SubjectFault } from '@/components/shell/subject-fault';
 import { Button } from '@/components/ui/button';
-import { LinkButton } from '@/components/ui/link-button';
 import { LoadingLine } from '@/components/ui/loading-line';
 import { Moment } from '@/components/ui/moment';
 import { TitleBlock } from '@/components/ui/title-block';
-import { useMayActAs } from '@/lib/client/account-context';
+import { useAccount, useMayActAs } from '@/lib/client/account-context';
 import { documentOfRevision } from '@/lib/client/sheet-document';
 import { useRevision, useRevisionReview } from '@/lib/client/use-review';
+import { useSignOffs } from '@/lib/client/use-sign-offs';
 import { useStoredMaps } from '@/lib/client/use-stored-maps';
 import type { Revision } from '@/lib/contracts/revisions';
 import { Review } from './review';
+import { RevisionActions } from './revision-actions';
 
 /** An issued revision for those who are signed in: the customer's view, with what a member may do besides. */
 export default function RevisionPage({ revisionId }: { readonly revisionId: string }) {
@@ -24,7 +25,10 @@ export default function RevisionPage({ revisionId }: { readonly revisionId: stri
 }
 
 function Opened({ revision }: { readonly revision: Revision }) {
-  const { id, layoutId, projectId, snapshot, number, issuedAt, issuedBy, state } = revision;
+  const { id, projectId, snapshot, number, issuedAt, issuedBy } = revision;
+  const { role } = useAccount();
+  const signOffs = useSignOffs(`/api/revisions/${encodeURIComponent(id)}`);
+  const state = signOffs.now?.state ?? revision.state;
   const mayShare = useMayActAs('integrator');
   const mayEdit = useMayActAs('planner');
   const [isSharing, setSharing] = useState(false);
@@ -53,7 +57,7 @@ function Opened({ revision }: { readonly revision: Revision }) {
         ]}
         actions={
           <>
-            {mayEdit && <LinkButton href={`/projects/${projectId}/layouts/${layoutId}`}>Open the sheet</LinkButton>}
+            {mayEdit && <RevisionActions revision={revision} />}
             {mayShare && (
               <Button variant="action" onClick={() => setSharing(true)}>
                 Share
@@ -71,6 +75,10 @@ function Opened({ revision }: { readonly revision: Revision }) {
             mapsError: maps.error,
             pictureUrl,
             review,
+            signOffs,
+            sha256: revision.sha256,
+            number,
+            maySign: role === 'viewer',
             mayRemark: true,
             asGuest: false,
           }}

@@ -39,6 +39,8 @@ const shared = (mayRemark = true) =>
     organisationName: 'Brackwater Integration',
     customerName: 'Quillfen Pumps',
     mayRemark,
+    maySign: true,
+    newerNumber: null,
     expiresAt: '2027-01-01T00:00:00.000Z',
     revision: {
       id: fakeId(10),
@@ -50,6 +52,7 @@ const shared = (mayRemark = true) =>
       sha256: '0'.repeat(64),
       issuedAt: '2026-12-01T08:00:00.000Z',
       issuedBy: 'Joren Addlestane',
+      signOffs: [],
       snapshot: {
         format: 1,
         projectName: 'Pump housing line',
@@ -86,6 +89,7 @@ function open(remarks: Remark[] = [], mayRemark = true) {
   api.use(
     http.get(BASE, () => HttpResponse.json(shared(mayRemark))),
     http.get(`${BASE}/remarks`, () => HttpResponse.json({ remarks })),
+    http.get(`${BASE}/sign-offs`, () => HttpResponse.json({ state: 'issued', signOffs: [] })),
   );
   return show(<SharePage token={TOKEN} />);
 }
@@ -176,6 +180,60 @@ describe('a shared revision', () => {
   });
 });
 
+describe('signing', () => {
+  it('asks a guest who they are, signs the hash that was shown, and shows the new state', async () => {
+    const sent: unknown[] = [];
+    const signed = {
+      id: fakeId(40),
+      decision: 'accepted',
+      note: '',
+      sha256: '0'.repeat(64),
+      name: 'Vera Quill',
+      email: null,
+      signedAt: '2026-12-01T10:00:00.000Z',
+    };
+    const { user } = open();
+    api.use(
+      http.post(`${BASE}/sign-offs`, async ({ request }) => {
+        sent.push(await request.json());
+        return HttpResponse.json({ state: 'accepted', signOffs: [signed] }, { status: 201 });
+      }),
+    );
+    await user.click(await screen.findByRole('button', { name: 'Accept revision' }));
+    await user.click(screen.getByRole('button', { name: 'Sign and accept' }));
+    expect(await screen.findByText('Write your name.')).toBeInTheDocument();
+    expect(sent).toEqual([]);
+    await user.type(screen.getByLabelText('Your name'), 'Vera Quill');
+    await user.type(screen.getByLabelText('Your e-mail address'), 'Vera@quillfen.example');
+    await user.click(screen.getByRole('button', { name: 'Sign and accept' }));
+    await waitFor(() => expect(screen.queryByRole('dialog')).not.toBeInTheDocument());
+    expect(sent).toEqual([
+      {
+        decision: 'accepted',
+        sha256: '0'.repeat(64),
+        note: '',
+        guest: { name: 'Vera Quill', email: 'vera@quillfen.example' },
+      },
+    ]);
+    expect(screen.getByRole('button', { name: 'Accepted' })).toBeDisabled();
+    expect(screen.getAllByText('Accepted').length).toBeGreaterThan(1);
+  });
+
+  it('keeps what was typed where the server refuses', async () => {
+    const { user } = open();
+    api.use(
+      http.post(`${BASE}/sign-offs`, () => problem(409, 'superseded', 'A newer revision has been issued meanwhile.')),
+    );
+    await user.click(await screen.findByRole('button', { name: 'Ask for changes' }));
+    await user.type(screen.getByLabelText('Your name'), 'Vera Quill');
+    await user.type(screen.getByLabelText('Your e-mail address'), 'vera@quillfen.example');
+    await user.type(screen.getByLabelText('What has to change'), 'More room behind the stand.');
+    await user.click(screen.getByRole('button', { name: 'Send' }));
+    expect(await screen.findByText(/newer revision has been issued/)).toBeInTheDocument();
+    expect(screen.getByLabelText('What has to change')).toHaveValue('More room behind the stand.');
+  });
+});
+
 describe('a link that opens nothing', () => {
   it.each([404, 422])('says whom to ask (%i)', async (status) => {
     api.use(
@@ -194,6 +252,7 @@ describe('a link that opens nothing', () => {
     api.use(
       http.get(BASE, () => HttpResponse.json(shared())),
       http.get(`${BASE}/remarks`, () => HttpResponse.json({ remarks: [] })),
+      http.get(`${BASE}/sign-offs`, () => HttpResponse.json({ state: 'issued', signOffs: [] })),
     );
     await user.click(again);
     expect(await screen.findByRole('heading', { name: 'C · R2 turned in' })).toBeVisible();

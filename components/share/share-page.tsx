@@ -10,6 +10,7 @@ import { StopPage } from '@/components/shell/stop-page';
 import type { SharedRevision } from '@/lib/contracts/share-links';
 import { documentOfRevision } from '@/lib/client/sheet-document';
 import { useSharedReview, useSharedRevision } from '@/lib/client/use-review';
+import { useSignOffs } from '@/lib/client/use-sign-offs';
 import { useStoredMaps } from '@/lib/client/use-stored-maps';
 import { Review } from './review';
 
@@ -44,14 +45,15 @@ function DeadLink() {
 }
 
 function Shared({ token, shared }: { readonly token: string; readonly shared: SharedRevision }) {
-  const { revision, organisationName, customerName, mayRemark, expiresAt } = shared;
+  const { revision, organisationName, customerName, mayRemark, maySign, expiresAt, newerNumber } = shared;
   const { snapshot } = revision;
   const document = useMemo(() => documentOfRevision(revision), [revision]);
   const base = `/api/share/${encodeURIComponent(token)}`;
   const maps = useStoredMaps(`${base}/maps`, snapshot.maps);
   const review = useSharedReview(token);
   const pictureUrl = useCallback((width: number) => `${base}/picture?width=${width}`, [base]);
-  const state = STATE_WORDS[revision.state];
+  const signOffs = useSignOffs(base);
+  const state = STATE_WORDS[signOffs.now?.state ?? revision.state];
   return (
     <div className="flex min-h-dvh flex-col bg-sheet lg:h-dvh">
       <TitleBlock
@@ -66,6 +68,11 @@ function Shared({ token, shared }: { readonly token: string; readonly shared: Sh
         actions={<span className="truncate text-ink-soft">{customerName && `for ${customerName}`}</span>}
       />
       <main className="flex min-h-0 flex-1 flex-col">
+        {newerNumber !== null && (
+          <p className="border-b border-rule bg-petrol-wash px-3.5 py-2">
+            Revision {newerNumber} has been issued since. Ask {organisationName} for the link to it.
+          </p>
+        )}
         <Review
           subject={{
             document,
@@ -74,6 +81,10 @@ function Shared({ token, shared }: { readonly token: string; readonly shared: Sh
             mapsError: maps.error,
             pictureUrl,
             review,
+            signOffs,
+            sha256: revision.sha256,
+            number: revision.number,
+            maySign,
             mayRemark,
             asGuest: true,
           }}

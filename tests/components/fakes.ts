@@ -42,10 +42,12 @@ export function fakeShareLink(number: number, part: Partial<ShareLink> = {}): Sh
     revisionId: fakeId(60),
     label: '',
     mayRemark: true,
+    maySign: false,
     expiresAt: fromToday(30),
     revokedAt: null,
     lastOpenedAt: null,
     openCount: 0,
+    opens: [],
     createdAt: fromToday(0),
     ...part,
   };
