@@ -8,7 +8,9 @@ import { TextLink } from '@/components/ui/link-button';
 import { Menu, MenuItem } from '@/components/ui/menu';
 import { Moment } from '@/components/ui/moment';
 import { Tag } from '@/components/ui/tag';
+import { useMayActAs } from '@/lib/client/account-context';
 import type { LayoutSummary } from '@/lib/contracts/layouts';
+import { VariantPicture } from './variant-picture';
 import { SortableTable, type TableColumn } from './sortable-table';
 
 export type VariantDeed = 'rename' | 'copy' | 'delete';
@@ -47,13 +49,19 @@ function VariantMenu({ layout, onDeed }: { layout: LayoutSummary } & Pick<Varian
 
 /** The variants of a project by letter. */
 export function VariantsTable({ layouts, onDeed }: VariantsTableProps) {
+  const seesDrafts = useMayActAs('planner');
   const columns = useMemo<TableColumn<LayoutSummary>[]>(
     () => [
       {
         id: 'letter',
         header: 'Letter',
         value: (layout) => layout.letter,
-        cell: (layout) => <span className="text-lg font-semibold">{layout.letter}</span>,
+        cell: (layout) => (
+          <span className="flex items-center gap-3">
+            <span className="text-lg font-semibold">{layout.letter}</span>
+            {seesDrafts && <VariantPicture layout={layout} />}
+          </span>
+        ),
         className: 'w-10',
       },
       {
@@ -111,7 +119,7 @@ export function VariantsTable({ layouts, onDeed }: VariantsTableProps) {
         className: 'w-10',
       },
     ],
-    [onDeed],
+    [onDeed, seesDrafts],
   );
   return (
     <SortableTable

@@ -84,3 +84,10 @@ export const layoutChangesSchema = z.object({
   floorPlanId: idSchema.nullable(),
 });
 export type LayoutChanges = z.infer<typeof layoutChangesSchema>;
+
+/** GET /api/layouts/[layoutId]/thumbnail?width=160&board=day: a small PNG of the draft. */
+export const thumbnailQuerySchema = z.object({
+  width: z.coerce.number().int().min(40).max(640).default(160),
+  board: z.enum(['day', 'night']).default('day'),
+});
+export type ThumbnailQuery = z.output<typeof thumbnailQuerySchema>;

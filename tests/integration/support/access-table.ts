@@ -132,6 +132,7 @@ export const TABLE: readonly Row[] = [
   row('GET',    'layouts/[layoutId]/changes',               [401, 401,  403,  404,     403,   200,  200,   200], ({ layoutId }) => ({ params: { layoutId }, path: '/?since=0' })),
   row('POST',   'layouts/[layoutId]/operations',            [401, 401,  403,  404,     403,   200,  200,   200], (world) => ({ params: { layoutId: world.layoutId }, body: { id: randomUUID(), operations: [{ type: 'put', baseVersion: 0, item: dimension() }] } })),
   row('POST',   'layouts/[layoutId]/presence',              [401, 401,  403,  404,     403,   200,  200,   200], withBody(layout, { seat: randomUUID(), at: null, itemIds: [] })),
+  row('GET',    'layouts/[layoutId]/thumbnail',             [401, 401,  403,  404,     403,   200,  200,   200], layout),
   row('GET',    'layouts/[layoutId]/remarks',               [401, 401,  404,  404,     200,   200,  200,   200], layout),
   row('GET',    'layouts/[layoutId]/revisions',             [401, 401,  404,  404,     200,   200,  200,   200], layout),
   row('POST',   'layouts/[layoutId]/revisions',             [401, 401,  403,  404,     403,   403,  201,   201], withBody(layout, {})),
