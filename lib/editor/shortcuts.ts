@@ -42,6 +42,8 @@ const TOOL_KEYS: Record<string, ToolName> = {
   w: 'walkway',
   c: 'conveyor',
   n: 'note',
+  z: 'zone',
+  l: 'protectiveDevice',
   t: 'taskPoint',
   d: 'dimension',
   s: 'sectionLine',

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { distanceValuesSchema } from './protective/distance-values';
 
 export const mapMeasureSchema = z.enum([
   'inverseConditionNumber',
@@ -37,6 +38,8 @@ export const mapSettingsSchema = z.object({
       wristCoverage: z.number().min(0).max(1).nullable().default(null),
     })
     .prefault({}),
+  /** Figures of standards that distances on the sheet are measured against. */
+  distances: distanceValuesSchema.prefault({}),
 });
 
 export type MapSettings = z.infer<typeof mapSettingsSchema>;

@@ -70,8 +70,7 @@ export const ItemNames = memo(function ItemNames({ items, arms, palette, lengthU
 
 /** How far an item's own points lie from its place, mm. */
 function sizeOf(item: Item): number {
-  const points =
-    'outlineMm' in item ? item.outlineMm : 'pointsMm' in item ? item.pointsMm : [];
+  const points = 'outlineMm' in item ? item.outlineMm : 'pointsMm' in item ? item.pointsMm : [];
   let size = 0;
   for (const [x, y] of points) size = Math.max(size, Math.abs(x), Math.abs(y));
   return size * Math.SQRT2;

@@ -4,6 +4,8 @@ import { Copy, Eye, EyeOff, Lock, LockOpen, Move, Trash2 } from 'lucide-react';
 import { useBoardSheet } from '@/components/sheet/editor/board-context';
 import { SelectionPanel } from '@/components/sheet/editor/selection-panel';
 import { useSelectionCommands } from '@/components/sheet/editor/use-selection-commands';
+import { ProtectiveDeviceFields } from '@/components/sheet/studies/protective-device-fields';
+import { ZoneFields } from '@/components/sheet/studies/zone-fields';
 import { Button } from '@/components/ui/button';
 import { kindWords } from '@/lib/editor/make-items';
 import type { Item } from '@/lib/layout/items';
@@ -97,6 +99,10 @@ function OwnFields({ item }: { readonly item: Item }) {
       return <SectionLineFields item={item} />;
     case 'note':
       return <NoteFields item={item} />;
+    case 'zone':
+      return <ZoneFields item={item} />;
+    case 'protectiveDevice':
+      return <ProtectiveDeviceFields item={item} />;
   }
 }
 

@@ -29,6 +29,18 @@ const GLYPHS: Partial<Record<ToolName, ReactNode>> = {
       <path d="M6 7.5v7M9.5 7.5v7M13 7.5v7M16.5 7.5v7" strokeWidth="0.8" />
     </>
   ),
+  zone: (
+    <>
+      <path d="M3.5 5.5h15v11h-15z" strokeDasharray="3 1.6" />
+      <path d="m4 16 5-10M9 16l5-10M14 16l4-8" strokeWidth="0.8" />
+    </>
+  ),
+  protectiveDevice: (
+    <>
+      <path d="M4 9.6h14M4 12.4h14" stroke="var(--red)" />
+      <path d="M2.5 8.5h3v5h-3zM16.5 8.5h3v5h-3z" fill="var(--red)" stroke="none" />
+    </>
+  ),
   note: <path d="M4 5.5h14M4 9.5h14M4 13.5h9" />,
   sectionLine: (
     <>

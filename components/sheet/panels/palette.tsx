@@ -15,6 +15,8 @@ const PLACED: readonly { tool: ToolName; label: string; shortcut: string }[] = [
   { tool: 'column', label: 'Column', shortcut: 'K' },
   { tool: 'guardLine', label: 'Guard line', shortcut: 'G' },
   { tool: 'walkway', label: 'Walkway', shortcut: 'W' },
+  { tool: 'zone', label: 'Zone', shortcut: 'Z' },
+  { tool: 'protectiveDevice', label: 'Protective device', shortcut: 'L' },
   { tool: 'taskPoint', label: 'Task point', shortcut: 'T' },
   { tool: 'note', label: 'Note', shortcut: 'N' },
 ];
