@@ -1,5 +1,6 @@
 import { settledItems } from '@/lib/layout/attached-dimensions';
 import { boundsOfPoints } from '@/lib/layout/viewport';
+import type { LibraryFixture } from '@/lib/contracts/library-fixtures';
 import type { Item, ItemKind } from '@/lib/layout/items';
 import { put, type Change, type Items } from './changes';
 import { fixtureAt, footprint } from './footprint';
@@ -15,6 +16,7 @@ import {
   newZone,
   type Measured,
 } from './make-items';
+import { copyOfSaved } from './saved-fixtures';
 import { snapSpot, type Snapping } from './snapping';
 import { chosen, type Selection } from './tools/tool';
 
@@ -85,6 +87,17 @@ const levelLine = (xMm: number, yMm: number): [[number, number], [number, number
   [xMm - LINE_MM / 2, yMm],
   [xMm + LINE_MM / 2, yMm],
 ];
+
+/** A copy of a fixture of the library, in the middle of the view. */
+export function placeSavedInView(
+  items: Items,
+  saved: LibraryFixture,
+  { middle, snapping, newId }: Pick<PlaceOrder, 'middle' | 'snapping' | 'newId'>,
+): Placed {
+  const spot = snapSpot(freeSpot(items, middle), snapping, false);
+  const item = copyOfSaved(items, saved, { id: newId(), ...spot }, newId);
+  return { label: `Place ${item.name}`, changes: [put(items, item)], selection: chosen(item.id) };
+}
 
 /** The middle, or the nearest spot to its right where nothing else is placed. */
 function freeSpot(items: Items, middle: PlaceOrder['middle']): PlaceOrder['middle'] {

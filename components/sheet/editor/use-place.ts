@@ -48,6 +48,8 @@ export function usePlace() {
           return panTool();
         case 'select':
         case 'carry':
+        // A fixture of the library is taken in hand with its content, not by name.
+        case 'ownFixture':
         case 'outline':
           return selectTool();
       }
@@ -64,7 +66,7 @@ export function usePlace() {
       placeAtOnce(name: ToolName, armId?: string) {
         const { items, selection, snapping } = sheet.getState();
         const middle = view.middle();
-        if (name === 'select' || name === 'carry' || name === 'outline' || name === 'pan')
+        if (name === 'select' || name === 'carry' || name === 'outline' || name === 'ownFixture' || name === 'pan')
           return sheet.use(name === 'pan' ? panTool() : selectTool());
         if (name === 'plumb') return sheet.hangPlumb({ xMm: Math.round(middle.xMm), yMm: Math.round(middle.yMm) });
         if (name === 'taskPoint') {

@@ -3,9 +3,8 @@
 import { Copy, Eye, EyeOff, Lock, LockOpen, Move, Trash2 } from 'lucide-react';
 import { useBoardSheet } from '@/components/sheet/editor/board-context';
 import { SelectionPanel } from '@/components/sheet/editor/selection-panel';
+import { SaveFixtureButton } from '@/components/sheet/fixture-library/save-fixture-button';
 import { useSelectionCommands } from '@/components/sheet/editor/use-selection-commands';
-import { ProtectiveDeviceFields } from '@/components/sheet/studies/protective-device-fields';
-import { ZoneFields } from '@/components/sheet/studies/zone-fields';
 import { Button } from '@/components/ui/button';
 import { kindWords } from '@/lib/editor/make-items';
 import type { Item } from '@/lib/layout/items';
@@ -17,6 +16,8 @@ import { NoteFields } from './note-fields';
 import { PlaceFields } from './place-fields';
 import { RobotFields } from './robot-fields';
 import { TaskPointFields } from './task-point-fields';
+import { ProtectiveDeviceFields } from '@/components/sheet/studies/protective-device-fields';
+import { ZoneFields } from '@/components/sheet/studies/zone-fields';
 import { useItemEdit } from './use-item-edit';
 
 /** What is chosen, with everything about it that can be typed. */
@@ -83,6 +84,7 @@ function OwnFields({ item }: { readonly item: Item }) {
         <>
           <BlockFields item={item} />
           <TaskPointFields fixture={item} />
+          <SaveFixtureButton fixture={item} />
         </>
       );
     case 'obstacle':

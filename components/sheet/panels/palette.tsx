@@ -1,5 +1,6 @@
 'use client';
 
+import { OwnFixturesRow } from '@/components/sheet/fixture-library/own-fixtures-row';
 import { Menu, MenuHeading, MenuItem } from '@/components/ui/menu';
 import { classNames } from '@/components/ui/class-names';
 import { useBoard, useBoardSheet } from '@/components/sheet/editor/board-context';
@@ -38,6 +39,7 @@ export function Palette() {
       {PLACED.map((entry) => (
         <ToolRow key={entry.tool} {...entry} />
       ))}
+      <OwnFixturesRow className={classNames(ROW, 'py-1')} />
       <h2 className="px-3.5 pt-4 pb-1 text-[0.8125rem] font-medium text-ink-soft">Measure</h2>
       {MEASURES.map((entry) => (
         <ToolRow key={entry.tool} {...entry} />

@@ -1,8 +1,10 @@
 import { floorToItem } from '@/lib/layout/geometry';
+import type { LibraryFixture } from '@/lib/contracts/library-fixtures';
 import type { Item } from '@/lib/layout/items';
 import { fixtureAt } from '../footprint';
 import { put } from '../changes';
 import { newBlock, newColumn, newNote, newRobot, newTaskPoint, newZone, type NewItem } from '../make-items';
+import { copyOfSaved } from '../saved-fixtures';
 import { tidy } from '../snapping';
 
 import { selectTool } from './select';
@@ -76,6 +78,19 @@ function drawingBlock(kind: BlockKind, start: Press): Tool {
     release: (press, view) => placedReply(at(press, view, view.newId()), view),
     cancel: selectTool,
     interrupted: () => blockTool(kind),
+  });
+  return self;
+}
+
+/** A copy of a fixture of the library, with its task points. */
+export function savedFixtureTool(saved: LibraryFixture): Tool {
+  const at = (press: Press, view: View, id: string) =>
+    copyOfSaved(view.items, saved, { id, ...view.snap(press, press) }, view.newId);
+  const self: Tool = state('ownFixture', `Click to place ${saved.name}.`, {
+    busy: true,
+    move: (press, view) => ({ tool: self, draft: { items: [at(press, view, GHOST)] } }),
+    release: (press, view) => placedReply(at(press, view, view.newId()), view),
+    cancel: selectTool,
   });
   return self;
 }

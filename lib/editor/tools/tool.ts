@@ -81,6 +81,7 @@ export type ToolName =
   | 'pan'
   | 'robot'
   | 'fixture'
+  | 'ownFixture'
   | 'obstacle'
   | 'column'
   | 'guardLine'

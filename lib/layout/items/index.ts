@@ -30,6 +30,7 @@ export const itemSchema = z.discriminatedUnion('kind', [
 export type Item = z.infer<typeof itemSchema>;
 export type ItemKind = Item['kind'];
 
+export { itemName as itemNameSchema } from './common';
 export * from './blocks';
 export * from './conveyor';
 export * from './dimension';

@@ -2,7 +2,7 @@ import { randomUUID } from 'node:crypto';
 import sharp from 'sharp';
 import { randomToken } from '@/lib/server/tokens';
 import { dimensionSchema } from '@/lib/layout/items';
-import { armContent, unique, uniqueEmail } from '@/tests/factories';
+import { armContent, fixtureContent, unique, uniqueEmail } from '@/tests/factories';
 import type { CallOptions } from '@/tests/factories';
 import { newQuestion } from './access-world';
 import { newStudyQuestion } from './study-jobs';
@@ -111,6 +111,11 @@ export const TABLE: readonly Row[] = [
   row('GET',    'arms/[armId]/versions',                    [401, 401,  403,  404,     403,   200,  200,   200], arm),
   row('POST',   'arms/[armId]/versions',                    [401, 401,  403,  404,     403,   403,  201,   201], async (world) => ({ params: { armId: (await world.addArm()).id }, body: { ...armContent(), baseVersion: 1 } })),
 
+  row('GET',    'fixtures',                                 [401, 401,  403,  200,     403,   200,  200,   200]),
+  row('POST',   'fixtures',                                 [401, 401,  403,  201,     403,   201,  201,   201], () => ({ body: fixtureContent() })),
+  row('PATCH',  'fixtures/[fixtureId]',                     [401, 401,  403,  404,     403,   200,  200,   200], async (world) => ({ params: { fixtureId: (await world.addLibraryFixture()).id }, body: { name: unique('Fixture') } })),
+  row('DELETE', 'fixtures/[fixtureId]',                     [401, 401,  403,  404,     403,   204,  204,   204], async (world) => ({ params: { fixtureId: (await world.addLibraryFixture()).id } })),
+
   row('GET',    'projects',                                 [401, 401,  200,  200,     200,   200,  200,   200]),
   row('POST',   'projects',                                 [401, 401,  403,  201,     403,   201,  201,   201], () => ({ body: { name: unique('Project') } })),
   row('GET',    'projects/[projectId]',                     [401, 401,  404,  404,     200,   200,  200,   200], project),
@@ -159,6 +164,11 @@ export const TABLE: readonly Row[] = [
   row('POST',   'revisions/[revisionId]/share-links',       [401, 401,  403,  404,     403,   403,  201,   201], withBody(revision, {})),
   row('DELETE', 'share-links/[shareLinkId]',                [401, 401,  403,  404,     403,   403,  200,   200], async (world) => ({ params: { shareLinkId: (await world.addShareLink()).id } })),
   row('PATCH',  'remarks/[remarkId]',                       [401, 401,  403,  404,     403,   200,  200,   200], ({ remarkId }) => ({ params: { remarkId }, body: { resolved: true } })),
+  row('POST',   'remarks/[remarkId]/read',                  [401, 401,  404,  404,     204,   204,  204,   204], ({ remarkId }) => ({ params: { remarkId } })),
+  row('POST',   'remarks/[remarkId]/pictures',              [401, 401,  404,  404,     400,   403,  403,   403], ({ remarkId }) => ({ params: { remarkId }, body: new FormData() })),
+  row('GET',    'remarks/[remarkId]/pictures/[pictureId]',  [401, 401,  404,  404,     404,   404,  404,   404], ({ remarkId }) => ({ params: { remarkId, pictureId: randomUUID() } })),
+  row('GET',    'projects/[projectId]/remarks',             [401, 401,  404,  404,     200,   200,  200,   200], project),
+  row('GET',    'projects/[projectId]/people',              [401, 401,  404,  404,     200,   200,  200,   200], project),
   row('POST',   'remarks/[remarkId]/replies',               [401, 401,  404,  404,     201,   201,  201,   201], ({ remarkId }) => ({ params: { remarkId }, body: { body: 'Yes' } })),
 
   row('GET',    'share/[token]',                            [404, 200,  404,  404,     404,   404,  404,   404], shared()),
@@ -169,6 +179,8 @@ export const TABLE: readonly Row[] = [
   row('GET',    'share/[token]/maps/[mapId]/tiles',         [404, 200,  404,  404,     404,   404,  404,   404], shared(({ mapId }) => ({ mapId }))),
   row('GET',    'share/[token]/remarks',                    [404, 200,  404,  404,     404,   404,  404,   404], shared()),
   row('POST',   'share/[token]/remarks',                    [404, 201,  404,  404,     404,   404,  404,   404], shared(undefined, { ...remark, guest })),
+  row('POST',   'share/[token]/remarks/[remarkId]/pictures', [404, 403, 404,  404,     404,   404,  404,   404], async (world, caller) => ({ ...(await shared(({ remarkId }) => ({ remarkId }))(world, caller)), body: new FormData() })),
+  row('GET',    'share/[token]/remarks/[remarkId]/pictures/[pictureId]', [404, 404, 404, 404, 404, 404, 404, 404], shared(({ remarkId }) => ({ remarkId, pictureId: randomUUID() }))),
   row('POST',   'share/[token]/remarks/[remarkId]/replies', [404, 201,  404,  404,     404,   404,  404,   404], shared(({ remarkId }) => ({ remarkId }), { body: 'Yes', guest })),
   row('GET',    'exports/schema',                           [200, 200,  200,  200,     200,   200,  200,   200]),
   // What was issued; a draft is refused to viewers (exports.test.ts).

@@ -13,6 +13,7 @@ import {
   createArm,
   createFinishedMap,
   createLayout,
+  createLibraryFixture,
   createMember,
   createOrganisation,
   createProject,
@@ -78,6 +79,7 @@ export async function buildAccessWorld() {
     remarkId: remark.id,
     // What a caller may take away is made anew for each of them.
     addArm: () => createArm({ organisationId }),
+    addLibraryFixture: () => createLibraryFixture({ organisationId }),
     addFloorPlan,
     addLayout,
     addShareLink: async () => (await createShareLink({ revisionId: revision.id })).shareLink,
