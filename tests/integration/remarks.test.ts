@@ -80,7 +80,7 @@ describe('a remark', () => {
       replies: [],
     });
     const [seen] = await listed(onRevision, planner, { revisionId });
-    expect(seen).toEqual({ ...remark, author: { ...remark.author, you: false } });
+    expect(seen).toEqual({ ...remark, unread: true, author: { ...remark.author, you: false } });
     expect((await pin(planner, 'Noted.')).author).toEqual({ name: planner.user.name, side: 'integrator', you: true });
   });
 
@@ -102,7 +102,7 @@ describe('a remark', () => {
       [4, 2],
     ]);
     expect((await listed(onRevision, viewer, { revisionId: second.id })).map(({ number }) => number)).toEqual([
-      2, 3, 4,
+      1, 2, 3, 4,
     ]);
   });
 

@@ -9,17 +9,16 @@ export interface Upload {
 
 /** What the multipart form may weigh beside the file itself. */
 const FORM_ALLOWANCE_BYTES = 64 * 1024;
-const BODY_MAX_BYTES = FLOOR_PLAN_MAX_BYTES + FORM_ALLOWANCE_BYTES;
 const NAME_MAX_LENGTH = 120;
 
 /** Passes bytes on until there are too many of them: a Content-Length that lies changes nothing. */
-function limited(body: ReadableStream<Uint8Array>, onExceeded: () => void): ReadableStream<Uint8Array> {
+function limited(body: ReadableStream<Uint8Array>, most: number, onExceeded: () => void): ReadableStream<Uint8Array> {
   let bytes = 0;
   return body.pipeThrough(
     new TransformStream<Uint8Array, Uint8Array>({
       transform(chunk, controller) {
         bytes += chunk.byteLength;
-        if (bytes <= BODY_MAX_BYTES) return controller.enqueue(chunk);
+        if (bytes <= most) return controller.enqueue(chunk);
         onExceeded();
         return controller.error(new Error('Too many bytes'));
       },
@@ -35,26 +34,28 @@ function planName(form: FormData, fileName: string): string {
 }
 
 /**
- * Reads the multipart form of an upload, holding at most 40 MB of it. Throws AppError: `file_too_large` (413),
+ * Reads the multipart form of an upload, holding at most `maxBytes` (40 MB) of the file. Throws AppError: `file_too_large` (413),
  * `upload_broken`, `file_missing` and `file_empty` (400).
  */
-export async function readUpload(request: Request): Promise<Upload> {
+export async function readUpload(request: Request, maxBytes = FLOOR_PLAN_MAX_BYTES): Promise<Upload> {
+  const most = maxBytes + FORM_ALLOWANCE_BYTES;
+  const tooManyBytes = () => refuse.tooManyBytes(maxBytes / 1024 / 1024);
   const contentType = request.headers.get('content-type') ?? '';
   if (!request.body || !contentType.startsWith('multipart/form-data')) throw refuse.missing();
-  if (Number(request.headers.get('content-length') ?? 0) > BODY_MAX_BYTES) throw refuse.tooManyBytes();
+  if (Number(request.headers.get('content-length') ?? 0) > most) throw tooManyBytes();
 
   let exceeded = false;
-  const body = limited(request.body, () => (exceeded = true));
+  const body = limited(request.body, most, () => (exceeded = true));
   let form: FormData;
   try {
     form = await new Response(body, { headers: { 'content-type': contentType } }).formData();
   } catch {
-    throw exceeded ? refuse.tooManyBytes() : refuse.broken();
+    throw exceeded ? tooManyBytes() : refuse.broken();
   }
 
   const file = form.get('file');
   if (!(file instanceof File)) throw refuse.missing();
-  if (file.size > FLOOR_PLAN_MAX_BYTES) throw refuse.tooManyBytes();
+  if (file.size > maxBytes) throw tooManyBytes();
   if (file.size === 0) throw refuse.empty();
   return { bytes: new Uint8Array(await file.arrayBuffer()), name: planName(form, file.name) };
 }

@@ -20,11 +20,11 @@ export const refuse = {
   missing: () => refusal(400, 'file_missing', 'No file came with the request. Choose a PNG, JPEG or WebP file.'),
   broken: () => refusal(400, 'upload_broken', 'The upload broke off. Check your connection and upload the file again.'),
   empty: () => refusal(400, 'file_empty', 'The file is empty (0 bytes). Save the floor plan again and upload it.'),
-  tooManyBytes: () =>
+  tooManyBytes: (limitMb: number) =>
     refusal(
       413,
       'file_too_large',
-      'The file is larger than 40 MB. Save it with fewer pixels, or as JPEG, and try again.',
+      `The file is larger than ${limitMb} MB. Save it with fewer pixels, or as JPEG, and try again.`,
     ),
   type: (found: string | null) =>
     refusal(

@@ -39,6 +39,27 @@ export function composeReply(subject: Subject): Message {
   };
 }
 
+export const assignmentDataSchema = subjectSchema.extend({ dueOn: z.string().nullable() });
+
+export function composeMention(subject: Subject): Message {
+  const { authorName, remarkNumber, projectName } = subject;
+  return {
+    subject: `${authorName} names you in remark ${remarkNumber}: ${projectName}`,
+    paragraphs: [`${authorName} names you in remark ${remarkNumber} on ${placeOf(subject)}.`],
+    ...rest(subject, 'You get this mail because somebody named you in a remark.'),
+  };
+}
+
+export function composeAssignment(subject: z.output<typeof assignmentDataSchema>): Message {
+  const { authorName, remarkNumber, projectName, dueOn } = subject;
+  const until = dueOn ? ` It is due on ${dueOn}.` : '';
+  return {
+    subject: `Remark ${remarkNumber} is yours: ${projectName}`,
+    paragraphs: [`${authorName} gave you remark ${remarkNumber} on ${placeOf(subject)}.${until}`],
+    ...rest(subject, 'You get this mail because a remark was given to you.'),
+  };
+}
+
 function placeOf({ projectName, layoutTitle, revisionNumber }: Subject): string {
   return `${projectName}, layout ${layoutTitle}, revision ${revisionNumber}`;
 }

@@ -3,7 +3,15 @@ import type { Message } from './message';
 import { composeInvitation } from './invitation';
 import { composePasswordReset } from './password-reset';
 import { composeIssue, composeSignOff, composeSignOffReceipt, issueDataSchema, signOffDataSchema } from './revision';
-import { composeRemark, composeReply, remarkDataSchema, replyDataSchema } from './remark';
+import {
+  assignmentDataSchema,
+  composeAssignment,
+  composeMention,
+  composeRemark,
+  composeReply,
+  remarkDataSchema,
+  replyDataSchema,
+} from './remark';
 
 /** The job's own id and whom the mail is for. */
 export interface Envelope {
@@ -30,6 +38,8 @@ export const TEMPLATES = {
   'password-reset': template(z.object({}), composePasswordReset),
   remark: template(remarkDataSchema, composeRemark),
   reply: template(replyDataSchema, composeReply),
+  mention: template(remarkDataSchema, composeMention),
+  assignment: template(assignmentDataSchema, composeAssignment),
   issue: template(issueDataSchema, composeIssue),
   'sign-off': template(signOffDataSchema, composeSignOff),
   'sign-off-receipt': template(signOffDataSchema, composeSignOffReceipt),

@@ -1,5 +1,15 @@
 import { literal, Op, type Includeable, type Transaction, type WhereOptions } from 'sequelize';
-import { Layout, Project, Remark, RemarkReply, Revision, User } from '@/models';
+import {
+  Layout,
+  Project,
+  Remark,
+  RemarkMention,
+  RemarkPicture,
+  RemarkRead,
+  RemarkReply,
+  Revision,
+  User,
+} from '@/models';
 import { notFound } from '../errors';
 import { projectScope, type Actor } from '../policy';
 
@@ -10,6 +20,10 @@ import { projectScope, type Actor } from '../policy';
 export type PlacedRemark = Remark & {
   revision: Revision & { layout: Layout & { project: Project } };
   replies: RemarkReply[];
+  mentions: RemarkMention[];
+  pictures: RemarkPicture[];
+  /** Of the reader only; none for a guest. */
+  reads: RemarkRead[];
 };
 
 /** The letter and name that the remark's readers know the layout by: those of the revision, whatever it is called now. */
@@ -34,25 +48,63 @@ const around = (actor: Actor): Includeable[] => [
   },
   { model: User, as: 'user' },
   { model: RemarkReply, as: 'replies', include: [{ model: User, as: 'user' }] },
+  { model: User, as: 'assignee' },
+  { model: RemarkMention, as: 'mentions', separate: true, include: [{ model: User, as: 'user' }] },
+  { model: RemarkPicture, as: 'pictures', separate: true, order: [['createdAt', 'ASC']] },
+  {
+    model: RemarkRead,
+    as: 'reads',
+    required: false,
+    where: actor.kind === 'member' ? { userId: actor.userId } : literal('false'),
+  },
 ];
 
-/** A guest sees the remarks on the shared revision only. */
-const sharedOnly = (actor: Actor): WhereOptions<Remark> =>
-  actor.kind === 'share' ? { revisionId: actor.revisionId } : {};
+/**
+ * What a reader of one revision has before them: its own remarks, and those that were carried forward to it, which are the
+ * remarks on earlier revisions of the layout that were still open when it was issued.
+ */
+async function seenOn(revisionId: string, transaction?: Transaction): Promise<WhereOptions<Remark>> {
+  const revision = await Revision.findByPk(revisionId, {
+    attributes: ['id', 'layoutId', 'number', 'createdAt'],
+    rejectOnEmpty: true,
+    transaction,
+  });
+  return {
+    [Op.or]: [
+      { revisionId },
+      {
+        layoutId: revision.layoutId,
+        '$revision.number$': { [Op.lt]: revision.number },
+        createdAt: { [Op.lte]: revision.createdAt },
+        resolvedAt: { [Op.or]: [null, { [Op.gt]: revision.createdAt }] },
+      },
+    ],
+  };
+}
+
+/** A guest sees the remarks that belong to the shared revision only. */
+const sharedOnly = async (actor: Actor, transaction?: Transaction): Promise<WhereOptions<Remark>> =>
+  actor.kind === 'share' ? seenOn(actor.revisionId, transaction) : {};
 
 const repliesInOrder: [string, string, string][] = [
   ['replies', 'createdAt', 'ASC'],
   ['replies', 'id', 'ASC'],
 ];
 
-/** Remarks within a layout or a revision, as far as the actor may see them, in the order of their numbers. */
+/** Remarks within a project, a layout or a revision, as far as the actor may see them, in the order of their numbers. */
 export async function listRemarks(
   actor: Actor,
-  within: { layoutId: string } | { revisionId: string },
+  within: { projectId: string } | { layoutId: string } | { revisionId: string },
   transaction?: Transaction,
 ): Promise<PlacedRemark[]> {
+  const place =
+    'revisionId' in within
+      ? await seenOn(within.revisionId, transaction)
+      : 'projectId' in within
+        ? { '$revision.layout.project_id$': within.projectId }
+        : within;
   const remarks = await Remark.findAll({
-    where: { [Op.and]: [within, sharedOnly(actor)] },
+    where: { [Op.and]: [place, await sharedOnly(actor, transaction)] },
     include: around(actor),
     order: [['number', 'ASC'], ...repliesInOrder],
     transaction,
@@ -63,7 +115,8 @@ export async function listRemarks(
 /** The remark if the actor may see it. Throws not_found. */
 export async function findRemark(actor: Actor, remarkId: string, transaction?: Transaction): Promise<PlacedRemark> {
   const remark = await Remark.findOne({
-    where: { [Op.and]: [{ id: remarkId }, sharedOnly(actor)] },
+    // The bare id keeps Sequelize from a limit, and so from a subquery that would not know the revision's columns.
+    where: { id: remarkId, [Op.and]: [await sharedOnly(actor, transaction)] },
     include: around(actor),
     order: repliesInOrder,
     transaction,

@@ -1,6 +1,8 @@
 import type { Transaction } from 'sequelize';
 import { sendMailLater, type TemplateData } from '../mail';
+import type { User } from '@/models';
 import { planningRecipients } from '../members/planning-recipients';
+import type { MemberActor } from '../policy';
 import { writerName, writerSide, type Writer } from './author';
 import { issuedTitle, type PlacedRemark } from './data';
 
@@ -25,6 +27,46 @@ function customerSide(remark: PlacedRemark): Recipient[] {
   });
 }
 
+function subjectOf(
+  remark: PlacedRemark,
+  rest: Pick<TemplateData<'remark'>, 'authorName' | 'body' | 'path'>,
+): TemplateData<'remark'> {
+  return {
+    projectName: remark.revision.layout.project.name,
+    layoutTitle: issuedTitle(remark),
+    revisionNumber: remark.revision.number,
+    remarkNumber: remark.number,
+    ...rest,
+  };
+}
+
+const pathTo = (remark: PlacedRemark): string => `/revisions/${remark.revisionId}?remark=${remark.id}`;
+
+/** Tells the members who are named in what was written. */
+export async function notifyNamed(
+  named: readonly User[],
+  remark: PlacedRemark,
+  { writer, body }: { writer: Writer; body: string },
+  transaction: Transaction,
+): Promise<void> {
+  const data = subjectOf(remark, { authorName: writerName(writer), body, path: pathTo(remark) });
+  for (const { email } of named) await sendMailLater({ to: email, template: 'mention', data }, transaction);
+}
+
+/** Tells a planner that a remark is theirs to deal with now. */
+export async function notifyAssignee(
+  actor: MemberActor,
+  remark: PlacedRemark,
+  transaction: Transaction,
+): Promise<void> {
+  if (!remark.assignee || remark.assignee.id === actor.userId) return;
+  const data = {
+    ...subjectOf(remark, { authorName: actor.name, body: remark.body, path: pathTo(remark) }),
+    dueOn: remark.dueOn,
+  };
+  await sendMailLater({ to: remark.assignee.email, template: 'assignment', data }, transaction);
+}
+
 /**
  * Tells the other side that something was written: the planners of a customer's words, the customer of a planner's answer.
  * Each address gets one mail, and nobody one about their own words.
@@ -32,25 +74,17 @@ function customerSide(remark: PlacedRemark): Recipient[] {
 export async function notifyOtherSide(
   template: 'remark' | 'reply',
   remark: PlacedRemark,
-  { writer, body }: { writer: Writer; body: string },
+  { writer, body, told = [] }: { writer: Writer; body: string; told?: readonly User[] },
   transaction: Transaction,
 ): Promise<void> {
-  const { layout, number } = remark.revision;
   const others = writerSide(writer) === 'customer' ? await plannerSide(remark, transaction) : customerSide(remark);
   const own = 'guest' in writer ? writer.guest.email : writer.actor.email;
+  const already = new Set([own, ...told.map(({ email }) => email)]);
   const byAddress = new Map(
-    others.filter(({ email }) => email !== own).map((recipient) => [recipient.email, recipient]),
+    others.filter(({ email }) => !already.has(email)).map((recipient) => [recipient.email, recipient]),
   );
   for (const { email, path } of byAddress.values()) {
-    const data: TemplateData<typeof template> = {
-      projectName: layout.project.name,
-      layoutTitle: issuedTitle(remark),
-      revisionNumber: number,
-      remarkNumber: remark.number,
-      authorName: writerName(writer),
-      body,
-      path,
-    };
+    const data: TemplateData<typeof template> = subjectOf(remark, { authorName: writerName(writer), body, path });
     await sendMailLater({ to: email, template, data }, transaction);
   }
 }

@@ -6,7 +6,8 @@ import { invalid } from '../errors';
 import { findRevision } from '../revisions/data';
 import { authorColumns, demandMayRemark, readerOf, type Writer } from './author';
 import { findRemark } from './data';
-import { notifyOtherSide } from './notify';
+import { keepMentions } from './mentions';
+import { notifyNamed, notifyOtherSide } from './notify';
 import { presentRemark } from './present';
 
 async function nextNumber(layoutId: string, transaction: Transaction): Promise<number> {
@@ -16,11 +17,14 @@ async function nextNumber(layoutId: string, transaction: Transaction): Promise<n
   return (last ?? 0) + 1;
 }
 
+/** Guests name nobody. */
+type NewRemark = Omit<RemarkRequest, 'mentions'> & Partial<Pick<RemarkRequest, 'mentions'>>;
+
 /** Pins a remark to a revision that the writer can see, and tells the other side of it. */
 export async function postRemark(
   writer: Writer,
   revisionId: string,
-  { xMm, yMm, itemId, body }: RemarkRequest,
+  { xMm, yMm, itemId, body, mentions }: NewRemark,
   outer?: Transaction,
 ): Promise<RemarkAnswer> {
   demandMayRemark(writer);
@@ -34,8 +38,10 @@ export async function postRemark(
       { revisionId, layoutId, number, xMm, yMm, itemId, body, ...authorColumns(writer) },
       { transaction },
     );
+    const named = await keepMentions(writer, { remarkId: id, replyId: null }, mentions ?? [], transaction);
     const remark = await findRemark(writer.actor, id, transaction);
-    await notifyOtherSide('remark', remark, { writer, body }, transaction);
+    await notifyNamed(named, remark, { writer, body }, transaction);
+    await notifyOtherSide('remark', remark, { writer, body, told: named }, transaction);
     return presentRemark(remark, readerOf(writer));
   }, outer);
 }

@@ -4,22 +4,25 @@ import type { Remark as RemarkAnswer } from '@/lib/contracts/remarks';
 import { inTransaction } from '../database';
 import { authorColumns, demandMayRemark, readerOf, type Writer } from './author';
 import { findRemark } from './data';
-import { notifyOtherSide } from './notify';
+import { keepMentions } from './mentions';
+import { notifyNamed, notifyOtherSide } from './notify';
 import { presentRemark } from './present';
 
 /** Answers a remark and tells the other side of it. A settled remark stays settled: whoever settled it reopens it. */
 export async function postReply(
   writer: Writer,
   remarkId: string,
-  { body }: { body: string },
+  { body, mentions = [] }: { body: string; mentions?: string[] },
   outer?: Transaction,
 ): Promise<RemarkAnswer> {
   demandMayRemark(writer);
   return inTransaction(async (transaction) => {
     await findRemark(writer.actor, remarkId, transaction);
-    await RemarkReply.create({ remarkId, body, ...authorColumns(writer) }, { transaction });
+    const reply = await RemarkReply.create({ remarkId, body, ...authorColumns(writer) }, { transaction });
+    const named = await keepMentions(writer, { remarkId, replyId: reply.id }, mentions, transaction);
     const remark = await findRemark(writer.actor, remarkId, transaction);
-    await notifyOtherSide('reply', remark, { writer, body }, transaction);
+    await notifyNamed(named, remark, { writer, body }, transaction);
+    await notifyOtherSide('reply', remark, { writer, body, told: named }, transaction);
     return presentRemark(remark, readerOf(writer));
   }, outer);
 }

@@ -5,4 +5,6 @@ import { sealed, tokenParam } from '@/lib/server/share/sealed';
 
 const params = z.object({ token: tokenParam });
 
-export const GET = sealed(route({ role: 'public', params }, ({ params, request }) => readShared(params.token, request)));
+export const GET = sealed(
+  route({ role: 'public', params }, ({ params, request }) => readShared(params.token, request)),
+);
