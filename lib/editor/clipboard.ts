@@ -1,7 +1,7 @@
 import { z } from 'zod';
+import { withFreshIds, withoutStrangers } from '@/lib/layout/fresh-ids';
 import { itemSchema, type Item } from '@/lib/layout/items';
 import type { Change, Items } from './changes';
-import { withFreshIds, withoutStrangers } from './fresh-ids';
 import { freeName, kindWords } from './make-items';
 import { lastPlace } from './order';
 

@@ -1,8 +1,8 @@
 import { detached, isAttached, settledDimension } from '@/lib/layout/attached-dimensions';
+import { withFreshIds } from '@/lib/layout/fresh-ids';
 import { itemFault } from '@/lib/layout/item-fault';
 import { itemSchema, type Fixture, type Item, type TaskPoint } from '@/lib/layout/items';
 import { put, remove, type Change, type Items } from './changes';
-import { withFreshIds } from './fresh-ids';
 import { freeName, kindWords } from './make-items';
 import { lastPlace } from './order';
 import { normalAngle, tidy } from './snapping';

@@ -1,8 +1,8 @@
 import type { FixtureContent, LibraryFixture } from '@/lib/contracts/library-fixtures';
 import { fixtureContentSchema } from '@/lib/contracts/library-fixtures';
+import { withFreshIds } from '@/lib/layout/fresh-ids';
 import { itemSchema, type Fixture, type Item } from '@/lib/layout/items';
 import type { Items } from './changes';
-import { withFreshIds } from './fresh-ids';
 import type { NewItem } from './make-items';
 import { lastPlace } from './order';
 

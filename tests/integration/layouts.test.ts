@@ -5,7 +5,7 @@ import { GET as list, POST } from '@/app/api/projects/[projectId]/layouts/route'
 import { layoutListSchema, layoutSchema, layoutSummarySchema, type LayoutSummary } from '@/lib/contracts/layouts';
 import { problemSchema } from '@/lib/contracts/common';
 import { rectangleOutline } from '@/lib/layout/geometry';
-import { fixtureSchema, obstacleSchema, type Item } from '@/lib/layout/items';
+import { dimensionSchema, fixtureSchema, obstacleSchema, type Item } from '@/lib/layout/items';
 import { mapSettingsSchema } from '@/lib/layout/map-settings';
 import { Layout, Project } from '@/models';
 import {
@@ -119,6 +119,53 @@ describe('a variant', () => {
       list.flatMap((item) => [item.id, ...(item.kind === 'fixture' ? item.taskPoints.map(({ id }) => id) : [])]);
     expect(idsOf(copies).filter((id) => idsOf(items).includes(id))).toEqual([]);
     expect(sheet.items.every(({ version }) => version === 1)).toBe(true);
+  });
+
+  it('copies what points from one item to another as pointing to the copies', async () => {
+    const arm = await createArm({ organisationId: planner.organisationId });
+    const held = fixture();
+    const [point] = held.kind === 'fixture' ? held.taskPoints : [];
+    const groupId = randomUUID();
+    const robot: Item = {
+      ...(robotItem(arm.id) as Extract<Item, { kind: 'robot' }>),
+      groupId,
+      sequence: [
+        {
+          kind: 'point',
+          id: randomUUID(),
+          fixtureId: held.id,
+          taskPointId: point.id,
+          place: null,
+          motion: 'joint',
+          viaMm: [],
+        },
+      ],
+    };
+    const dimension = dimensionSchema.parse({
+      kind: 'dimension',
+      id: randomUUID(),
+      name: 'Apart',
+      xMm: 0,
+      yMm: 0,
+      angleDeg: 0,
+      fromMm: [0, 0],
+      toMm: [100, 0],
+      fromItemId: robot.id,
+      toItemId: held.id,
+    });
+    const model = await createLayout({ projectId, items: [robot, { ...held, groupId }, dimension] });
+    const sheet = await read((await newLayout(projectId, { name: 'Copy', copyOf: model.id })).id);
+    const copies = sheet.items.map(({ item }) => item);
+    const [robotCopy, fixtureCopy, dimensionCopy] = ['robot', 'fixture', 'dimension'].map((kind) =>
+      copies.find((item) => item.kind === kind),
+    );
+    const pointCopy = fixtureCopy?.kind === 'fixture' ? fixtureCopy.taskPoints[0] : undefined;
+    expect(robotCopy).toMatchObject({
+      groupId: fixtureCopy?.groupId,
+      sequence: [{ fixtureId: fixtureCopy?.id, taskPointId: pointCopy?.id }],
+    });
+    expect(robotCopy?.groupId).not.toBe(groupId);
+    expect(dimensionCopy).toMatchObject({ fromItemId: robotCopy?.id, toItemId: fixtureCopy?.id });
   });
 
   it('is not copied from another project, even one of our own', async () => {

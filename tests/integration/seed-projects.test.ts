@@ -153,7 +153,7 @@ describe('the demo projects', () => {
       return JSON.parse(JSON.stringify([projects, layouts, ...parts])) as object[][];
     };
     const before = await rows();
-    expect(before.map(({ length }) => length)).toEqual([2, 4, 2, 32, 1, 2]);
+    expect(before.map(({ length }) => length)).toEqual([2, 4, 2, 44, 1, 2]);
     await seedProjects(context);
     expect(await rows()).toEqual(before);
   });

@@ -2,7 +2,7 @@ import { randomUUID } from 'node:crypto';
 import type { Transaction } from 'sequelize';
 import { Layout, LayoutItem, type Project } from '@/models';
 import type { LayoutRequest, LayoutSummary } from '@/lib/contracts/layouts';
-import type { Item } from '@/lib/layout/items';
+import { withFreshIds } from '@/lib/layout/fresh-ids';
 import { mapSettingsSchema } from '@/lib/layout/map-settings';
 import { inTransaction } from '../database';
 import { conflict, invalid } from '../errors';
@@ -31,15 +31,10 @@ async function modelLayout(project: Project, layoutId: string, transaction: Tran
   return model;
 }
 
-/** The same thing as another thing: items and their task points have ids of their own in every variant. */
-function copied(item: Item): Item {
-  const copy = { ...item, id: randomUUID() };
-  if (copy.kind !== 'fixture') return copy;
-  return { ...copy, taskPoints: copy.taskPoints.map((point) => ({ ...point, id: randomUUID() })) };
-}
-
 async function copyItems(model: Layout, layout: Layout, transaction: Transaction): Promise<void> {
-  const items = (await storedItemsOf(model.id, transaction)).map(({ item }) => copied(item));
+  // Items and their parts have ids of their own in every variant; what points to another item points to its copy.
+  const originals = (await storedItemsOf(model.id, transaction)).map(({ item }) => item);
+  const items = withFreshIds(originals, randomUUID);
   // One behind another in time, so that the copy lists them in the same order.
   const startMs = Date.now();
   await LayoutItem.bulkCreate(

@@ -1,5 +1,14 @@
+import { randomUUID } from 'node:crypto';
 import { rectangleOutline } from '@/lib/layout/geometry';
-import { dimensionSchema, guardLineSchema, obstacleSchema, walkwaySchema, type Item } from '@/lib/layout/items';
+import {
+  conveyorSchema,
+  dimensionSchema,
+  guardLineSchema,
+  noteSchema,
+  obstacleSchema,
+  walkwaySchema,
+  type Item,
+} from '@/lib/layout/items';
 import type { Hall } from './draw-hall';
 import { at, fixture, robot, type Place } from './items';
 
@@ -35,6 +44,22 @@ export function robotsApart(fromXMm: number, toXMm: number): Item {
     fromMm: [0, 0],
     toMm: [toXMm - fromXMm, 0],
     offsetMm: 370,
+  });
+}
+
+/** How far the cabinet stands off the guard line: it follows the cabinet wherever that goes. */
+function cabinetDepth(cabinet: Item): Item {
+  return dimensionSchema.parse({
+    kind: 'dimension',
+    name: 'Cabinet depth',
+    ...at([850, 3850, 0]),
+    fromMm: [0, 0],
+    toMm: [500, 0],
+    offsetMm: 250,
+    fromItemId: cabinet.id,
+    fromAnchorMm: [-250, 450],
+    toItemId: cabinet.id,
+    toAnchorMm: [250, 450],
   });
 }
 
@@ -85,14 +110,15 @@ function stations(): Item[] {
 }
 
 function surroundings(): Item[] {
+  const cabinet = obstacleSchema.parse({
+    kind: 'obstacle',
+    name: 'Control cabinet',
+    ...at([1100, 3400, 0]),
+    outlineMm: rectangleOutline(500, 900),
+    zToMm: 2000,
+  });
   return [
-    obstacleSchema.parse({
-      kind: 'obstacle',
-      name: 'Control cabinet',
-      ...at([1100, 3400, 0]),
-      outlineMm: rectangleOutline(500, 900),
-      zToMm: 2000,
-    }),
+    cabinet,
     guardLineSchema.parse({
       kind: 'guardLine',
       name: 'Perimeter guard',
@@ -104,6 +130,7 @@ function surroundings(): Item[] {
         [0, 3910],
       ],
       heightMm: 2000,
+      doors: [{ id: randomUUID(), name: 'Service door', alongMm: 12_010, widthMm: 700, kind: 'hinged-out' }],
     }),
     walkwaySchema.parse({
       kind: 'walkway',
@@ -115,6 +142,35 @@ function surroundings(): Item[] {
       ],
       widthMm: 1200,
     }),
+    conveyorSchema.parse({
+      kind: 'conveyor',
+      name: 'Infeed belt',
+      ...at([1000, 5340, 0]),
+      pointsMm: [
+        [0, 0],
+        [1560, 0],
+      ],
+      widthMm: 420,
+      zFromMm: 560,
+      zToMm: 780,
+      speedMmS: 180,
+    }),
+    obstacleSchema.parse({
+      kind: 'obstacle',
+      form: 'column',
+      name: 'Column B3',
+      ...at([7950, 5000, 0]),
+      outlineMm: rectangleOutline(300, 300),
+      zToMm: 5200,
+    }),
+    noteSchema.parse({
+      kind: 'note',
+      name: 'Note on the belt',
+      ...at([900, 6000, 0]),
+      text: 'Housings in,\none every 40 s',
+      sizeMm: 90,
+    }),
+    cabinetDepth(cabinet),
   ];
 }
 

@@ -42,7 +42,7 @@ async function addProject({ planner }: SeedContext['brackwater'], transaction: T
   const turnedIn = (items: Item[]): Item[] =>
     items.flatMap((item): Item[] => {
       if (isRobot(item, 'R2')) return [moved(item, r2TurnedIn)];
-      if (item.kind === 'dimension') return [{ ...item, toMm: [r2TurnedIn[0] - r1[0], 0] }];
+      if (item.kind === 'dimension' && item.name === 'Robots apart') return [{ ...item, toMm: [r2TurnedIn[0] - r1[0], 0] }];
       return [];
     });
   await addVariantFrom(planner, b, 'R2 turned in', turnedIn, transaction);

@@ -71,6 +71,7 @@ export class SheetServer {
       ),
       http.get(`${layout}/remarks`, () => HttpResponse.json({ remarks: this.remarks })),
       http.get('*/api/arms', () => HttpResponse.json({ arms: [ARM] })),
+      http.get('*/api/fixtures', () => HttpResponse.json({ fixtures: [] })),
       http.get(`*/api/projects/${this.projectId}/floor-plans`, () => HttpResponse.json({ floorPlans: [] })),
       http.post('*/api/maps', async ({ request }) => {
         this.mapQuestions.push(await request.json());

@@ -1,4 +1,4 @@
-import type { Item } from '@/lib/layout/items';
+import type { Item } from './items';
 
 type Plain = null | boolean | number | string | undefined | readonly Plain[] | { readonly [key: string]: Plain };
 
