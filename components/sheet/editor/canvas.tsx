@@ -14,6 +14,9 @@ import {
   SheetStage,
   TaskWorkLayer,
 } from '@/components/sheet/drawing';
+import { StandingLegend } from '@/components/sheet/studies/standing-legend';
+import { StudyMarks } from '@/components/sheet/studies/study-marks';
+import { useStandingOnFloor } from '@/components/sheet/studies/use-standing-map';
 import { useLayers } from '@/lib/client/use-layers';
 import { useUnits } from '@/lib/client/use-units';
 import { inOrder } from '@/lib/editor/order';
@@ -48,6 +51,7 @@ export function Canvas() {
   const layers = useLayers();
   const { unit } = useUnits();
   usePlanPoints();
+  const standing = useStandingOnFloor();
   const pointer = useToolPointer();
   const box = useRef<HTMLDivElement>(null);
   useMeasuredAndFitted(box);
@@ -104,11 +108,11 @@ export function Canvas() {
         >
           <GroundLayer>
             <MapLayer
-              map={floorMap}
+              map={standing?.map ?? floorMap}
               scale={look.scale}
-              range={look.range}
-              threshold={measure === 'reach' ? null : thresholds[measure]}
-              isoLines={isDragging || isLive ? null : look.isoLines}
+              range={standing?.range ?? look.range}
+              threshold={standing || measure === 'reach' ? null : thresholds[measure]}
+              isoLines={standing || isDragging || isLive ? null : look.isoLines}
               showsBranches={!isDragging && !isLive}
               opacity={layers.map}
             />
@@ -140,6 +144,7 @@ export function Canvas() {
                 onGripPointerDown={pointer.onGrip}
               />
             )}
+            <StudyMarks />
             <PlumbMarks />
             <DraftMarks />
             <OtherPlanners />
@@ -147,6 +152,7 @@ export function Canvas() {
           </OverlayLayer>
         </SheetStage>
       )}
+      <StandingLegend />
       {tool.name !== 'select' && (
         <p
           role="status"

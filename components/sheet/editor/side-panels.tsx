@@ -4,6 +4,8 @@ import type { ComponentType } from 'react';
 import { Inspector } from '@/components/sheet/panels/inspector';
 import { PlumbPanel } from '@/components/sheet/panels/plumb-panel';
 import { VerdictTable } from '@/components/sheet/panels/verdict-table';
+import { DistancesPanel } from '@/components/sheet/studies/distances-panel';
+import { StudiesPanel } from '@/components/sheet/studies/studies-panel';
 import { BoardRemarks, useOpenRemarks } from './board-remarks';
 import { NARROW, useMedia } from './use-media';
 
@@ -25,6 +27,8 @@ export const SIDE_PANELS: readonly SidePanel[] = [
   { id: 'values', label: 'Values', Panel: Values, isReading: true },
   { id: 'plumb', label: 'Plumb', Panel: PlumbPanel, isReading: true },
   { id: 'points', label: 'Points', Panel: VerdictTable, isReading: true },
+  { id: 'studies', label: 'Studies', Panel: StudiesPanel },
+  { id: 'distances', label: 'Distances', Panel: DistancesPanel },
   { id: 'remarks', label: 'Remarks', Panel: BoardRemarks, useWaiting: useOpenRemarks },
 ];
 

@@ -1,6 +1,7 @@
 'use client';
 
 import { useBoard } from '@/components/sheet/editor/board-context';
+import { JointStopFields } from '@/components/sheet/studies/joint-stop-fields';
 import { Field } from '@/components/ui/field';
 import { Select } from '@/components/ui/select';
 import { toolSchema, type Robot } from '@/lib/layout/items';
@@ -84,6 +85,7 @@ export function RobotFields({ robot }: { readonly robot: Robot }) {
           ))}
         </div>
       </details>
+      <JointStopFields robot={robot} />
     </>
   );
 }

@@ -131,6 +131,16 @@ function rowAt(
 
 const withoutTool = (links: Links): Links => ({ ...links, count: links.count - 1 });
 
+/** Every posture of a robot's work, those along its moves included; none without a robot. */
+export function wayPostures(working: WorkingRobot | undefined): (readonly number[])[] {
+  if (!working) return [];
+  const stood = standRobot(working);
+  return working.postures.flatMap((posture, index) => {
+    const next = working.postures[index + 1];
+    return [posture.joints, ...(next ? wayBetween(stood, posture, next) : [])];
+  });
+}
+
 /** Postures along a move in joint space, close enough together that no part of the arm comes farther than MOVE_STEP_MM. */
 function* wayBetween({ chain, reachM }: Stood, from: WorkPosture, to: WorkPosture): Generator<readonly number[]> {
   const way = from.joints.map((value, k) => {

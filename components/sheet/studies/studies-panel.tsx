@@ -1,0 +1,16 @@
+'use client';
+
+import { ClearanceSection } from './clearance-section';
+import { StandingSection } from './standing-section';
+import { ToleranceSection } from './tolerance-section';
+
+/** Questions about the arrangement that take longer than a drag. */
+export function StudiesPanel() {
+  return (
+    <>
+      <StandingSection />
+      <ToleranceSection />
+      <ClearanceSection />
+    </>
+  );
+}
