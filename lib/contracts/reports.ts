@@ -60,9 +60,9 @@ export const reportInputSchema = z.object({
   signatures: z.array(
     z.object({
       decision: z.enum(['accepted', 'changes_requested']),
+      /** Without the address: a report goes farther than the people whom it concerns. */
       name: z.string(),
-      email: z.string(),
-      comment: z.string(),
+      note: z.string(),
       sha256: z.string(),
       signedAt: timestampSchema,
     }),

@@ -13,5 +13,8 @@ interface AuditEntry {
 /** Writes down who did what, in the transaction of the deed: both are kept or neither is. */
 export async function recordAudit(actor: Actor, entry: AuditEntry, transaction: Transaction): Promise<void> {
   const who = actor.kind === 'member' ? { userId: actor.userId } : { shareLinkId: actor.shareLinkId };
-  await AuditEvent.create({ organisationId: actor.organisationId, ...who, ...entry }, { transaction });
+  // A program's deed is its owner's, but the reader must be able to tell the two apart.
+  const token = actor.kind === 'member' && actor.apiToken ? { apiTokenId: actor.apiToken.id } : null;
+  const details = { ...entry.details, ...token };
+  await AuditEvent.create({ organisationId: actor.organisationId, ...who, ...entry, details }, { transaction });
 }

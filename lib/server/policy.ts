@@ -14,6 +14,8 @@ export interface MemberActor {
   email: string;
   /** The projects a viewer may look at; null for every other role, which sees all of its organisation. */
   projectIds: string[] | null;
+  /** Set where a program acts for them, under one of their API tokens. */
+  apiToken?: { id: string; readOnly: boolean };
 }
 
 /** Somebody who came by a share link: one revision of one project, and nothing else. */
@@ -33,6 +35,11 @@ const ROLE_ORDER: readonly Role[] = ['viewer', 'planner', 'integrator', 'admin']
 
 export function roleIsAtLeast(role: Role, least: Role): boolean {
   return ROLE_ORDER.indexOf(role) >= ROLE_ORDER.indexOf(least);
+}
+
+/** The lesser of two roles. */
+export function lesserRole(one: Role, other: Role): Role {
+  return roleIsAtLeast(one, other) ? other : one;
 }
 
 /** True for a member of at least that role; never for a share link. */

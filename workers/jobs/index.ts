@@ -1,4 +1,4 @@
-import { mailJob, mapTileJob, studySliceJob, type JobDefinition } from '@/lib/server/jobs';
+import { mailJob, mapTileJob, reportJob, studySliceJob, type JobDefinition } from '@/lib/server/jobs';
 import type { JobHandler } from './handler';
 
 interface Registration {
@@ -24,5 +24,6 @@ export const REGISTRATIONS: readonly Registration[] = [
     pollSeconds: 0.5,
     load: async () => (await import('./study-slice')).handler,
   },
+  { definition: reportJob, atOnce: 1, pollSeconds: 1, load: async () => (await import('./report')).handler },
   { definition: mailJob, atOnce: 2, pollSeconds: 1, load: async () => (await import('./mail')).handler },
 ];

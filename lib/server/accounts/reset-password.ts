@@ -1,5 +1,5 @@
 import { Op } from 'sequelize';
-import { PasswordReset, User } from '@/models';
+import { AuditEvent, Membership, PasswordReset, User } from '@/models';
 import { inTransaction } from '../database';
 import { linkNotValid } from '../errors';
 import { hashPassword } from '../passwords';
@@ -24,5 +24,10 @@ export async function resetPassword(token: string, password: string): Promise<vo
     await PasswordReset.update({ usedAt: new Date() }, { where, transaction });
     await User.update({ passwordHash }, { where: { id: reset.userId }, transaction });
     await User.increment('sessionGeneration', { where: { id: reset.userId }, transaction });
+    const { userId } = reset;
+    const membership = await Membership.findOne({ where: { userId }, transaction });
+    if (!membership) return;
+    const { organisationId } = membership;
+    await AuditEvent.create({ organisationId, userId, action: 'account.password_reset' }, { transaction });
   });
 }

@@ -31,7 +31,7 @@ export async function handedSheet(
     if (subject === 'revisions') {
       const revision = await findRevision(actor, subjectId, transaction);
       const { layoutId, snapshot, layout } = revision;
-      const summary = presentRevisionSummary(revision, layout.projectId);
+      const summary = presentRevisionSummary(actor, revision, layout.projectId);
       return { projectId: layout.projectId, layoutId, snapshot, revision: summary };
     }
     demandRole(actor, 'planner');

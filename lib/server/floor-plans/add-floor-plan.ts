@@ -2,6 +2,7 @@ import { randomUUID } from 'node:crypto';
 import type { Transaction } from 'sequelize';
 import { FloorPlan } from '@/models';
 import type { FloorPlan as FloorPlanAnswer } from '@/lib/contracts/floor-plans';
+import { recordAudit } from '../audit';
 import { inTransaction } from '../database';
 import { deleteObjects, putObject } from '../object-store';
 import type { MemberActor } from '../policy';
@@ -41,25 +42,24 @@ export async function addFloorPlan(
   const objectPrefix = `floor-plans/${project.organisationId}/${id}`;
   const keys = await storePictures(objectPrefix, picture);
   try {
-    const floorPlan = await inTransaction(
-      (transaction) =>
-        FloorPlan.create(
-          {
-            id,
-            projectId,
-            name,
-            widthPx: picture.widthPx,
-            heightPx: picture.heightPx,
-            objectPrefix,
-            originalMediaType: picture.mediaType,
-            originalBytes: bytes.byteLength,
-            pictureWidths: picture.renditions.map(({ widthPx }) => widthPx),
-            createdBy: actor.userId,
-          },
-          { transaction },
-        ),
-      outer,
-    );
+    const floorPlan = await inTransaction(async (transaction) => {
+      await recordAudit(actor, { action: 'floor_plan.added', subjectId: id, details: { name } }, transaction);
+      return FloorPlan.create(
+        {
+          id,
+          projectId,
+          name,
+          widthPx: picture.widthPx,
+          heightPx: picture.heightPx,
+          objectPrefix,
+          originalMediaType: picture.mediaType,
+          originalBytes: bytes.byteLength,
+          pictureWidths: picture.renditions.map(({ widthPx }) => widthPx),
+          createdBy: actor.userId,
+        },
+        { transaction },
+      );
+    }, outer);
     return presentFloorPlan(floorPlan);
   } catch (error) {
     await deleteObjects(keys).catch(() => undefined);

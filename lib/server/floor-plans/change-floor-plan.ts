@@ -2,6 +2,7 @@ import type { Transaction } from 'sequelize';
 import type { FloorPlan as FloorPlanAnswer, FloorPlanChange } from '@/lib/contracts/floor-plans';
 import { calibrate, CalibrationFault } from '@/lib/layout/calibrate';
 import type { Calibration, CalibrationRequest } from '@/lib/layout/calibration';
+import { recordAudit } from '../audit';
 import { inTransaction } from '../database';
 import { invalid } from '../errors';
 import type { MemberActor } from '../policy';
@@ -29,6 +30,11 @@ export async function changeFloorPlan(
     if (name !== undefined) floorPlan.name = name;
     if (calibration !== undefined) floorPlan.calibration = calibration && calibrated(calibration);
     await floorPlan.save({ transaction });
+    const details = {
+      ...(name !== undefined && { name }),
+      ...(calibration !== undefined && { scaled: calibration !== null }),
+    };
+    await recordAudit(actor, { action: 'floor_plan.changed', subjectId: floorPlanId, details }, transaction);
     return presentFloorPlan(floorPlan);
   }, outer);
 }

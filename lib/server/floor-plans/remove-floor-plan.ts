@@ -1,4 +1,5 @@
 import type { FloorPlan } from '@/models';
+import { recordAudit } from '../audit';
 import { inTransaction } from '../database';
 import { conflict } from '../errors';
 import { deleteObjects } from '../object-store';
@@ -29,6 +30,8 @@ export async function removeFloorPlan(actor: MemberActor, floorPlanId: string): 
     const floorPlan = await findFloorPlan(actor, floorPlanId, transaction, { lock: true });
     refuseUsed(await usesOf(floorPlan, transaction));
     await floorPlan.destroy({ transaction });
+    const details = { name: floorPlan.name };
+    await recordAudit(actor, { action: 'floor_plan.removed', subjectId: floorPlanId, details }, transaction);
     return floorPlan;
   });
   // Only once the row is gone for good: a rollback must find its pictures where they were.

@@ -1,11 +1,12 @@
 import { randomUUID } from 'node:crypto';
 import type { z } from 'zod';
 import type { Role } from '@/lib/contracts/common';
-import { unauthenticated } from '../errors';
+import { AppError, unauthenticated } from '../errors';
 import { logger } from '../logger';
 import { demandRole } from '../policy';
 import type { MemberActor } from '../policy';
 import { readActor } from '../session';
+import { readBearer } from '../session/bearer';
 import { answer } from './answer';
 import { parseInput, parseParams, readJson } from './input';
 import { problemResponse, toAppError } from './problem';
@@ -44,12 +45,13 @@ export function route<
   Q extends Schema = undefined,
   B extends BodyOption = undefined,
 >(options: RouteOptions<R, P, Q, B>, handle: (context: RouteContext<R, P, Q, B>) => Promise<unknown>) {
-  return async (request: Request, context?: { params: Promise<object> }): Promise<Response> => {
+  const handler = async (request: Request, context?: { params: Promise<object> }): Promise<Response> => {
     const requestId = randomUUID();
     const startedAt = performance.now();
     let response: Response;
     try {
-      demandSameOrigin(request);
+      // A browser adds a cookie by itself, an Authorization header never: only the cookie needs the page's word.
+      if (readBearer(request) === null) demandSameOrigin(request);
       const actor = options.role === 'public' ? null : await demandActor(request, options.role);
       const params = options.params && parseParams(options.params, await context?.params);
       const query = options.query && parseInput(options.query, Object.fromEntries(new URL(request.url).searchParams));
@@ -71,13 +73,21 @@ export function route<
     );
     return response;
   };
+  // Says what it takes, so that the OpenAPI document can be held against it.
+  return Object.assign(handler, { takes: options });
 }
 
 async function demandActor(request: Request, role: Role): Promise<MemberActor> {
   const actor = await readActor(request);
   if (!actor) throw unauthenticated();
+  if (actor.apiToken?.readOnly && request.method !== 'GET') throw readOnlyToken();
   demandRole(actor, role);
   return actor;
+}
+
+function readOnlyToken(): AppError {
+  const detail = 'This token may only read. Make one that may change things, under API tokens in the account menu.';
+  return new AppError({ status: 403, code: 'token_read_only', detail });
 }
 
 /** Tokens of share, invitation and reset links are keys: they stay out of the log. */

@@ -1,6 +1,7 @@
 import type { Transaction } from 'sequelize';
 import { FloorPlan } from '@/models';
 import type { LayoutChange, LayoutSummary } from '@/lib/contracts/layouts';
+import { recordAudit } from '../audit';
 import { inTransaction } from '../database';
 import { invalid } from '../errors';
 import type { MemberActor } from '../policy';
@@ -28,6 +29,12 @@ export async function changeLayout(
     if (floorPlanId !== undefined) layout.floorPlanId = floorPlanId;
     if (mapSettings !== undefined) layout.mapSettings = mapSettings;
     await layout.save({ transaction });
+    const details = {
+      ...(name !== undefined && { name }),
+      ...(floorPlanId !== undefined && { floorPlanId }),
+      ...(mapSettings !== undefined && { mapQuestion: true }),
+    };
+    await recordAudit(actor, { action: 'layout.changed', subjectId: layoutId, details }, transaction);
     return summaryOf(actor, layout, transaction);
   }, outer);
 }

@@ -4,6 +4,7 @@ import { Layout, LayoutItem, type Project } from '@/models';
 import type { LayoutRequest, LayoutSummary } from '@/lib/contracts/layouts';
 import { withFreshIds } from '@/lib/layout/fresh-ids';
 import { mapSettingsSchema } from '@/lib/layout/map-settings';
+import { recordAudit } from '../audit';
 import { inTransaction } from '../database';
 import { conflict, invalid } from '../errors';
 import type { MemberActor } from '../policy';
@@ -74,6 +75,8 @@ export async function createLayout(
       { transaction },
     );
     if (model) await copyItems(model, layout, transaction);
+    const details = { letter: layout.letter, name, ...(copyOf && { copyOf }) };
+    await recordAudit(actor, { action: 'layout.created', subjectId: layout.id, details }, transaction);
     return summaryOf(actor, layout, transaction);
   }, outer);
 }

@@ -7,6 +7,7 @@ import { inTransaction } from '../database';
 import { conflict, invalidFields, type AppError } from '../errors';
 import type { MemberActor } from '../policy';
 import { findLayout } from './data';
+import { recordEditing } from './record-editing';
 import { countItems, holdItems, storeItems } from './item-rows';
 
 /** Keeps a sheet within what browsers draw and snapshots hold. */
@@ -112,6 +113,7 @@ export async function editLayout(
       },
       { transaction },
     );
+    await recordEditing(actor, layout, transaction);
     return result;
   }, outer);
 }

@@ -1,5 +1,6 @@
 import type { Transaction } from 'sequelize';
 import { Revision } from '@/models';
+import { recordAudit } from '../audit';
 import { inTransaction } from '../database';
 import { conflict } from '../errors';
 import type { MemberActor } from '../policy';
@@ -17,5 +18,7 @@ export async function removeLayout(actor: MemberActor, layoutId: string, outer?:
       );
     }
     await layout.destroy({ transaction });
+    const details = { letter: layout.letter, name: layout.name };
+    await recordAudit(actor, { action: 'layout.removed', subjectId: layoutId, details }, transaction);
   }, outer);
 }

@@ -1,6 +1,7 @@
 import type { Transaction } from 'sequelize';
 import { Project } from '@/models';
 import type { Project as ProjectAnswer, ProjectRequest } from '@/lib/contracts/projects';
+import { recordAudit } from '../audit';
 import { inTransaction } from '../database';
 import type { MemberActor } from '../policy';
 import { findCountedProject } from './data';
@@ -15,6 +16,11 @@ export async function createProject(
     const { id } = await Project.create(
       { ...request, organisationId: actor.organisationId, createdBy: actor.userId },
       { transaction },
+    );
+    await recordAudit(
+      actor,
+      { action: 'project.created', subjectId: id, details: { name: request.name } },
+      transaction,
     );
     return presentProject(await findCountedProject(actor, id, transaction));
   }, outer);

@@ -1,6 +1,7 @@
 import type { Transaction } from 'sequelize';
 import { Remark } from '@/models';
 import type { Remark as RemarkAnswer, RemarkChange } from '@/lib/contracts/remarks';
+import { recordAudit } from '../audit';
 import { inTransaction } from '../database';
 import { invalid } from '../errors';
 import type { MemberActor } from '../policy';
@@ -44,6 +45,8 @@ export async function changeRemark(
     }
     const remark = await findRemark(actor, remarkId, transaction);
     if (assigneeId && assigneeId !== before.assigneeId) await notifyAssignee(actor, remark, transaction);
+    const details = { resolved, assigneeId, dueOn };
+    await recordAudit(actor, { action: 'remark.changed', subjectId: remarkId, details }, transaction);
     return presentRemark(remark, { actor });
   }, outer);
 }

@@ -1,6 +1,7 @@
 import type { Transaction } from 'sequelize';
 import { Layout, Remark } from '@/models';
 import type { Remark as RemarkAnswer, RemarkRequest } from '@/lib/contracts/remarks';
+import { recordAudit } from '../audit';
 import { inTransaction } from '../database';
 import { invalid } from '../errors';
 import { findRevision } from '../revisions/data';
@@ -42,6 +43,7 @@ export async function postRemark(
     const remark = await findRemark(writer.actor, id, transaction);
     await notifyNamed(named, remark, { writer, body }, transaction);
     await notifyOtherSide('remark', remark, { writer, body, told: named }, transaction);
+    await recordAudit(writer.actor, { action: 'remark.posted', subjectId: id, details: { revisionId } }, transaction);
     return presentRemark(remark, readerOf(writer));
   }, outer);
 }

@@ -1,6 +1,7 @@
 import type { Transaction } from 'sequelize';
 import { RemarkReply } from '@/models';
 import type { Remark as RemarkAnswer } from '@/lib/contracts/remarks';
+import { recordAudit } from '../audit';
 import { inTransaction } from '../database';
 import { authorColumns, demandMayRemark, readerOf, type Writer } from './author';
 import { findRemark } from './data';
@@ -23,6 +24,7 @@ export async function postReply(
     const remark = await findRemark(writer.actor, remarkId, transaction);
     await notifyNamed(named, remark, { writer, body }, transaction);
     await notifyOtherSide('reply', remark, { writer, body, told: named }, transaction);
+    await recordAudit(writer.actor, { action: 'remark.answered', subjectId: remarkId }, transaction);
     return presentRemark(remark, readerOf(writer));
   }, outer);
 }

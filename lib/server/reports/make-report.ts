@@ -22,8 +22,6 @@ export interface MadeReport {
   readonly pages: number;
 }
 
-/** Steps that `onProgress` counts. */
-export const REPORT_STEPS = 4;
 /** More pages of plan than this are a wall and no report. */
 const PLAN_PAGES_MAX = 40;
 const PNG_DOTS_PER_INCH = 200;

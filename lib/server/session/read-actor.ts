@@ -1,6 +1,9 @@
 import { Membership, ProjectViewer, User } from '@/models';
 import type { MemberActor } from '../policy';
+import { actorOfToken } from '../api-tokens/actor-of-token';
+import { readBearer } from './bearer';
 import { readSessionCookie } from './cookie';
+import { presentActor } from './present-actor';
 import { decodeSession } from './token';
 
 /**
@@ -8,6 +11,9 @@ import { decodeSession } from './token';
  * role or given a new password is out with their next request, however long their cookie would last.
  */
 export async function readActor(request: Request): Promise<MemberActor | null> {
+  // A request that names a token is judged by it alone: a wrong one must not fall back on whoever is signed in.
+  const bearer = readBearer(request);
+  if (bearer !== null) return actorOfToken(bearer);
   const cookie = readSessionCookie(request);
   const claims = cookie && (await decodeSession(cookie));
   if (!claims) return null;
@@ -19,20 +25,4 @@ export async function readActor(request: Request): Promise<MemberActor | null> {
     ],
   });
   return membership && presentActor(membership);
-}
-
-function presentActor(membership: Membership): MemberActor {
-  const { id, userId, organisationId, role, user, projectViewers } = membership;
-  if (!user) throw new Error('A membership was read without its user');
-  const projectIds = role === 'viewer' ? (projectViewers ?? []).map((viewer) => viewer.projectId) : null;
-  return {
-    kind: 'member',
-    userId,
-    membershipId: id,
-    organisationId,
-    role,
-    name: user.name,
-    email: user.email,
-    projectIds,
-  };
 }

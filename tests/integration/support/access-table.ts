@@ -1,5 +1,9 @@
 import { randomUUID } from 'node:crypto';
 import sharp from 'sharp';
+import { createToken } from '@/lib/server/api-tokens/tokens';
+import { askReport } from '@/lib/server/reports/ask-report';
+import { failReport } from '@/lib/server/reports/fail-report';
+import { reportOptionsSchema } from '@/lib/contracts/reports';
 import { randomToken } from '@/lib/server/tokens';
 import { dimensionSchema } from '@/lib/layout/items';
 import { armContent, fixtureContent, unique, uniqueEmail } from '@/tests/factories';
@@ -78,6 +82,13 @@ const png = () =>
     .png()
     .toBuffer();
 
+/** One that has failed: those under way are counted, and there are many callers. */
+const report: Prepare = async ({ callers, revisionId }) => {
+  const options = reportOptionsSchema.parse({});
+  const { id } = await askReport(callers.integrator.actor, { subject: 'revisions', subjectId: revisionId, options });
+  await failReport({ reportId: id, attempt: 1 }, 'No.');
+  return { params: { reportId: id } };
+};
 const layoutFile = {
   format: 'elbowroom-layout',
   version: 1,
@@ -186,4 +197,18 @@ export const TABLE: readonly Row[] = [
   // What was issued; a draft is refused to viewers (exports.test.ts).
   row('GET',    'exports/[subject]/[subjectId]/[file]',     [401, 401,  404,  404,     200,   200,  200,   200], ({ revisionId }) => ({ params: { subject: 'revisions', subjectId: revisionId, file: 'layout.dxf' } })),
   row('POST',   'projects/[projectId]/import',              [401, 401,  403,  404,     403,   201,  201,   201], withBody(project, layoutFile)),
+  row('GET',    'reports',                                  [401, 401,  404,  404,     200,   200,  200,   200], ({ revisionId }) => ({ path: `/?subject=revisions&subjectId=${revisionId}` })),
+  row('POST',   'reports',                                  [401, 401,  404,  404,     202,   202,  202,   202], ({ revisionId }) => ({ body: { subject: 'revisions', subjectId: revisionId } })),
+  row('GET',    'reports/[reportId]',                       [401, 401,  404,  404,     200,   200,  200,   200], report),
+  row('DELETE', 'reports/[reportId]',                       [401, 401,  404,  404,     403,   403,  204,   204], report),
+  row('POST',   'reports/[reportId]/retry',                 [401, 401,  404,  404,     200,   200,  200,   200], report),
+  // Nobody has made it yet (reports.test.ts makes some).
+  row('GET',    'reports/[reportId]/file',                  [401, 401,  404,  404,     409,   409,  409,   409], report),
+
+  row('GET',    'tokens',                                   [401, 401,  200,  200,     200,   200,  200,   200]),
+  row('POST',   'tokens',                                   [401, 401,  201,  201,     201,   201,  201,   201], () => ({ body: { name: 'Nightly export', role: 'viewer' } })),
+  row('DELETE', 'tokens/[tokenId]',                         [401, 401,  404,  404,     404,   200,  404,   200], async ({ callers }) => ({ params: { tokenId: (await createToken(callers.planner.actor, { name: 'Mine', role: 'viewer', readOnly: true, expiresInDays: 1 })).id } })),
+  row('GET',    'audit',                                    [401, 401,  403,  200,     403,   403,  403,   200]),
+  row('GET',    'audit/csv',                                [401, 401,  403,  200,     403,   403,  403,   200]),
+  row('GET',    'openapi',                                  [200, 200,  200,  200,     200,   200,  200,   200]),
 ];

@@ -27,10 +27,10 @@ export function certificatePage(flow: Flow, { sheet, signatures }: ReportInput):
       colour: accepted ? PRINT_PALETTE.green : PRINT_PALETTE.red,
     });
     flow.facts([
-      ['By', `${signature.name} <${signature.email}>`],
+      ['By', signature.name],
       ['On', moment(signature.signedAt)],
       ['SHA-256 of what was seen', signature.sha256],
-      ['Note', signature.comment],
+      ['Note', signature.note],
     ]);
   }
   flow.paragraph(
