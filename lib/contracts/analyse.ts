@@ -56,6 +56,8 @@ export const mapRequestSchema = z
       columns: z.number().int().min(1).max(MAX_CELLS),
       rows: z.number().int().min(1).max(MAX_CELLS),
     }),
+    /** Upright: columns level along this bearing (rad) from the origin, rows up from the tool height. */
+    section: z.object({ bearing: coordinate }).optional(),
     toolHeight: coordinate,
     direction: z
       .discriminatedUnion('kind', [

@@ -111,7 +111,12 @@ export interface MapCone {
 
 export interface MapRequest {
   readonly grid: MapGrid;
-  /** Height of the tool point (m). */
+  /**
+   * An upright map: columns run level along this bearing (rad, from x towards y) from the grid's origin, rows upwards from
+   * `toolHeight`. Left out, the map lies level and its columns and rows run along x and y.
+   */
+  readonly section?: { readonly bearing: number };
+  /** Height of the tool point (m); of a section's lowest row. */
   readonly toolHeight: number;
   readonly direction: MapDirection;
   /** A spot is then reached where every direction of the cone is, and has the worst value of them. */

@@ -67,6 +67,9 @@ export function makeFullGrid(solver: Solver, request: MapRequest, wanted: number
     visitGeneral();
   }
 
+  const upright = request.section !== undefined;
+  const alongX = step * Math.cos(request.section?.bearing ?? 0);
+  const alongY = step * Math.sin(request.section?.bearing ?? 0);
   const sweep = cone ? makeConeSweep(cone, roll, pose, cell, visit) : null;
 
   return {
@@ -77,9 +80,9 @@ export function makeFullGrid(solver: Solver, request: MapRequest, wanted: number
       if (six) six.orient(pose);
     },
     judge(column, row) {
-      pose[3] = origin[0] + column * step;
-      pose[7] = origin[1] + row * step;
-      pose[11] = toolHeight;
+      pose[3] = origin[0] + column * alongX;
+      pose[7] = origin[1] + (upright ? column * alongY : row * step);
+      pose[11] = upright ? toolHeight + row * step : toolHeight;
       if (direction.kind === 'outward') orientOutward(pose, baseX, baseY, direction.tilt, roll);
       if (sweep) return sweep();
       visit();

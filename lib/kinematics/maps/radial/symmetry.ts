@@ -33,8 +33,8 @@ const EXACTLY = 1e-9;
 export function symmetryOf(solver: Solver, request: MapRequest, wanted: number): Symmetry | null {
   const { chain } = solver;
   const { direction, toolHeight } = request;
-  // A cone's sampled directions do not turn with the bearing.
-  if (request.cone) return null;
+  // A cone's sampled directions do not turn with the bearing, and a section is not level.
+  if (request.cone || request.section) return null;
   if (solver.method !== 'spherical wrist' || solver.freedoms.length !== 6 || !solver.toolOnLastAxis) return null;
   const lastIsFree = request.roll === 'free';
   const branches = makeBranchPairs(chain, lastIsFree);
