@@ -1,3 +1,4 @@
+import type { ComponentProps } from 'react';
 import { screen, waitFor } from '@testing-library/react';
 import { beforeEach, describe, expect, it, vi } from 'vitest';
 import { ProblemError } from '@/lib/client/fetcher';
@@ -5,7 +6,7 @@ import { show } from '@/tests/components/show';
 import { RemarkForm } from './remark-form';
 
 const guest = { name: 'Vera Quill', email: 'vera@quillfen.example' };
-const form = (onSend: (body: string, who: unknown) => Promise<void>, asGuest = true) => (
+const form = (onSend: ComponentProps<typeof RemarkForm>['onSend'], asGuest = true) => (
   <RemarkForm label="Your remark" sendLabel="Pin the remark" asGuest={asGuest} onSend={onSend} />
 );
 
@@ -20,7 +21,9 @@ describe('the remark form', () => {
     await user.type(screen.getByLabelText('Your e-mail address'), 'Vera@Quillfen.example');
     await user.click(screen.getByRole('button', { name: 'Pin the remark' }));
     // The contract writes addresses small.
-    await waitFor(() => expect(onSend).toHaveBeenCalledWith('The cart needs 900 mm.', guest));
+    await waitFor(() =>
+      expect(onSend).toHaveBeenCalledWith({ body: 'The cart needs 900 mm.', mentions: [] }, guest, null),
+    );
     await waitFor(() => expect(screen.getByLabelText('Your remark')).toHaveValue(''));
     unmount();
 
@@ -29,7 +32,7 @@ describe('the remark form', () => {
     expect(screen.getByText(/As Vera Quill/)).toBeVisible();
     await again.user.type(screen.getByLabelText('Your remark'), 'And a door.');
     await again.user.click(screen.getByRole('button', { name: 'Pin the remark' }));
-    await waitFor(() => expect(onSend).toHaveBeenLastCalledWith('And a door.', guest));
+    await waitFor(() => expect(onSend).toHaveBeenLastCalledWith({ body: 'And a door.', mentions: [] }, guest, null));
   });
 
   it('says what is missing and sends nothing', async () => {

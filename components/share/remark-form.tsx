@@ -1,15 +1,19 @@
 'use client';
 
 import { zodResolver } from '@hookform/resolvers/zod';
+import { useState } from 'react';
 import { useForm } from 'react-hook-form';
 import { z } from 'zod';
 import { applyProblem } from '@/components/forms/apply-problem';
 import { Button } from '@/components/ui/button';
 import { Field } from '@/components/ui/field';
 import { Notice } from '@/components/ui/notice';
+import { Select } from '@/components/ui/select';
 import { TextArea, TextInput } from '@/components/ui/text-input';
 import { useGuest } from '@/lib/client/use-guest';
-import { guestSchema, replyRequestSchema, type Guest } from '@/lib/contracts/remarks';
+import type { Said } from '@/lib/client/use-review';
+import { guestSchema, replyRequestSchema, type Guest, type Person } from '@/lib/contracts/remarks';
+import { PictureChoice } from './picture-choice';
 
 interface RemarkFormProps {
   /** Reads out what is written, such as `Your remark`. */
@@ -17,14 +21,17 @@ interface RemarkFormProps {
   readonly sendLabel: string;
   readonly asGuest: boolean;
   /** Throws ProblemError; what was typed then stays. */
-  readonly onSend: (body: string, guest: Guest | null) => Promise<void>;
+  readonly onSend: (said: Said, guest: Guest | null, picture: File | null) => Promise<void>;
+  /** Members who can be named with an @. */
+  readonly people?: readonly Person[];
+  readonly withPicture?: boolean;
   readonly onCancel?: () => void;
   readonly rows?: number;
   /** For those who came here by the keyboard; on a phone it would throw the screen keyboard over the drawing. */
   readonly takesFocus?: boolean;
 }
 
-const memberForm = replyRequestSchema;
+const memberForm = replyRequestSchema.pick({ body: true });
 const guestForm = z.object({ body: replyRequestSchema.shape.body, guest: guestSchema });
 
 /** What somebody wants to say; a guest also says who they are, once a browser. */
@@ -36,8 +43,11 @@ export function RemarkForm({
   onCancel,
   rows = 3,
   takesFocus = false,
+  people = [],
+  withPicture = false,
 }: RemarkFormProps) {
   const { guest, keepGuest } = useGuest();
+  const [picture, setPicture] = useState<File | null>(null);
   const form = useForm<{ body: string; guest?: Guest }>({
     resolver: zodResolver(asGuest ? guestForm : memberForm),
     defaultValues: asGuest ? { body: '', guest: guest ?? { name: '', email: '' } } : { body: '' },
@@ -47,7 +57,9 @@ export function RemarkForm({
   const send = form.handleSubmit(async (values) => {
     try {
       const who = asGuest ? (values.guest ?? null) : null;
-      await onSend(values.body, who);
+      const mentions = people.filter(({ name }) => values.body.includes(`@${name}`)).map(({ id }) => id);
+      await onSend({ body: values.body, mentions }, who, picture);
+      setPicture(null);
       if (who) keepGuest(who);
       form.reset({ ...values, body: '' });
     } catch (error) {
@@ -89,6 +101,23 @@ export function RemarkForm({
             Somebody else
           </button>
         </p>
+      )}
+      {(withPicture || people.length > 0) && (
+        <div className="flex flex-wrap items-center gap-2">
+          {withPicture && <PictureChoice picture={picture} onChoose={setPicture} />}
+          {people.length > 0 && (
+            <Select
+              aria-label="Name somebody"
+              placeholder="@ Name somebody"
+              value={undefined}
+              onValueChange={(name) =>
+                form.setValue('body', `${form.getValues('body')}@${name} `, { shouldDirty: true })
+              }
+              options={people.map(({ name }) => ({ value: name, label: name }))}
+              className="w-auto!"
+            />
+          )}
+        </div>
       )}
       <div className="flex flex-wrap gap-2">
         <Button type="submit" variant="action" busy={isSubmitting} busyLabel="Sending…">

@@ -1,5 +1,6 @@
 import type { SheetDocument } from '@/lib/client/sheet-document';
 import type { Review } from '@/lib/client/use-review';
+import type { Person } from '@/lib/contracts/remarks';
 import type { SignOffs } from '@/lib/client/use-sign-offs';
 import type { StoredMap } from '@/lib/client/use-stored-maps';
 
@@ -18,6 +19,8 @@ export interface ReviewSubject {
   readonly number: number;
   readonly maySign: boolean;
   readonly mayRemark: boolean;
+  /** Members who can be named; none for guests, who do not know them. */
+  readonly people: readonly Person[];
   /** Guests give name and e-mail address with what they write. */
   readonly asGuest: boolean;
 }

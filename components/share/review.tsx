@@ -24,7 +24,8 @@ export function Review({ subject }: { readonly subject: ReviewSubject }) {
   const { document, review, mayRemark, asGuest } = subject;
   const reading = useSheetReading(document, document.settings.wrist);
   const reviewMap = useReviewMap(document, reading?.robots ?? [], subject.maps);
-  const [chosenId, setChosenId] = useState<string | null>(null);
+  // A mail and the table of remarks lead to one remark.
+  const [chosenId, setChosenId] = useState(() => new URLSearchParams(window.location.search).get('remark'));
   const [spot, setSpot] = useState<NewSpot | null>(null);
   if (!reading) return null;
 
@@ -67,9 +68,14 @@ export function Review({ subject }: { readonly subject: ReviewSubject }) {
               sendLabel="Pin the remark"
               takesFocus={spot.itemId !== null}
               asGuest={asGuest}
-              onSend={async (body, guest) => {
-                await review.pin({ ...spot, body }, guest);
+              people={subject.people}
+              withPicture
+              onSend={async (said, guest, picture) => {
+                const pinned = await review.pin({ ...spot, ...said }, guest);
                 setSpot(null);
+                // Pinned is pinned: should the picture be refused, it can be attached to the open remark again.
+                setChosenId(pinned.id);
+                if (picture) await review.attach(pinned.id, picture);
               }}
               onCancel={() => setSpot(null)}
             />
@@ -91,6 +97,8 @@ export function Review({ subject }: { readonly subject: ReviewSubject }) {
             review={review}
             mayRemark={mayRemark}
             asGuest={asGuest}
+            people={subject.people}
+            number={subject.number}
             chosenId={chosenId}
             onChoose={(id) => {
               setSpot(null);

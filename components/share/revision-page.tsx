@@ -12,7 +12,9 @@ import { useAccount, useMayActAs } from '@/lib/client/account-context';
 import { documentOfRevision } from '@/lib/client/sheet-document';
 import { useRevision, useRevisionReview } from '@/lib/client/use-review';
 import { useSignOffs } from '@/lib/client/use-sign-offs';
+import { usePeople } from '@/lib/client/use-people';
 import { useStoredMaps } from '@/lib/client/use-stored-maps';
+import type { Person } from '@/lib/contracts/remarks';
 import type { Revision } from '@/lib/contracts/revisions';
 import { Review } from './review';
 import { RevisionActions } from './revision-actions';
@@ -23,6 +25,8 @@ export default function RevisionPage({ revisionId }: { readonly revisionId: stri
   if (error && !data) return <SubjectFault error={error} what="This revision" onRetry={() => void mutate()} />;
   return data ? <Opened revision={data} /> : <LoadingLine label="Opening the revision" />;
 }
+
+const NOBODY: readonly Person[] = [];
 
 function Opened({ revision }: { readonly revision: Revision }) {
   const { id, projectId, snapshot, number, issuedAt, issuedBy } = revision;
@@ -35,6 +39,7 @@ function Opened({ revision }: { readonly revision: Revision }) {
   const document = useMemo(() => documentOfRevision(revision), [revision]);
   const maps = useStoredMaps('/api/maps', snapshot.maps);
   const review = useRevisionReview(id, mayEdit);
+  const people = usePeople(projectId);
   const planId = snapshot.floorPlan?.id ?? '';
   const pictureUrl = useCallback((width: number) => `/api/floor-plans/${planId}/picture?width=${width}`, [planId]);
   return (
@@ -80,6 +85,7 @@ function Opened({ revision }: { readonly revision: Revision }) {
             number,
             maySign: role === 'viewer',
             mayRemark: true,
+            people: people.data?.people ?? NOBODY,
             asGuest: false,
           }}
         />

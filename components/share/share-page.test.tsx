@@ -5,7 +5,7 @@ import type { Remark } from '@/lib/contracts/remarks';
 import { sharedRevisionSchema } from '@/lib/contracts/share-links';
 import { itemSchema } from '@/lib/layout/items';
 import { api, problem, withApi } from '@/tests/components/api';
-import { fakeId } from '@/tests/components/fakes';
+import { fakeId, fakeRemark } from '@/tests/components/fakes';
 import { show } from '@/tests/components/show';
 import SharePage from './share-page';
 
@@ -69,21 +69,13 @@ const shared = (mayRemark = true) =>
     },
   });
 
-const remark = (part: Partial<Remark> = {}): Remark => ({
-  id: fakeId(20),
-  revisionId: fakeId(10),
-  revisionNumber: 2,
-  number: 3,
-  xMm: 0,
-  yMm: 0,
-  itemId: null,
-  author: { name: 'Ilse Varnholt', side: 'integrator', you: false },
-  body: 'Tray may turn.',
-  resolvedAt: null,
-  createdAt: '2026-12-01T09:00:00.000Z',
-  replies: [],
-  ...part,
-});
+const remark = (part: Partial<Remark> = {}): Remark =>
+  fakeRemark(20, {
+    number: 3,
+    author: { name: 'Ilse Varnholt', side: 'integrator', you: false },
+    body: 'Tray may turn.',
+    ...part,
+  });
 
 function open(remarks: Remark[] = [], mayRemark = true) {
   api.use(
@@ -149,6 +141,7 @@ describe('a shared revision', () => {
             id: fakeId(30),
             author: { name: 'Joren', side: 'integrator', you: false },
             body: 'We turn it.',
+            mentions: [],
             createdAt: '2026-12-01T11:00:00.000Z',
           },
         ],

@@ -7,6 +7,7 @@ import { LoadingLine } from '@/components/ui/loading-line';
 import { TitleBlock } from '@/components/ui/title-block';
 import { Moment } from '@/components/ui/moment';
 import { StopPage } from '@/components/shell/stop-page';
+import type { Person } from '@/lib/contracts/remarks';
 import type { SharedRevision } from '@/lib/contracts/share-links';
 import { documentOfRevision } from '@/lib/client/sheet-document';
 import { useSharedReview, useSharedRevision } from '@/lib/client/use-review';
@@ -43,6 +44,8 @@ function DeadLink() {
     </StopPage>
   );
 }
+
+const NOBODY: readonly Person[] = [];
 
 function Shared({ token, shared }: { readonly token: string; readonly shared: SharedRevision }) {
   const { revision, organisationName, customerName, mayRemark, maySign, expiresAt, newerNumber } = shared;
@@ -86,6 +89,7 @@ function Shared({ token, shared }: { readonly token: string; readonly shared: Sh
             number: revision.number,
             maySign,
             mayRemark,
+            people: NOBODY,
             asGuest: true,
           }}
         />

@@ -1,7 +1,7 @@
 'use client';
 
 import { useMemo } from 'react';
-import { remarkListSchema, type Guest, type Remark } from '@/lib/contracts/remarks';
+import { remarkListSchema, remarkSchema, type Guest, type Remark, type RemarkChange } from '@/lib/contracts/remarks';
 import { revisionSchema } from '@/lib/contracts/revisions';
 import { sharedRevisionSchema } from '@/lib/contracts/share-links';
 import { send } from './fetcher';
@@ -15,15 +15,25 @@ export interface NewRemark {
   readonly yMm: number;
   readonly itemId: string | null;
   readonly body: string;
+  readonly mentions: readonly string[];
 }
+
+export type Said = Pick<NewRemark, 'body' | 'mentions'>;
 
 export interface Review {
   /** Null while they are read. */
   readonly remarks: readonly Remark[] | null;
   readonly error: Error | undefined;
   /** All throw ProblemError; the list is asked for again afterwards. Guests say who they are, members are known. */
-  readonly pin: (remark: NewRemark, guest: Guest | null) => Promise<void>;
-  readonly reply: (remarkId: string, body: string, guest: Guest | null) => Promise<void>;
+  readonly pin: (remark: NewRemark, guest: Guest | null) => Promise<Remark>;
+  readonly reply: (remarkId: string, said: Said, guest: Guest | null) => Promise<void>;
+  /** Adds a picture to one's own remark. */
+  readonly attach: (remarkId: string, file: File) => Promise<void>;
+  readonly pictureUrl: (remarkId: string, pictureId: string) => string;
+  /** Notes that it has been read; null for guests, whose marks nobody keeps. */
+  readonly markRead: ((remarkId: string) => Promise<void>) | null;
+  /** Gives it to a planner, until a day; null for those who may not. */
+  readonly assign: ((remarkId: string, change: Pick<RemarkChange, 'assigneeId' | 'dueOn'>) => Promise<void>) | null;
   /** Null for those who may not settle remarks. */
   readonly settle: ((remarkId: string, resolved: boolean) => Promise<void>) | null;
 }
@@ -63,23 +73,39 @@ interface RemarkList {
 function useRemarksAt({ url, byGuests, maySettle }: RemarkList): Review {
   const { data, error, mutate } = useAnswer(url, remarkListSchema, { refreshInterval: REFRESH_MS });
   const actions = useMemo(() => {
-    const withGuest = (body: object, guest: Guest | null) => (guest ? { ...body, guest } : body);
+    // Guests name nobody.
+    const withGuest = ({ mentions, ...said }: Said, guest: Guest | null) =>
+      guest ? { ...said, guest } : { ...said, mentions };
+    const at = (remarkId: string) => (byGuests ? `${url}/${remarkId}` : `/api/remarks/${remarkId}`);
+    const change = async (remarkId: string, values: RemarkChange) => {
+      await send('PATCH', `/api/remarks/${remarkId}`, values);
+      await mutate();
+    };
     return {
       async pin(remark: NewRemark, guest: Guest | null) {
-        await send('POST', url, withGuest(remark, guest));
+        const pinned = await send('POST', url, withGuest(remark, guest), remarkSchema);
+        await mutate();
+        return pinned;
+      },
+      async reply(remarkId: string, said: Said, guest: Guest | null) {
+        await send('POST', `${at(remarkId)}/replies`, withGuest(said, guest));
         await mutate();
       },
-      async reply(remarkId: string, body: string, guest: Guest | null) {
-        const where = byGuests ? `${url}/${remarkId}/replies` : `/api/remarks/${remarkId}/replies`;
-        await send('POST', where, withGuest({ body }, guest));
+      async attach(remarkId: string, file: File) {
+        const form = new FormData();
+        form.set('file', file);
+        await send('POST', `${at(remarkId)}/pictures`, form);
         await mutate();
       },
-      settle: maySettle
-        ? async (remarkId: string, resolved: boolean) => {
-            await send('PATCH', `/api/remarks/${remarkId}`, { resolved });
+      pictureUrl: (remarkId: string, pictureId: string) => `${at(remarkId)}/pictures/${pictureId}`,
+      markRead: byGuests
+        ? null
+        : async (remarkId: string) => {
+            await send('POST', `/api/remarks/${remarkId}/read`);
             await mutate();
-          }
-        : null,
+          },
+      assign: maySettle ? change : null,
+      settle: maySettle ? (remarkId: string, resolved: boolean) => change(remarkId, { resolved }) : null,
     };
   }, [url, byGuests, maySettle, mutate]);
   return { remarks: data?.remarks ?? null, error, ...actions };

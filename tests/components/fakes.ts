@@ -1,5 +1,6 @@
 import type { FloorPlan } from '@/lib/contracts/floor-plans';
 import type { Project } from '@/lib/contracts/projects';
+import type { Remark } from '@/lib/contracts/remarks';
 import type { ShareLink } from '@/lib/contracts/share-links';
 
 export const fakeId = (number: number): string => `00000000-0000-4000-8000-${String(number).padStart(12, '0')}`;
@@ -49,6 +50,32 @@ export function fakeShareLink(number: number, part: Partial<ShareLink> = {}): Sh
     openCount: 0,
     opens: [],
     createdAt: fromToday(0),
+    ...part,
+  };
+}
+
+/** An open remark of a customer on revision 2. */
+export function fakeRemark(number: number, part: Partial<Remark> = {}): Remark {
+  return {
+    id: fakeId(number),
+    revisionId: fakeId(10),
+    revisionNumber: 2,
+    layoutId: fakeId(11),
+    layoutTitle: 'C · R2 turned in',
+    number,
+    xMm: 0,
+    yMm: 0,
+    itemId: null,
+    author: { name: 'Petra Quillfen', side: 'customer', you: false },
+    body: 'Our maintenance cart needs 900 mm here.',
+    resolvedAt: null,
+    assignee: null,
+    dueOn: null,
+    mentions: [],
+    pictures: [],
+    unread: false,
+    createdAt: '2026-12-01T09:00:00.000Z',
+    replies: [],
     ...part,
   };
 }

@@ -59,7 +59,7 @@ const reply = (as: TestMember, remarkId: string, body: string) =>
 const resolve = (as: TestMember, remarkId: string, resolved: boolean) =>
   callRoute(PATCH, { as, method: 'PATCH', params: { remarkId }, body: { resolved } });
 
-async function listed(handler: typeof onLayout, as: TestMember, params: object): Promise<Remark[]> {
+async function listed(handler: Parameters<typeof callRoute>[0], as: TestMember, params: object): Promise<Remark[]> {
   const response = await callRoute(handler, { as, params });
   return remarkListSchema.parse(await response.json()).remarks;
 }

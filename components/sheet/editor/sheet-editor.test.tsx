@@ -3,7 +3,7 @@ import { beforeEach, describe, expect, it, vi } from 'vitest';
 import type { Fixture } from '@/lib/layout/items';
 import { newBlock, newRobot } from '@/lib/editor/make-items';
 import { withApi } from '@/tests/components/api';
-import { fakeId } from '@/tests/components/fakes';
+import { fakeId, fakeRemark } from '@/tests/components/fakes';
 import { show } from '@/tests/components/show';
 import SheetEditor from './sheet-editor';
 import { ARM, SheetServer } from './testing/sheet-server';
@@ -201,20 +201,7 @@ describe('the state of the sheet', () => {
 describe('remarks', () => {
   it('are listed with their pins’ numbers', async () => {
     server.remarks = [
-      {
-        id: fakeId(30),
-        revisionId: fakeId(31),
-        revisionNumber: 2,
-        number: 3,
-        xMm: 10,
-        yMm: 20,
-        itemId: null,
-        author: { name: 'Petra Quillfen', side: 'customer', you: false },
-        body: 'Our maintenance cart needs 900 mm here.',
-        resolvedAt: null,
-        createdAt: '2031-05-04T08:00:00.000Z',
-        replies: [],
-      },
+      fakeRemark(30, { revisionId: fakeId(31), number: 3, xMm: 10, yMm: 20 }),
     ];
     const { user } = await open();
     await user.click(await screen.findByRole('tab', { name: /^Remarks/ }));
