@@ -10,6 +10,8 @@ export function Toaster() {
     <Sonner
       position="bottom-center"
       duration={5000}
+      // It brings a typeface of its own, stronger than a class.
+      style={{ fontFamily: 'inherit' }}
       toastOptions={{
         unstyled: true,
         classNames: {

@@ -83,7 +83,7 @@ export function commandOf({ key, ctrlKey, metaKey, shiftKey, altKey }: Keystroke
   if (key === '?') return { name: 'help' };
   if (key === '0') return { name: 'fit' };
   if (lower === 'm' && !shiftKey) return { name: 'pickUp' };
-  if (lower === 'l') return { name: shiftKey ? 'hide' : 'lock' };
+  if (lower === 'b') return { name: shiftKey ? 'hide' : 'lock' };
   const tool = shiftKey ? undefined : TOOL_KEYS[lower];
   return tool ? { name: 'tool', tool } : null;
 }
@@ -119,8 +119,8 @@ export const SHORTCUTS: readonly ShortcutGroup[] = [
       { keys: ['Ctrl', 'V'], words: 'Paste, also on another sheet' },
       { keys: ['Ctrl', 'A'], words: 'Choose everything' },
       { keys: ['Ctrl', 'G'], words: 'Make one group; with Shift take it apart' },
-      { keys: ['L'], words: 'Lock or unlock' },
-      { keys: ['Shift', 'L'], words: 'Hide or show' },
+      { keys: ['B'], words: 'Bolt down: lock or unlock' },
+      { keys: ['Shift', 'B'], words: 'Hide or show' },
     ],
   },
   {

@@ -16,6 +16,9 @@ export interface SelectionHandlesProps {
   readonly onHandlePointerDown?: (handle: 'move' | 'rotate', pointer: SheetPointer) => void;
 }
 
+/** Taken hold of anywhere on themselves; a cross in the middle would only lie over task points. */
+const BODIES: ReadonlySet<Item['kind']> = new Set(['robot', 'fixture', 'obstacle', 'conveyor', 'note']);
+
 const GAP_PX = 6;
 const TURN_ARM_PX = 26;
 const HANDLE_PX = 5.5;
@@ -31,7 +34,9 @@ export function SelectionHandles({ items, arms, onHandlePointerDown }: Selection
       {single && single.kind !== 'dimension' && (
         <Handle item={single} frame={frameOfItem(single, arms)} kind="rotate" onPress={onHandlePointerDown} />
       )}
-      {single && <Handle item={single} frame={frameOfItem(single, arms)} kind="move" onPress={onHandlePointerDown} />}
+      {single && !BODIES.has(single.kind) && (
+        <Handle item={single} frame={frameOfItem(single, arms)} kind="move" onPress={onHandlePointerDown} />
+      )}
     </>
   );
 }
@@ -108,7 +113,6 @@ const Handle = memo(function Handle({ item, frame, kind, onPress }: HandleProps)
       x={item.xMm}
       y={item.yMm}
       rotation={item.angleDeg}
-      // A robot and a body are moved by themselves; only what cannot be grasped in its middle needs the cross.
       listening={onPress !== undefined}
       sceneFunc={(context, shape) => drawKnob(inkOf(context), pixelOf(shape))}
       hitFunc={(context, shape) => {

@@ -50,10 +50,10 @@ export function EditMenu() {
         Ungroup
       </MenuItem>
       <MenuRule />
-      <MenuItem shortcut="L" disabled={isEmpty} onSelect={() => commands.toggle('locked')}>
+      <MenuItem shortcut="B" disabled={isEmpty} onSelect={() => commands.toggle('locked')}>
         Lock or unlock
       </MenuItem>
-      <MenuItem shortcut="Shift L" disabled={isEmpty} onSelect={() => commands.toggle('hidden')}>
+      <MenuItem shortcut="Shift B" disabled={isEmpty} onSelect={() => commands.toggle('hidden')}>
         Hide or show
       </MenuItem>
       <MenuItem danger shortcut="Delete" disabled={isEmpty} onSelect={commands.remove}>

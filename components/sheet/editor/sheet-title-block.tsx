@@ -7,10 +7,12 @@ import { LinkButton } from '@/components/ui/link-button';
 import { Menu, MenuItem } from '@/components/ui/menu';
 import { TitleBlock } from '@/components/ui/title-block';
 import { useMayActAs } from '@/lib/client/account-context';
+import { useRevisions } from '@/lib/client/use-revisions';
+import type { Layout } from '@/lib/contracts/layouts';
 import { drawingRatio } from '@/lib/layout/viewport';
 import { useBoard, useView } from './board-context';
 import { SaveState } from './save-state';
-import { useMedia } from './use-media';
+import { NARROW, useMedia } from './use-media';
 
 interface SheetTitleBlockProps {
   readonly onConflict: () => void;
@@ -22,15 +24,17 @@ interface SheetTitleBlockProps {
 export function SheetTitleBlock({ onConflict, onShare, onIssue }: SheetTitleBlockProps) {
   const { layout, projectId } = useBoard();
   const mayIssue = useMayActAs('integrator');
-  const isNarrow = useMedia('(max-width: 1023px)');
+  const isNarrow = useMedia(NARROW);
   const compareHref = `/projects/${projectId}/compare?left=layout:${layout.id}`;
-  const { letter, name, projectName, latestRevision } = layout;
+  const handOverHref = `/projects/${projectId}/layouts/${layout.id}/hand-over`;
+  const { letter, name, projectName } = layout;
+  const newest = useNewestRevision(layout);
   return (
     <TitleBlock
       cells={[
         { label: 'Project', value: projectName, href: `/projects/${projectId}` },
         { label: 'Variant', value: `${letter} · ${name}`, heading: true },
-        { label: 'Sheet rev.', value: latestRevision?.number ?? '–', kind: 'figure', wideOnly: true },
+        { label: 'Sheet rev.', value: newest ?? '–', kind: 'figure', wideOnly: true },
         { label: 'Scale', value: <Scale />, kind: 'figure', wideOnly: true },
         { label: 'State', value: <SaveState onConflict={onConflict} /> },
       ]}
@@ -38,6 +42,7 @@ export function SheetTitleBlock({ onConflict, onShare, onIssue }: SheetTitleBloc
         isNarrow ? (
           <NarrowActions
             compareHref={compareHref}
+            handOverHref={handOverHref}
             onShare={mayIssue ? onShare : null}
             onIssue={mayIssue ? onIssue : null}
           />
@@ -45,6 +50,9 @@ export function SheetTitleBlock({ onConflict, onShare, onIssue }: SheetTitleBloc
           <>
             <LinkButton variant="quiet" size="small" href={compareHref}>
               Compare
+            </LinkButton>
+            <LinkButton variant="quiet" size="small" href={handOverHref}>
+              Hand over
             </LinkButton>
             {mayIssue && (
               <>
@@ -61,6 +69,16 @@ export function SheetTitleBlock({ onConflict, onShare, onIssue }: SheetTitleBloc
       }
     />
   );
+}
+
+/** A colleague may issue while the sheet is open; asked for this often. */
+const ASK_EVERY_MS = 15_000;
+
+/** The number of the newest revision: as the sheet was opened, until the list of revisions knows better. */
+function useNewestRevision({ id, latestRevision }: Layout): number | null {
+  const { data } = useRevisions(id, { refreshInterval: ASK_EVERY_MS });
+  const numbers = data?.revisions.map(({ number }) => number) ?? [];
+  return numbers.length > 0 ? Math.max(...numbers) : (latestRevision?.number ?? null);
 }
 
 interface NarrowActionsProps {

@@ -69,6 +69,7 @@ export class SheetServer {
       http.post(`${layout}/presence`, () =>
         HttpResponse.json({ layoutVersion: this.layout.version, others: this.others }),
       ),
+      http.get(`${layout}/revisions`, () => HttpResponse.json({ revisions: [] })),
       http.get(`${layout}/remarks`, () => HttpResponse.json({ remarks: this.remarks })),
       http.get('*/api/arms', () => HttpResponse.json({ arms: [ARM] })),
       http.get('*/api/fixtures', () => HttpResponse.json({ fixtures: [] })),
