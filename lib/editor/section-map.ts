@@ -26,46 +26,31 @@ export interface SectionQuestion {
   readonly stepMm: number;
 }
 
-/**
- * Computes a section row by row; each turn of the iteration is a few milliseconds of work, so a page can pause between them.
- * The arm is turned under the cut, so that joint limits and tracks show as they are in this direction.
- */
+/** Computes a section row by row; each turn of the iteration is a few milliseconds of work, so a page can pause between them. */
 export function* sectionRows(question: SectionQuestion): Generator<SectionMap, SectionMap> {
-  const { arm, headingDeg, fromMm, toMm, stepMm, wrist, roll } = question;
+  const { arm, headingDeg, fromMm, toMm, stepMm, wrist, roll, direction } = question;
   const columns = Math.max(1, Math.ceil((toMm[0] - fromMm[0]) / stepMm));
   const rows = Math.max(1, Math.ceil((toMm[1] - fromMm[1]) / stepMm));
   const originMm: [number, number] = [fromMm[0] + stepMm / 2, fromMm[1] + stepMm / 2];
   const map: SectionMap = { originMm, stepMm, columns, rows, value: new Float32Array(columns * rows).fill(NaN) };
-  const heading = (headingDeg * Math.PI) / 180;
-  const underCut = turnedBase(arm, -heading);
-  const direction = turnedDirection(question.direction, -heading);
+  const bearing = (headingDeg * Math.PI) / 180;
+  const computer = makeMapComputer(arm, {
+    grid: {
+      origin: [(originMm[0] / 1000) * Math.cos(bearing), (originMm[0] / 1000) * Math.sin(bearing)],
+      step: stepMm / 1000,
+      columns,
+      rows,
+    },
+    section: { bearing },
+    toolHeight: originMm[1] / 1000,
+    direction,
+    roll,
+    wrist,
+    branch: 'best',
+  });
   for (let row = 0; row < rows; row += 1) {
-    const computer = makeMapComputer(underCut, {
-      grid: { origin: [originMm[0] / 1000, 0], step: stepMm / 1000, columns, rows: 1 },
-      toolHeight: (originMm[1] + row * stepMm) / 1000,
-      direction,
-      roll,
-      wrist,
-      branch: 'best',
-    });
-    map.value.set(computer.tile(0, 1).inverseConditionNumber, row * columns);
+    map.value.set(computer.tile(row, row + 1).inverseConditionNumber, row * columns);
     yield map;
   }
   return map;
-}
-
-function turnedBase(arm: Arm, byRad: number): Arm {
-  const { xyz, rpy } = arm.base ?? { xyz: [0, 0, 0] as const, rpy: [0, 0, 0] as const };
-  const [c, s] = [Math.cos(byRad), Math.sin(byRad)];
-  return {
-    ...arm,
-    base: { xyz: [c * xyz[0] - s * xyz[1], s * xyz[0] + c * xyz[1], xyz[2]], rpy: [rpy[0], rpy[1], rpy[2] + byRad] },
-  };
-}
-
-function turnedDirection(direction: MapDirection, byRad: number): MapDirection {
-  if (direction.kind !== 'vector') return direction;
-  const [x, y, z] = direction.vector;
-  const [c, s] = [Math.cos(byRad), Math.sin(byRad)];
-  return { kind: 'vector', vector: [c * x - s * y, s * x + c * y, z] };
 }

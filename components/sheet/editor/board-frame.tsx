@@ -3,6 +3,7 @@
 import { useCallback, useState } from 'react';
 import { ItemList } from '@/components/sheet/panels/item-list';
 import { Palette } from '@/components/sheet/panels/palette';
+import { SectionStrip } from '@/components/sheet/panels/section-strip';
 import { ShareDialog } from '@/components/share/share-dialog';
 import { useBoard } from './board-context';
 import { Canvas } from './canvas';
@@ -68,6 +69,7 @@ export function BoardFrame() {
               </div>
               {!isNarrow && <MapPanel floating />}
             </div>
+            <SectionStrip />
           </main>
           {isNarrow ? (
             <NarrowDrawer

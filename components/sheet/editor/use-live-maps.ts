@@ -1,16 +1,14 @@
 'use client';
 
-import { useEffect, useMemo, useRef, useState, useSyncExternalStore } from 'react';
+import { useMemo } from 'react';
 import type { LibraryArm } from '@/lib/contracts/arms';
-import { KernelDesk, type DeskAnswer, type DeskJob } from '@/lib/client/kernel-desk';
+import type { DeskAnswer, DeskJob } from '@/lib/client/kernel-desk';
 import { keyOf, type MapEntry } from '@/lib/client/map-book';
 import type { Robot } from '@/lib/layout/items';
 import type { LiveMap, LiveMapTask } from '@/lib/layout/live-map';
 import { questionOfRobot } from '@/lib/layout/map-question';
 import type { MapSettings } from '@/lib/layout/map-settings';
-import type { KernelAnswer } from './kernel-worker';
-
-export type LiveMaps = ReadonlyMap<string, DeskAnswer<LiveMap>>;
+import { useKernelDesk } from './use-kernel-desk';
 
 /**
  * Maps from the browser's own kernel for robots whose stored map is not the one asked for now: while a riser, a height or an
@@ -21,20 +19,7 @@ export function useLiveMaps(
   settings: MapSettings,
   arms: ReadonlyMap<string, LibraryArm>,
   stored: ReadonlyMap<string, MapEntry>,
-): LiveMaps {
-  const worker = useRef<Worker | null>(null);
-  const [desk] = useState(() => new KernelDesk<LiveMapTask, LiveMap>((task) => worker.current?.postMessage(task)));
-  useEffect(
-    () => () => {
-      worker.current?.terminate();
-      worker.current = null;
-      // What it had in hand will never come.
-      desk.want([]);
-      desk.fail();
-    },
-    [desk],
-  );
-
+): ReadonlyMap<string, DeskAnswer<LiveMap>> {
   const jobs = useMemo(
     () =>
       robots.flatMap((robot): DeskJob<LiveMapTask>[] => {
@@ -47,17 +32,5 @@ export function useLiveMaps(
       }),
     [robots, settings, arms, stored],
   );
-  useEffect(() => {
-    // Old browsers, and pages that may not start workers, wait for the stored map.
-    if (typeof Worker === 'undefined') return;
-    if (jobs.length > 0 && !worker.current) {
-      worker.current = new Worker(new URL('./kernel-worker.ts', import.meta.url), { type: 'module' });
-      worker.current.onmessage = ({ data }: MessageEvent<KernelAnswer>) =>
-        data.kind === 'map' ? desk.take(data.map) : desk.fail();
-      worker.current.onerror = () => desk.fail();
-    }
-    desk.want(jobs);
-  }, [desk, jobs]);
-
-  return useSyncExternalStore(desk.subscribe, desk.getAnswers, desk.getAnswers);
+  return useKernelDesk('map', jobs);
 }
