@@ -60,7 +60,9 @@ export interface PlumbReading {
 /** Reads everything at a spot for one robot. */
 export function readPlumb(robot: Robot, definition: Arm, spot: PlumbSpot, settings: MapSettings): PlumbReading {
   const arm = armWithTool(definition, robot.tool);
-  const target = spot.taskPoint ? targetInBase(spot.taskPoint, robot) : targetOf(robot, definition, spot, settings);
+  const target = spot.taskPoint
+    ? targetInBase({ rollDeg: spot.taskPoint.point.rollDeg, pose: spot.taskPoint.pose }, robot)
+    : targetOf(robot, definition, spot, settings);
   const reading = makeSpotReader(arm, settings.wrist)(target);
   const joint = reading.joint < 0 ? null : reading.joint + 1;
   const prismatic = joint !== null && arm.joints[reading.joint]?.type === 'prismatic';
