@@ -1,10 +1,11 @@
 'use client';
 
-import { Plus } from 'lucide-react';
+import { FileUp, Plus } from 'lucide-react';
 import { useRouter } from 'next/navigation';
 import { useCallback, useState } from 'react';
 import { NameDialog } from '@/components/forms/name-dialog';
 import { NewVariantDialog } from '@/components/forms/new-variant-dialog';
+import { ImportLayoutDialog } from '@/components/reports/import-layout-dialog';
 import { VariantsTable, type VariantDeed } from '@/components/tables/variants-table';
 import { Button } from '@/components/ui/button';
 import { ConfirmDialog } from '@/components/ui/confirm-dialog';
@@ -21,7 +22,10 @@ export function VariantsPanel({ projectId }: { projectId: string }) {
   const router = useRouter();
   const answer = useLayouts(projectId);
   const actions = useLayoutActions(projectId);
-  const [pending, setPending] = useState<{ deed: VariantDeed | 'create'; layout: LayoutSummary | null } | null>(null);
+  const [pending, setPending] = useState<{
+    deed: VariantDeed | 'create' | 'import';
+    layout: LayoutSummary | null;
+  } | null>(null);
   const close = (): void => setPending(null);
   const onDeed = useCallback((deed: VariantDeed, layout: LayoutSummary) => setPending({ deed, layout }), []);
   const layouts = answer.data?.layouts ?? [];
@@ -37,15 +41,27 @@ export function VariantsPanel({ projectId }: { projectId: string }) {
       New variant
     </Button>
   );
+  const bringIn = (
+    <Button size="small" onClick={() => setPending({ deed: 'import', layout: null })}>
+      <FileUp aria-hidden className="size-4" />
+      Import
+    </Button>
+  );
+  const both = (
+    <span className="flex flex-wrap gap-2">
+      {bringIn}
+      {create}
+    </span>
+  );
   return (
-    <Panel title="Variants" aside={layouts.length > 0 && create}>
+    <Panel title="Variants" aside={layouts.length > 0 && both}>
       <DataPart answer={answer} loading="Loading the variants">
         {() =>
           layouts.length === 0 ? (
             <EmptyState
               title="No variant drawn yet"
               body="A variant is one arrangement of the cell. Start with a blank sheet; later ones can start as copies."
-              action={create}
+              action={both}
             />
           ) : (
             <>
@@ -55,6 +71,7 @@ export function VariantsPanel({ projectId }: { projectId: string }) {
           )
         }
       </DataPart>
+      {deed === 'import' && <ImportLayoutDialog projectId={projectId} onClose={close} />}
       {(deed === 'create' || deed === 'copy') && (
         <NewVariantDialog
           layouts={layouts}

@@ -5,6 +5,7 @@ import { ShareLinkDialog } from '@/components/forms/share-link-dialog';
 import { STATE_WORDS } from '@/components/projects/state-words';
 import { SubjectFault } from '@/components/shell/subject-fault';
 import { Button } from '@/components/ui/button';
+import { LinkButton } from '@/components/ui/link-button';
 import { LoadingLine } from '@/components/ui/loading-line';
 import { Moment } from '@/components/ui/moment';
 import { TitleBlock } from '@/components/ui/title-block';
@@ -62,6 +63,7 @@ function Opened({ revision }: { readonly revision: Revision }) {
         ]}
         actions={
           <>
+            <LinkButton href={`/revisions/${id}/hand-over`}>Hand over</LinkButton>
             {mayEdit && <RevisionActions revision={revision} />}
             {mayShare && (
               <Button variant="action" onClick={() => setSharing(true)}>

@@ -65,6 +65,10 @@ export function AccountMenu() {
         </MenuItem>
       ))}
       <MenuRule />
+      <MenuItem asChild>
+        <Link href="/tokens">API tokens</Link>
+      </MenuItem>
+      <MenuRule />
       <MenuChoice
         label="Board"
         value={choice}

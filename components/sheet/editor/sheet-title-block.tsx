@@ -83,13 +83,14 @@ function useNewestRevision({ id, latestRevision }: Layout): number | null {
 
 interface NarrowActionsProps {
   readonly compareHref: string;
+  readonly handOverHref: string;
   /** Null where the reader may not. */
   readonly onShare: (() => void) | null;
   readonly onIssue: (() => void) | null;
 }
 
 /** On a phone the actions fold into one button. */
-function NarrowActions({ compareHref, onShare, onIssue }: NarrowActionsProps) {
+function NarrowActions({ compareHref, handOverHref, onShare, onIssue }: NarrowActionsProps) {
   return (
     <Menu
       trigger={
@@ -101,6 +102,9 @@ function NarrowActions({ compareHref, onShare, onIssue }: NarrowActionsProps) {
     >
       <MenuItem asChild>
         <Link href={compareHref}>Compare</Link>
+      </MenuItem>
+      <MenuItem asChild>
+        <Link href={handOverHref}>Hand over</Link>
       </MenuItem>
       {onShare && <MenuItem onSelect={onShare}>Share</MenuItem>}
       {onIssue && <MenuItem onSelect={onIssue}>Issue for review</MenuItem>}
