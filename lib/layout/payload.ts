@@ -49,8 +49,8 @@ export function checkPayload(
     questions.push({ field: 'part', words: 'The part weighs 0 kg: the robot is taken to carry nothing but its tool.' });
 
   const loaded = bodies.filter(({ massKg }) => massKg > 0);
-  const hasCentres = loaded.length > 0 && loaded.every(({ centreMm }) => centreMm !== null);
-  const hasInertia = hasCentres && loaded.every(({ inertiaKgM2 }) => inertiaKgM2 !== null);
+  const hasCentres = loaded.length > 0 && loaded.every(({ centreMm }) => isTyped(centreMm));
+  const hasInertia = hasCentres && loaded.every(({ inertiaKgM2 }) => isTyped(inertiaKgM2));
   if (loaded.length > 0 && !hasCentres)
     questions.push({
       field: 'centre',
@@ -61,7 +61,7 @@ export function checkPayload(
       field: 'inertia',
       words: 'What are the moments of inertia of tool and part? Without them inertia is not checked.',
     });
-  if (hasCentres && !wristRating)
+  if (hasCentres && (wristRating?.momentNm == null || wristRating.inertiaKgM2 === null))
     questions.push({
       field: 'rating',
       words: 'What moment and inertia does the data sheet allow at the flange? Without them they are not checked.',
@@ -93,6 +93,10 @@ export function checkPayload(
         : 'Checked at the flange against the ratings typed in. The load diagram of the data sheet may allow less farther out.',
   };
 }
+
+/** Nothing but zeros is what an empty form holds: no body has its mass in the flange, or no inertia. */
+const isTyped = (values: object | null): boolean =>
+  values !== null && Object.values(values).some((value) => value !== 0);
 
 type Body = Pick<Robot['tool'], 'massKg' | 'centreMm' | 'inertiaKgM2'>;
 

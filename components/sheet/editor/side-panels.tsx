@@ -1,6 +1,7 @@
 'use client';
 
 import type { ComponentType } from 'react';
+import { CyclePanel } from '@/components/sheet/judging/cycle-panel';
 import { Inspector } from '@/components/sheet/panels/inspector';
 import { PlumbPanel } from '@/components/sheet/panels/plumb-panel';
 import { VerdictTable } from '@/components/sheet/panels/verdict-table';
@@ -27,6 +28,7 @@ export const SIDE_PANELS: readonly SidePanel[] = [
   { id: 'values', label: 'Values', Panel: Values, isReading: true },
   { id: 'plumb', label: 'Plumb', Panel: PlumbPanel, isReading: true },
   { id: 'points', label: 'Points', Panel: VerdictTable, isReading: true },
+  { id: 'cycle', label: 'Cycle', Panel: CyclePanel },
   { id: 'studies', label: 'Studies', Panel: StudiesPanel },
   { id: 'distances', label: 'Distances', Panel: DistancesPanel },
   { id: 'remarks', label: 'Remarks', Panel: BoardRemarks, useWaiting: useOpenRemarks },

@@ -2,6 +2,7 @@
 
 import { useBoard } from '@/components/sheet/editor/board-context';
 import { JointStopFields } from '@/components/sheet/studies/joint-stop-fields';
+import { PayloadFields } from '@/components/sheet/judging/payload-fields';
 import { Field } from '@/components/ui/field';
 import { Select } from '@/components/ui/select';
 import { toolSchema, type Robot } from '@/lib/layout/items';
@@ -85,6 +86,7 @@ export function RobotFields({ robot }: { readonly robot: Robot }) {
           ))}
         </div>
       </details>
+      <PayloadFields robot={robot} />
       <JointStopFields robot={robot} />
     </>
   );

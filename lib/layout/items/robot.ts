@@ -39,10 +39,10 @@ export const partSchema = z.object({
   inertiaKgM2: inertia.nullable().default(null),
 });
 
-/** What the arm's data sheet allows at the flange beside the payload. */
+/** What the arm's data sheet allows at the flange beside the payload; null: not known. */
 export const wristRatingSchema = z.object({
-  momentNm: z.number().positive('A rating is above zero.').max(1_000_000),
-  inertiaKgM2: z.number().positive('A rating is above zero.').max(1_000_000),
+  momentNm: z.number().positive('A rating is above zero.').max(1_000_000).nullable().default(null),
+  inertiaKgM2: z.number().positive('A rating is above zero.').max(1_000_000).nullable().default(null),
 });
 
 /** A limiting device on a joint: hard stop or safe software limit. Degrees for a turning joint, mm for a sliding one. */
