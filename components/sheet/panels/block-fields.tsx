@@ -11,8 +11,8 @@ export function BlockFields({ item }: { readonly item: Fixture | Obstacle }) {
   const edit = useItemEdit<Fixture | Obstacle>(item);
   return (
     <>
-      <OutlineFields item={item} />
-      <div className="mt-2 grid grid-cols-4 items-end gap-x-3">
+      {item.kind === 'obstacle' && <FormChoice item={item} />}
+      <OutlineFields item={item}>
         <ValueField
           label="Bottom"
           kind="length"
@@ -29,8 +29,7 @@ export function BlockFields({ item }: { readonly item: Fixture | Obstacle }) {
           disabled={item.locked}
           onCommit={(zToMm) => edit('Top', { zToMm })}
         />
-        {item.kind === 'obstacle' && <FormChoice item={item} />}
-      </div>
+      </OutlineFields>
     </>
   );
 }
@@ -40,7 +39,7 @@ function FormChoice({ item }: { readonly item: Obstacle }) {
   return (
     <SegmentedControl
       label="What it is"
-      className="col-span-2"
+      className="mt-2 mr-2"
       value={item.form}
       disabled={item.locked}
       onValueChange={(form) => edit('Form', { form })}

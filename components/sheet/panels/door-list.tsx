@@ -17,8 +17,12 @@ const KINDS = [
   { value: 'sliding', label: 'Slides' },
 ] as const;
 const HINGES = [
-  { value: 'start', label: 'Towards its beginning' },
-  { value: 'end', label: 'Towards its end' },
+  { value: 'start', label: 'Hinge at start' },
+  { value: 'end', label: 'Hinge at end' },
+] as const;
+const SLIDES = [
+  { value: 'start', label: 'Slides to start' },
+  { value: 'end', label: 'Slides to end' },
 ] as const;
 
 /** The first free stretch of the line that a usual door fits into; null where there is none. */
@@ -108,7 +112,7 @@ export function DoorList({ guard }: { readonly guard: GuardLine }) {
               aria-label={door.kind === 'sliding' ? `Where ${door.name} slides to` : `Hinge of ${door.name}`}
               value={door.hinge}
               disabled={guard.locked}
-              options={HINGES}
+              options={door.kind === 'sliding' ? SLIDES : HINGES}
               onValueChange={(hinge) => set(door, { hinge })}
             />
           </li>

@@ -1,5 +1,6 @@
 'use client';
 
+import type { ReactNode } from 'react';
 import { SegmentedControl } from '@/components/ui/segmented-control';
 import type { Fixture, Obstacle, Zone } from '@/lib/layout/items';
 import { cornersOf, rectangleOf, rectangleRound } from '@/lib/layout/rectangles';
@@ -9,8 +10,8 @@ import { ValueField } from './value-field';
 
 type Outlined = Fixture | Obstacle | Zone;
 
-/** The outline of a body: a rectangle by width and depth, or a polygon by its corners. */
-export function OutlineFields({ item }: { readonly item: Outlined }) {
+/** The outline of a body: a rectangle by width and depth, or a polygon by its corners. `children` are further values of its size. */
+export function OutlineFields({ item, children }: { readonly item: Outlined; readonly children?: ReactNode }) {
   const edit = useItemEdit<Outlined>(item);
   const rectangle = rectangleOf(item);
   const size = rectangle && { width: rectangle.maxX - rectangle.minX, depth: rectangle.maxY - rectangle.minY };
@@ -39,26 +40,32 @@ export function OutlineFields({ item }: { readonly item: Outlined }) {
           { value: 'polygon', label: 'Polygon' },
         ]}
       />
-      {size ? (
+      {(size || children) && (
         <div className="mt-2 grid grid-cols-4 gap-x-3">
-          <ValueField
-            label="Width"
-            kind="length"
-            value={size.width}
-            step={50}
-            disabled={item.locked}
-            onCommit={(width) => resize(width, size.depth)}
-          />
-          <ValueField
-            label="Depth"
-            kind="length"
-            value={size.depth}
-            step={50}
-            disabled={item.locked}
-            onCommit={(depth) => resize(size.width, depth)}
-          />
+          {size && (
+            <>
+              <ValueField
+                label="Width"
+                kind="length"
+                value={size.width}
+                step={50}
+                disabled={item.locked}
+                onCommit={(width) => resize(width, size.depth)}
+              />
+              <ValueField
+                label="Depth"
+                kind="length"
+                value={size.depth}
+                step={50}
+                disabled={item.locked}
+                onCommit={(depth) => resize(size.width, depth)}
+              />
+            </>
+          )}
+          {children}
         </div>
-      ) : (
+      )}
+      {!size && (
         <CornerList
           points={item.outlineMm}
           least={3}

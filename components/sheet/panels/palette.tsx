@@ -28,7 +28,7 @@ const MEASURES: readonly { tool: ToolName; label: string; shortcut: string }[] =
 ];
 
 const ROW =
-  'flex min-h-[2.1rem] w-full items-center gap-3 pr-3.5 pl-[11px] text-left hover:bg-petrol-wash focus-visible:-outline-offset-2 aria-pressed:bg-petrol-wash aria-pressed:border-l-petrol border-l-[3px] border-transparent pointer-coarse:min-h-11';
+  'flex min-h-[1.85rem] w-full items-center gap-3 pr-3.5 pl-[11px] text-left hover:bg-petrol-wash focus-visible:-outline-offset-2 aria-pressed:bg-petrol-wash aria-pressed:border-l-petrol border-l-[3px] border-transparent pointer-coarse:min-h-11';
 
 /** Things to place and to measure with. A click takes the tool in hand; by keyboard the thing is placed at once. */
 export function Palette() {
