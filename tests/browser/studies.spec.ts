@@ -21,7 +21,7 @@ test('a standing map finds a better place for a base, puts it there in one step,
     .allInnerTexts();
   const [drawn, best] = cells.map(Number);
   expect(best).toBeGreaterThan(drawn);
-  await expect(page.locator('[data-standing-legend]')).toBeVisible();
+  await expect(page.locator('[data-study-legend="standing"]')).toBeVisible();
   await page.screenshot({ path: 'test-results/pictures/standing-map.png' });
 
   const x = await answer

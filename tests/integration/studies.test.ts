@@ -78,6 +78,18 @@ describe('a study', () => {
     });
   });
 
+  it('of the error gain is answered as well', async () => {
+    const { tool, wrist, robot, grid } = newStudyQuestion(armId);
+    const aim = { toolHeightMm: 300, tiltDeg: 0, towards: 'outward', headingDeg: 0, rollDeg: 'free' };
+    const errors = { turnErrorDeg: 0.02, slideErrorMm: 0.1 };
+    const { study } = await askAs(planner, { study: 'errorGain', armId, tool, wrist, robot, grid, ...aim, ...errors });
+    await runSlices(study!.id);
+    const { json } = await call(read, study!.id);
+    const { answer } = studySchema.parse(json);
+    expect(answer?.study === 'errorGain' && answer.values).toHaveLength(400);
+    expect(answer?.study === 'errorGain' && answer.median).toBeGreaterThan(0);
+  });
+
   it('is cancelled, and what still comes changes nothing; asked again it starts anew', async () => {
     const question = sliced();
     const { study } = await askAs(planner, question);

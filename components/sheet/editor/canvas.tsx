@@ -1,6 +1,6 @@
 'use client';
 
-import { useEffect, useMemo, useRef } from 'react';
+import { useEffect, useMemo, useRef, useState } from 'react';
 import {
   FloorPlanLayer,
   GridLayer,
@@ -12,13 +12,15 @@ import {
   SelectionHandles,
   ShapeGrips,
   SheetStage,
+  type DrawnBand,
   TaskWorkLayer,
 } from '@/components/sheet/drawing';
-import { StandingLegend } from '@/components/sheet/studies/standing-legend';
+import { StudyLegend } from '@/components/sheet/studies/study-legend';
 import { StudyMarks } from '@/components/sheet/studies/study-marks';
-import { useStandingOnFloor } from '@/components/sheet/studies/use-standing-map';
+import { useStudyFloor } from '@/components/sheet/studies/use-study-floor';
 import { useLayers } from '@/lib/client/use-layers';
 import { useUnits } from '@/lib/client/use-units';
+import { keepSameMap } from '@/lib/editor/keep-same';
 import { inOrder } from '@/lib/editor/order';
 import { shownItems } from '@/lib/editor/sheet';
 import { settledItems } from '@/lib/layout/attached-dimensions';
@@ -51,7 +53,7 @@ export function Canvas() {
   const layers = useLayers();
   const { unit } = useUnits();
   usePlanPoints();
-  const standing = useStandingOnFloor();
+  const study = useStudyFloor();
   const pointer = useToolPointer();
   const box = useRef<HTMLDivElement>(null);
   useMeasuredAndFitted(box);
@@ -65,9 +67,9 @@ export function Canvas() {
     () => shown.filter((item) => selection.itemIds.includes(item.id) && !item.hidden),
     [shown, selection],
   );
-  const bands = useMemo(
-    () => new Map([...byPoint].map(([pointId, { best }]) => [pointId, best?.band ?? ('unknown' as const)])),
-    [byPoint],
+  const [keepBands] = useState(keepSameMap<string, DrawnBand>);
+  const bands = keepBands(
+    useMemo(() => new Map([...byPoint].map(([pointId, { best }]) => [pointId, best?.band ?? 'unknown'])), [byPoint]),
   );
   const work = useMemo(() => floorWork(shown, cell), [shown, cell]);
   const { remarks, chosenId: chosenRemarkId, choose: onRemark } = useBoardRemarks();
@@ -108,11 +110,11 @@ export function Canvas() {
         >
           <GroundLayer>
             <MapLayer
-              map={standing?.map ?? floorMap}
+              map={study?.map ?? floorMap}
               scale={look.scale}
-              range={standing?.range ?? look.range}
-              threshold={standing || measure === 'reach' ? null : thresholds[measure]}
-              isoLines={standing || isDragging || isLive ? null : look.isoLines}
+              range={study?.range ?? look.range}
+              threshold={study || measure === 'reach' ? null : thresholds[measure]}
+              isoLines={study || isDragging || isLive ? null : look.isoLines}
               showsBranches={!isDragging && !isLive}
               opacity={layers.map}
             />
@@ -152,7 +154,7 @@ export function Canvas() {
           </OverlayLayer>
         </SheetStage>
       )}
-      <StandingLegend />
+      <StudyLegend />
       {tool.name !== 'select' && (
         <p
           role="status"

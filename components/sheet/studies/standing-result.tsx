@@ -22,7 +22,7 @@ export function StandingResult({ asked, answer }: StandingResultProps) {
   const { sheet } = useBoard();
   const mover = useBoardSheet((state) => state.items.get(asked.moverId));
   const store = useStudyStore();
-  const { isStandingShown } = useStudyView();
+  const isShown = useStudyView().shown === 'standing';
   const { unit, figure } = useUnits();
   const { best, drawn, feasibleAreaM2 } = answer;
   const count = asked.work.length;
@@ -79,12 +79,8 @@ export function StandingResult({ asked, answer }: StandingResultProps) {
             {isThere ? `${mover.name} stands there` : `Put ${mover.name} there`}
           </Button>
         )}
-        <Button
-          size="small"
-          onClick={() => store.set({ isStandingShown: !isStandingShown })}
-          aria-pressed={isStandingShown}
-        >
-          {isStandingShown ? 'Show the dexterity map' : 'Show on the floor'}
+        <Button size="small" onClick={() => store.set({ shown: isShown ? null : 'standing' })} aria-pressed={isShown}>
+          {isShown ? 'Show the dexterity map' : 'Show on the floor'}
         </Button>
       </div>
       {mover.locked && <Quiet>{mover.name} is locked. Unlock it to put it elsewhere.</Quiet>}

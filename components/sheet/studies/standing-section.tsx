@@ -75,7 +75,7 @@ export function StandingSection() {
     if (studyId === null) return;
     store.set({
       standing: { studyId, question, work, robotId: robot.id, moverId: mover.id },
-      isStandingShown: true,
+      shown: 'standing',
     });
   };
 

@@ -1,6 +1,7 @@
 'use client';
 
 import { ClearanceSection } from './clearance-section';
+import { ErrorGainSection } from './error-gain-section';
 import { StandingSection } from './standing-section';
 import { ToleranceSection } from './tolerance-section';
 
@@ -10,6 +11,7 @@ export function StudiesPanel() {
     <>
       <StandingSection />
       <ToleranceSection />
+      <ErrorGainSection />
       <ClearanceSection />
     </>
   );

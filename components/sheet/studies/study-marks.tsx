@@ -8,7 +8,7 @@ import type { Palette } from '@/lib/layout/palette';
 import { SPACE_WORDS, type SpaceKind } from '@/lib/layout/spaces/spaces';
 import { useSpaces } from './use-spaces';
 import { useStudyView } from './study-store';
-import { useStandingOnFloor } from './use-standing-map';
+import { useStudyFloor } from './use-study-floor';
 
 /** Marks of studies over the drawing: the best place, and the spaces that are shown. */
 export function StudyMarks() {
@@ -24,9 +24,9 @@ export function StudyMarks() {
 const CROSS_PX = 11;
 
 function BestPlace() {
-  const shown = useStandingOnFloor();
+  const floor = useStudyFloor();
   const palette = usePalette();
-  const best = shown?.answer.best;
+  const best = floor?.best;
   if (!best) return null;
   return (
     <Shape

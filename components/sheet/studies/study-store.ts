@@ -1,7 +1,7 @@
 import { useSyncExternalStore } from 'react';
 import { useBoard } from '@/components/sheet/editor/board-context';
 import type { NamedWork } from '@/lib/layout/standing/ask';
-import type { StandingQuestion, ToleranceQuestion } from '@/lib/layout/standing/question';
+import type { ErrorGainQuestion, StandingQuestion, ToleranceQuestion } from '@/lib/layout/standing/question';
 import type { SpaceKind } from '@/lib/layout/spaces/spaces';
 
 /** A study that was asked from this sheet, and what it was asked about. */
@@ -17,8 +17,9 @@ export interface AskedStudy<Question> {
 /** What the sheet shows of studies and spaces: looking is not editing, so it is not saved. */
 export interface StudyView {
   readonly standing: AskedStudy<StandingQuestion> | null;
-  /** The standing map lies on the floor in place of the dexterity map. */
-  readonly isStandingShown: boolean;
+  readonly errorGain: AskedStudy<ErrorGainQuestion> | null;
+  /** The study that lies on the floor in place of the dexterity map. */
+  readonly shown: 'standing' | 'errorGain' | null;
   readonly tolerance: AskedStudy<ToleranceQuestion> | null;
   readonly spaces: ReadonlySet<SpaceKind>;
   readonly showsOverlap: boolean;
@@ -26,7 +27,8 @@ export interface StudyView {
 
 const NOTHING: StudyView = {
   standing: null,
-  isStandingShown: false,
+  errorGain: null,
+  shown: null,
   tolerance: null,
   spaces: new Set(),
   showsOverlap: false,

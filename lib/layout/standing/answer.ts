@@ -54,10 +54,25 @@ export const toleranceAnswerSchema = z.object({
   keptByPoint: z.array(z.number().int().nullable()),
 });
 
-export const studyAnswerSchema = z.discriminatedUnion('study', [standingAnswerSchema, toleranceAnswerSchema]);
+export const errorGainAnswerSchema = z.object({
+  study: z.literal('errorGain'),
+  /** Row by row: how far the tool point may be off, mm; or NOT_REACHED. */
+  values: z.array(z.number()),
+  /** Least, median and most of the floor that is reached, mm; null where nothing is. */
+  least: z.number().nullable(),
+  median: z.number().nullable(),
+  most: z.number().nullable(),
+});
+
+export const studyAnswerSchema = z.discriminatedUnion('study', [
+  standingAnswerSchema,
+  toleranceAnswerSchema,
+  errorGainAnswerSchema,
+]);
 
 export type PointOutcome = z.infer<typeof pointOutcomeSchema>;
 export type Stand = z.infer<typeof standSchema>;
 export type StandingAnswer = z.infer<typeof standingAnswerSchema>;
 export type ToleranceAnswer = z.infer<typeof toleranceAnswerSchema>;
+export type ErrorGainAnswer = z.infer<typeof errorGainAnswerSchema>;
 export type StudyAnswer = z.infer<typeof studyAnswerSchema>;

@@ -6,7 +6,8 @@ import { patternPlaces } from '../judging/places';
 import { reachRadius } from '../reach-radius';
 import { armWithTool } from '../robot-frame';
 import { takenOutlines } from './taken-floor';
-import type { StandingQuestion, ToleranceQuestion, WorkPoint } from './question';
+import type { MapSettings } from '../map-settings';
+import type { ErrorGainQuestion, StandingQuestion, ToleranceQuestion, WorkPoint } from './question';
 import { squareMm } from './standing-map';
 
 /** From a sheet to the question of a study. */
@@ -138,6 +139,26 @@ export function toleranceOfRobot(
 ): ToleranceQuestion {
   const { wrist, placeMm, turnDeg, levelDeg, trials } = options;
   return { study: 'tolerance', ...askedOf(robot, wrist, work), placeMm, turnDeg, levelDeg, trials, seed: SEED };
+}
+
+/** How far off is the tool, over all the floor that the robot reaches at the sheet's tool height and direction? */
+export function errorGainOfRobot(
+  robot: Robot,
+  arm: Arm,
+  settings: Pick<MapSettings, 'wrist' | 'toolHeightMm' | 'tiltDeg' | 'towards' | 'headingDeg' | 'rollDeg'>,
+  options: Pick<ErrorGainQuestion, 'turnErrorDeg' | 'slideErrorMm'> & { readonly stepMm: number },
+): ErrorGainQuestion {
+  const { points: _, ...standing } = askedOf(robot, settings.wrist, []);
+  const { toolHeightMm, tiltDeg, towards, headingDeg, rollDeg } = settings;
+  const { stepMm, ...errors } = options;
+  const cells = Math.ceil((reachRadius(armWithTool(arm, robot.tool)) * 1000) / stepMm);
+  const grid = {
+    originMm: [tidy(robot.xMm - cells * stepMm), tidy(robot.yMm - cells * stepMm)] as [number, number],
+    stepMm,
+    columns: 2 * cells + 1,
+    rows: 2 * cells + 1,
+  };
+  return { study: 'errorGain', ...standing, toolHeightMm, tiltDeg, towards, headingDeg, rollDeg, ...errors, grid };
 }
 
 function turnsFrom(angleDeg: number, count: number): number[] {

@@ -21,8 +21,8 @@ const workPointSchema = z.object({
   speedMmS: z.number().positive().max(20_000).nullable(),
 });
 
-/** A robot and the work that falls to it. */
-const work = {
+/** A robot with its tool, as it stands. */
+const standing = {
   armId: z.uuid(),
   tool: z.object({
     xMm: millimetres,
@@ -34,11 +34,24 @@ const work = {
   }),
   wrist: z.enum(['held', 'free']),
   robot: z.object({ ...placement, riserMm }),
+};
+
+/** A robot and the work that falls to it. */
+const work = {
+  ...standing,
   points: z
     .array(workPointSchema)
     .min(1, 'The robot has no task point. Put one on a fixture first.')
     .max(500, 'A study takes at most 500 task points.'),
 };
+
+const gridSchema = z.object({
+  /** The first place, mm; columns follow along x, rows along y. */
+  originMm: pointMm,
+  stepMm: z.number().min(5, 'A step is 5 mm or more.').max(1000, 'A step is at most 1000 mm.'),
+  columns: z.number().int().min(1).max(2000),
+  rows: z.number().int().min(1).max(2000),
+});
 
 export const standingQuestionSchema = z
   .object({
@@ -52,13 +65,7 @@ export const standingQuestionSchema = z
     footprintMm: outline.nullable(),
     /** Floor that is taken: zones without bases, obstacles, other fixtures. */
     blocksMm: z.array(outline).max(300, 'At most 300 outlines.'),
-    grid: z.object({
-      /** The first place, mm; columns follow along x, rows along y. */
-      originMm: pointMm,
-      stepMm: z.number().min(5, 'A step is 5 mm or more.').max(1000, 'A step is at most 1000 mm.'),
-      columns: z.number().int().min(1).max(2000),
-      rows: z.number().int().min(1).max(2000),
-    }),
+    grid: gridSchema,
     turnsDeg: z.array(degrees).min(1).max(72, 'At most 72 turns.'),
     /** Heights of the riser that are tried; a study of a fixture leaves the robot's own. */
     risersMm: z.array(riserMm).min(1).max(20, 'At most 20 riser heights.'),
@@ -84,9 +91,31 @@ export const toleranceQuestionSchema = z.object({
     .max(2 ** 31),
 });
 
-export const studyQuestionSchema = z.discriminatedUnion('study', [standingQuestionSchema, toleranceQuestionSchema]);
+/** How far the tool may be off at every spot of the floor where every joint is off by a stated error. */
+export const errorGainQuestionSchema = z.object({
+  study: z.literal('errorGain'),
+  ...standing,
+  /** Over the floor. */
+  toolHeightMm: millimetres,
+  /** As with maps: 0 straight down; a tilted tool points away from the base or along one heading of the floor. */
+  tiltDeg: z.number().min(0).max(180),
+  towards: z.enum(['outward', 'heading']),
+  headingDeg: degrees,
+  rollDeg: z.union([degrees, z.literal('free')]),
+  /** Error of every turning joint, ± degrees, and of every sliding one, ± mm. */
+  turnErrorDeg: z.number().min(0, 'An error is 0 or more.').max(10),
+  slideErrorMm: z.number().min(0, 'An error is 0 or more.').max(100),
+  grid: gridSchema,
+});
+
+export const studyQuestionSchema = z.discriminatedUnion('study', [
+  standingQuestionSchema,
+  toleranceQuestionSchema,
+  errorGainQuestionSchema,
+]);
 
 export type WorkPoint = z.infer<typeof workPointSchema>;
 export type StandingQuestion = z.infer<typeof standingQuestionSchema>;
 export type ToleranceQuestion = z.infer<typeof toleranceQuestionSchema>;
+export type ErrorGainQuestion = z.infer<typeof errorGainQuestionSchema>;
 export type StudyQuestion = z.infer<typeof studyQuestionSchema>;

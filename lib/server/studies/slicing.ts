@@ -26,7 +26,8 @@ export interface StudyInput {
 function workOfPoint({ question, arm }: StudyInput): number {
   const { closedForm, toolOnLastAxis } = makeSolver(armWithTool(arm, question.tool));
   if (!closedForm) return NUMERICAL_WORK;
-  const searches = !toolOnLastAxis && question.points.some(({ rollDeg }) => rollDeg === 'free');
+  const poses = question.study === 'errorGain' ? [question] : question.points;
+  const searches = !toolOnLastAxis && poses.some(({ rollDeg }) => rollDeg === 'free');
   if (closedForm.family) return searches ? SEARCHED_FAMILY_WORK : FAMILY_WORK;
   return searches ? SEARCHED_ROLL_WORK : 1;
 }

@@ -31,6 +31,8 @@ export async function startAttempt(
     transaction,
     expireInSeconds: Math.max(studySliceJob.options.expireInSeconds, Math.ceil(SLACK * secondsPerSlice(input))),
   });
-  const details = { attempt, study: input.question.study, points: input.question.points.length };
+  const { question } = input;
+  const points = question.study === 'errorGain' ? {} : { points: question.points.length };
+  const details = { attempt, study: question.study, ...points };
   await recordAudit(actor, { action: 'study.asked', subjectId: study.id, details }, transaction);
 }

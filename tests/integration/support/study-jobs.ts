@@ -1,5 +1,5 @@
 import { QueryTypes } from 'sequelize';
-import { studyQuestionSchema, type StudyQuestion } from '@/lib/contracts/studies';
+import { standingQuestionSchema, type StandingQuestion } from '@/lib/layout/standing/question';
 import { sequelize } from '@/lib/server/database';
 import { studySliceJob, type StudySliceJob } from '@/lib/server/jobs';
 import { QUEUE_SCHEMA } from '@/lib/server/queue';
@@ -10,9 +10,9 @@ import { runStudySlice } from '@/lib/server/studies/run-slice';
 let lifted = 0;
 
 /** A small standing map that nobody has asked yet: one point, 20 by 20 places. */
-export function newStudyQuestion(armId: string, change: object = {}): StudyQuestion {
+export function newStudyQuestion(armId: string, change: object = {}): StandingQuestion {
   lifted += 1;
-  return studyQuestionSchema.parse({
+  return standingQuestionSchema.parse({
     study: 'standing',
     mover: 'robot',
     armId,
