@@ -2,6 +2,7 @@ import { arch, cpus, loadavg } from 'node:os';
 import { compareAnalysisAndInverse } from '../bench/analysis-and-inverse';
 import { compareWithBaseRate } from '../bench/base-rate';
 import { heapGrowth } from '../bench/heap';
+import { frames } from '../bench/browser/frames';
 import { liveMap } from '../bench/browser/live-map';
 import { compareRoutes, growth } from '../bench/maps';
 import { say, title } from '../bench/print';
@@ -22,6 +23,7 @@ const PARTS: Record<string, () => Promise<void>> = {
   heap: heapGrowth,
   workers: compareWorkers,
   live: liveMap,
+  frames,
 };
 
 const asked = process.argv.slice(2);
@@ -37,7 +39,7 @@ say(
   'Pin it to one processor for steady numbers, for instance: taskset -c 1 npm run bench -- base library inverse maps',
 );
 /** These need the product running, so they only run when asked for. */
-const ON_REQUEST: readonly string[] = ['live'];
+const ON_REQUEST: readonly string[] = ['live', 'frames'];
 
 const usual = Object.keys(PARTS).filter((name) => !ON_REQUEST.includes(name));
 for (const name of asked.length > 0 ? asked : usual) await PARTS[name]();

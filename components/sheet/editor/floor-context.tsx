@@ -3,6 +3,7 @@
 import { createContext, useContext, useMemo, useState, type ReactNode } from 'react';
 import type { MapEntry } from '@/lib/client/map-book';
 import { useMaps } from '@/lib/client/use-maps';
+import { keepSame } from '@/lib/editor/keep-same';
 import { inOrder } from '@/lib/editor/order';
 import { shownItems } from '@/lib/editor/sheet';
 import type { MapTile } from '@/lib/kinematics/types';
@@ -88,7 +89,9 @@ export function FloorProvider({ children }: { readonly children: ReactNode }) {
   const heights = shownHeights(settings);
   const stacks = useMemo(() => worstByRobot(shownByRobot, heights.length), [shownByRobot, heights.length]);
 
-  const shown = useMemo(() => inOrder(shownItems({ items, draft })).filter(isRobot), [items, draft]);
+  // The same robots while something else is dragged: the floor map is then not laid anew.
+  const [keepRobots] = useState(keepSame<readonly Robot[]>);
+  const shown = keepRobots(useMemo(() => inOrder(shownItems({ items, draft })).filter(isRobot), [items, draft]));
   const isOneHeight = heights.length === 1;
   const live = useLiveMaps(isOneHeight ? shown : NO_ROBOTS, settings, arms, byRobot);
   const laid = useMemo(() => {

@@ -1,6 +1,7 @@
 'use client';
 
 import { createContext, useContext, useDeferredValue, useMemo, useState, type Context, type ReactNode } from 'react';
+import { keepSame, keepSameMap } from '@/lib/editor/keep-same';
 import { inOrder } from '@/lib/editor/order';
 import {
   bestPlumb,
@@ -67,10 +68,16 @@ export function ReadingsProvider({ children }: { readonly children: ReactNode })
   const judged = useDeferredValue(ordered);
   // Remembers from one look to the next what did not change: a drag judges only what it moves.
   const [judge] = useState(makeCellJudge);
-  const cell = useMemo(
+  // What comes out as before keeps its identity, so that lists and shapes that have nothing to do with a drag are left alone.
+  const [keepPoints] = useState(keepSame<CellVerdicts['points']>);
+  const [keepPaths] = useState(keepSame<CellVerdicts['paths']>);
+  const [keepPatterns] = useState(keepSame<CellVerdicts['patterns']>);
+  const found = useMemo(
     () => judge(judged, (armId) => arms.get(armId)?.definition, settings.wrist),
     [judge, judged, arms, settings.wrist],
   );
+  const [points, paths, patterns] = [keepPoints(found.points), keepPaths(found.paths), keepPatterns(found.patterns)];
+  const cell = useMemo<CellVerdicts>(() => ({ points, paths, patterns }), [points, paths, patterns]);
   const verdicts = cell.points;
   const judgement = useMemo(
     () => ({ cell, verdicts: cell.points, byPoint: new Map(cell.points.map((verdict) => [verdict.pointId, verdict])) }),
@@ -101,7 +108,8 @@ export function ReadingsProvider({ children }: { readonly children: ReactNode })
   }, [spot, robots, chosenRobotId, arms, settings]);
   const posture = reading?.postures.find((entry) => entry.branch === branch) ?? reading?.postures[0] ?? null;
 
-  const postures = useMemo(() => {
+  const [keepPostures] = useState(keepSameMap<string, readonly number[]>);
+  const standingNow = useMemo(() => {
     const standing = new Map<string, readonly number[]>();
     for (const robot of robots) {
       const joints = reading?.robot.id === robot.id ? posture?.joints : workPosture(robot.id, verdicts);
@@ -111,6 +119,7 @@ export function ReadingsProvider({ children }: { readonly children: ReactNode })
     }
     return standing;
   }, [robots, reading, posture, verdicts, arms]);
+  const postures = keepPostures(standingNow);
 
   const plumb = useMemo<Plumb>(
     () => ({ spot, reading, posture, robots, chosenRobotId, chooseRobot, chooseBranch }),
