@@ -1,6 +1,6 @@
 'use client';
 
-import { ArrowDown, ArrowUp, Copy, Ellipsis, Eye, EyeOff, Lock, LockOpen, Pencil, Trash2 } from 'lucide-react';
+import { ArrowDown, ArrowUp, Copy, Ellipsis, Eye, EyeOff, Group, Lock, LockOpen, Pencil, Trash2 } from 'lucide-react';
 import { useRef, type KeyboardEvent } from 'react';
 import { useBoard, useBoardSheet } from '@/components/sheet/editor/board-context';
 import { useSelectionCommands } from '@/components/sheet/editor/use-selection-commands';
@@ -101,6 +101,9 @@ function Row({ item }: { readonly item: Item }) {
             note.tone === 'red' && 'text-red',
           )}
         >
+          {item.groupId && (
+            <Group role="img" aria-label="In a group." className="mr-1.5 inline size-3.5 align-[-2px] text-ink-soft" />
+          )}
           {note.words}
         </span>
       </button>

@@ -33,9 +33,12 @@ export async function manyItems(page: Page, count: number): Promise<ManyItems> {
       [method, path, body === undefined ? '' : JSON.stringify(body)] as const,
     );
   const { projectId, id: cellId } = await cellWithRobots(ask);
+  // One that an interrupted run has left.
+  const { layouts } = layoutsSchema.parse(await ask('GET', `/api/projects/${projectId}/layouts`));
+  for (const { id, name } of layouts) if (name === NAME) await ask('DELETE', `/api/layouts/${id}`);
   const made = z
     .looseObject({ id: z.string() })
-    .parse(await ask('POST', `/api/projects/${projectId}/layouts`, { name: 'For timing', copyOf: cellId }));
+    .parse(await ask('POST', `/api/projects/${projectId}/layouts`, { name: NAME, copyOf: cellId }));
   const layout = layoutSchema.parse(await ask('GET', `/api/layouts/${made.id}`));
   const placed = rows(count - layout.items.length);
   const operations = placed.map((item) => ({ type: 'put', baseVersion: 0, item }));
@@ -50,10 +53,14 @@ export async function manyItems(page: Page, count: number): Promise<ManyItems> {
   };
 }
 
+const NAME = 'For timing';
+
 type Ask = (method: string, path: string, body?: unknown) => Promise<unknown>;
 
 const projectsSchema = z.looseObject({ projects: z.array(z.looseObject({ id: z.string() })) });
-const layoutsSchema = z.looseObject({ layouts: z.array(z.looseObject({ id: z.string(), itemCount: z.number() })) });
+const layoutsSchema = z.looseObject({
+  layouts: z.array(z.looseObject({ id: z.string(), name: z.string(), itemCount: z.number() })),
+});
 
 async function cellWithRobots(ask: Ask): Promise<z.infer<typeof layoutSchema>> {
   for (const project of projectsSchema.parse(await ask('GET', '/api/projects')).projects) {
