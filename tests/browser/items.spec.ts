@@ -101,7 +101,7 @@ test('a planner draws every kind of thing by clicks, edits an outline and keeps 
     await expect(value('Corner 3, x')).toHaveValue('800');
     await expect(page.getByText(/of the outline cross/).first()).toBeAttached();
     await set('Corner 1, x', 'wide');
-    await expect(sheet.values.getByRole('alert')).toContainText(/number/);
+    await expect(sheet.values.getByRole('alert')).toContainText(/is no length/);
     await page.keyboard.press('Escape');
     await sheet.click(3300, 2500);
     await page.keyboard.press('Delete');
