@@ -29,8 +29,8 @@ const nextConfig = {
   reactStrictMode: true,
   headers: async () => [
     { source: '/:path*', headers: everywhere },
-    { source: '/:page(share|invitation|reset-password)/:path*', headers: addressIsAKey },
-    { source: '/api/share/:path*', headers: [{ key: 'Referrer-Policy', value: 'no-referrer' }] },
+    { source: '/:page(share|invitation|reset-password|unsubscribe)/:path*', headers: addressIsAKey },
+    { source: '/api/:link(share|unsubscribe)/:path*', headers: [{ key: 'Referrer-Policy', value: 'no-referrer' }] },
   ],
 };
 

@@ -15,7 +15,7 @@ export function hashToken(token: string): string {
  * The token of a link that a queued mail carries, made from the row's id and the server's secret. So it never lies in the
  * queue or the database, and a mail that is sent again carries the same link.
  */
-export function derivedToken(purpose: 'invitation' | 'password-reset' | 'guest', id: string): string {
+export function derivedToken(purpose: 'invitation' | 'password-reset' | 'guest' | 'unsubscribe', id: string): string {
   const key = Buffer.from(hkdfSync('sha256', env.AUTH_SECRET, '', 'elbowroom link tokens', 32));
   return createHmac('sha256', key).update(`${purpose}:${id}`).digest('base64url');
 }

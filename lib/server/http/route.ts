@@ -23,6 +23,8 @@ interface RouteOptions<R extends Role | 'public', P extends Schema, Q extends Sc
   query?: Q;
   /** A schema for JSON; 'stream' leaves `request.body` to the handler; 'none' (also when left out) reads nothing. */
   body?: B;
+  /** Lets a request in that no page of ours sent; only for a public route whose address is itself the permission. */
+  fromAnywhere?: true;
 }
 
 export interface RouteContext<R extends Role | 'public', P, Q, B> {
@@ -51,7 +53,7 @@ export function route<
     let response: Response;
     try {
       // A browser adds a cookie by itself, an Authorization header never: only the cookie needs the page's word.
-      if (readBearer(request) === null) demandSameOrigin(request);
+      if (!options.fromAnywhere && readBearer(request) === null) demandSameOrigin(request);
       const actor = options.role === 'public' ? null : await demandActor(request, options.role);
       const params = options.params && parseParams(options.params, await context?.params);
       const query = options.query && parseInput(options.query, Object.fromEntries(new URL(request.url).searchParams));

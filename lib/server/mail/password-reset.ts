@@ -2,7 +2,7 @@ import { Membership, PasswordReset, User } from '@/models';
 import { env } from '../env';
 import { derivedToken, hashToken } from '../tokens';
 import type { Message } from './message';
-import type { Envelope } from './templates';
+import type { Envelope } from './compose';
 
 const VALID_MINUTES = 60;
 

@@ -2,7 +2,9 @@ import { randomUUID } from 'node:crypto';
 import type { Transaction } from '../database';
 import { mailJob } from '../jobs';
 import { enqueue } from '../queue';
-import { TEMPLATES } from './templates';
+import { mailChoiceOf } from './choices';
+import { keepForDigest } from './digest';
+import { mayBeChosen, TEMPLATES } from './templates';
 import type { TemplateData, TemplateName } from './templates';
 
 interface MailOrder<T extends TemplateName> {
@@ -11,11 +13,19 @@ interface MailOrder<T extends TemplateName> {
   data: TemplateData<T>;
 }
 
-/** Queues a mail with the transaction of what it tells of: rolled back, it is never sent. Throws ZodError for data that does not fit. */
+/**
+ * Queues a mail with the transaction of what it tells of: rolled back, it is never sent. Somebody who chose a daily mail gets it in
+ * that, somebody who chose none does not get it. Throws ZodError for data that does not fit.
+ */
 export async function sendMailLater<T extends TemplateName>(
   order: MailOrder<T>,
   transaction: Transaction,
 ): Promise<void> {
   const data = TEMPLATES[order.template].schema.parse(order.data);
-  await enqueue(mailJob, { id: randomUUID(), to: order.to, template: order.template, data }, { transaction });
+  const { to, template } = order;
+  const id = randomUUID();
+  const choice = mayBeChosen(template) ? await mailChoiceOf(to, transaction) : 'at_once';
+  if (choice === 'none') return;
+  if (choice === 'daily') return keepForDigest({ id, email: to.toLowerCase(), template, data }, transaction);
+  await enqueue(mailJob, { id, to, template, data }, { transaction });
 }

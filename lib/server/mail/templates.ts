@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import type { Envelope } from './compose';
 import type { Message } from './message';
 import { composeInvitation } from './invitation';
 import { composePasswordReset } from './password-reset';
@@ -12,12 +13,6 @@ import {
   remarkDataSchema,
   replyDataSchema,
 } from './remark';
-
-/** The job's own id and whom the mail is for. */
-export interface Envelope {
-  id: string;
-  to: string;
-}
 
 /** Null where there is nothing to send any more: an invitation withdrawn, an address without an account. */
 type Compose<D> = (data: D, envelope: Envelope) => Promise<Message | null> | Message | null;
@@ -44,6 +39,11 @@ export const TEMPLATES = {
   'sign-off': template(signOffDataSchema, composeSignOff),
   'sign-off-receipt': template(signOffDataSchema, composeSignOffReceipt),
 };
+
+/** What has to arrive whatever somebody chose: it was asked for, or it is a receipt. */
+const ALWAYS: readonly TemplateName[] = ['invitation', 'password-reset', 'sign-off-receipt'];
+
+export const mayBeChosen = (template: TemplateName): boolean => !ALWAYS.includes(template);
 
 export type TemplateName = keyof typeof TEMPLATES;
 export type TemplateData<T extends TemplateName> = z.input<(typeof TEMPLATES)[T]['schema']>;
