@@ -5,13 +5,16 @@ import { SubjectFault } from '@/components/shell/subject-fault';
 import { Page } from '@/components/ui/page';
 import { TitleBlock } from '@/components/ui/title-block';
 import { useMayActAs } from '@/lib/client/account-context';
-import { sheetRefText, type SheetRef } from '@/lib/client/sheet-ref';
+import { comparisonViewSchema } from '@/lib/contracts/comparisons';
+import { parseSheetRef, sheetRefText, type SheetRef } from '@/lib/client/sheet-ref';
 import { useProject } from '@/lib/client/use-project';
 import { useSheetChoices } from '@/lib/client/use-sheet-choices';
 import { useSheetDocument } from '@/lib/client/use-sheet-document';
 import { SheetPicker } from './sheet-picker';
 import { chosenSheets } from './chosen-sheets';
 import { ComparedSheets } from './compared-sheets';
+
+type Side = 'left' | 'right' | 'third' | 'fourth';
 
 /** Two sheets of a project side by side: map against map, number against number, thing against thing. */
 export default function ComparePage({ projectId }: { readonly projectId: string }) {
@@ -23,6 +26,17 @@ export default function ComparePage({ projectId }: { readonly projectId: string 
   const [leftRef, rightRef] = chosenSheets(search, choices, mayAsk);
   const leftAsked = useSheetDocument(leftRef);
   const rightAsked = useSheetDocument(rightRef);
+  const [thirdRef, fourthRef] = [parseSheetRef(search.get('third')), parseSheetRef(search.get('fourth'))];
+  const thirdAsked = useSheetDocument(thirdRef);
+  const fourthAsked = useSheetDocument(fourthRef);
+  const view = comparisonViewSchema
+    .partial()
+    .catch({})
+    .parse({
+      measure: search.get('measure') ?? undefined,
+      wrist: search.get('wrist') ?? undefined,
+    });
+  const sheets = [leftRef, rightRef, thirdRef, fourthRef].flatMap((ref) => (ref ? sheetRefText(ref) : []));
 
   const fault = project.error ?? choicesError;
   if (fault) {
@@ -36,14 +50,19 @@ export default function ComparePage({ projectId }: { readonly projectId: string 
       />
     );
   }
-  const choose = (side: 'left' | 'right') => (ref: string) => {
+  const goTo = (changes: Record<string, string | undefined>) => {
     const next = new URLSearchParams(search);
     if (leftRef) next.set('left', sheetRefText(leftRef));
     if (rightRef) next.set('right', sheetRefText(rightRef));
-    next.set(side, ref);
+    for (const [name, value] of Object.entries(changes)) {
+      if (value) next.set(name, value);
+      else next.delete(name);
+    }
     router.replace(`?${next}`, { scroll: false });
   };
-  const picker = (label: string, chosen: SheetRef | null, side: 'left' | 'right') =>
+  // The same one again takes a further sheet out of the table.
+  const choose = (side: Side) => (ref: string) => goTo({ [side]: ref === search.get(side) ? undefined : ref });
+  const picker = (label: string, chosen: SheetRef | null, side: Side) =>
     choices ? (
       <SheetPicker label={label} choices={choices} chosen={chosen} withDrafts={mayAsk} onChoose={choose(side)} />
     ) : (
@@ -62,6 +81,8 @@ export default function ComparePage({ projectId }: { readonly projectId: string 
           },
           { label: 'Left sheet', value: picker('Left sheet', leftRef, 'left') },
           { label: 'Right sheet', value: picker('Right sheet', rightRef, 'right') },
+          { label: 'Also in the table', value: picker('Third sheet', thirdRef, 'third'), wideOnly: true },
+          ...(thirdRef ? [{ label: 'And', value: picker('Fourth sheet', fourthRef, 'fourth'), wideOnly: true }] : []),
         ]}
       />
       <Page>
@@ -70,6 +91,11 @@ export default function ComparePage({ projectId }: { readonly projectId: string 
           leftRef={leftRef}
           left={leftAsked}
           right={rightAsked}
+          third={thirdAsked}
+          fourth={fourthAsked}
+          sheets={sheets}
+          view={view}
+          onViewChange={goTo}
           isEmpty={choices !== null && !(leftRef && rightRef)}
           mayAsk={mayAsk}
         />

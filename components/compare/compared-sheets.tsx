@@ -13,6 +13,9 @@ import { type AskedDocument } from '@/lib/client/use-sheet-document';
 import { mapSettingsSchema, type MapSettings } from '@/lib/layout/map-settings';
 import { directionWords, wristWords } from '@/lib/layout/measure-words';
 import type { MapScale } from '@/lib/layout/scales';
+import type { ComparisonView } from '@/lib/contracts/comparisons';
+import { CompareTools, type CompareLook } from './compare-tools';
+import { Distributions } from './distributions';
 import { ChangedPanel } from './changed-panel';
 import { FiguresTable } from './figures-table';
 import { RemarksOnSheet, useRemarksOn } from './remarks-on-sheet';
@@ -28,14 +31,23 @@ interface ComparedSheetsProps {
   readonly leftRef: SheetRef | null;
   readonly left: AskedDocument;
   readonly right: AskedDocument;
+  readonly third: AskedDocument;
+  readonly fourth: AskedDocument;
+  /** From the address, and back into it. */
+  readonly view: Partial<ComparisonView>;
+  readonly onViewChange: (view: Partial<ComparisonView>) => void;
+  /** The sheets as the address names them. */
+  readonly sheets: readonly string[];
   /** The project has not got two sheets to compare. */
   readonly isEmpty: boolean;
   readonly mayAsk: boolean;
 }
 
 /** The comparison itself, once both sheets are there. */
-export function ComparedSheets({ projectId, leftRef, left, right, isEmpty, mayAsk }: ComparedSheetsProps) {
-  const [changes, setChanges] = useState<Partial<Pick<MapSettings, 'measure' | 'wrist'>>>({});
+export function ComparedSheets(props: ComparedSheetsProps) {
+  const { projectId, leftRef, left, right, third, fourth, isEmpty, mayAsk, sheets } = props;
+  const { view: changes, onViewChange: setChanges } = props;
+  const [look, setLook] = useState<CompareLook>('beside');
   const [scale, setScale] = useState<MapScale>('tide');
   const settings = useMemo<MapSettings>(
     () => ({ ...(left.document?.settings ?? UNASKED), ...changes }),
@@ -43,7 +55,9 @@ export function ComparedSheets({ projectId, leftRef, left, right, isEmpty, mayAs
   );
   const leftSide = useSide(left.document, settings, mayAsk);
   const rightSide = useSide(right.document, settings, mayAsk);
-  const comparison = useComparison(leftSide, rightSide, settings);
+  const thirdSide = useSide(third.document, settings, mayAsk);
+  const fourthSide = useSide(fourth.document, settings, mayAsk);
+  const comparison = useComparison(leftSide, rightSide, settings, thirdSide, fourthSide);
   const remarks = useRemarksOn(leftRef);
 
   if (isEmpty) {
@@ -74,7 +88,17 @@ export function ComparedSheets({ projectId, leftRef, left, right, isEmpty, mayAs
   const [leftName, rightName] = shortNames(comparison.left.document, comparison.right.document);
   return (
     <div className="grid gap-3.5">
+      <CompareTools
+        projectId={projectId}
+        name={`${leftName} against ${rightName}`}
+        sheets={sheets}
+        view={{ measure: settings.measure, wrist: settings.wrist }}
+        look={look}
+        onLookChange={setLook}
+        mayKeep={mayAsk}
+      />
       <SheetTrio
+        look={look}
         comparison={comparison}
         scale={scale}
         leftRemarks={remarks ?? []}
@@ -109,7 +133,16 @@ export function ComparedSheets({ projectId, leftRef, left, right, isEmpty, mayAs
             </>
           }
         >
-          <FiguresTable figures={comparison.figures} leftName={leftName} rightName={rightName} />
+          <FiguresTable
+            figures={comparison.figures}
+            leftName={leftName}
+            rightName={rightName}
+            others={comparison.others.map(({ side, figures }) => ({
+              name: `${side.document.letter} ${side.document.mark}`,
+              figures,
+            }))}
+          />
+          <Distributions comparison={comparison} leftName={leftName} rightName={rightName} />
         </Panel>
         <div>
           <ChangedPanel changed={comparison.changed} />

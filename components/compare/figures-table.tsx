@@ -7,13 +7,15 @@ interface FiguresTableProps {
   readonly figures: readonly ComparedFigure[];
   readonly leftName: string;
   readonly rightName: string;
+  /** Up to two more sheets, each against the left one. */
+  readonly others?: readonly { readonly name: string; readonly figures: readonly ComparedFigure[] }[];
 }
 
 const TONES = { better: 'text-petrol', worse: 'text-red', none: 'text-ink' } as const;
 const WORDS = { better: 'better', worse: 'worse', none: '' } as const;
 
 /** Number against number: colour says whether a change helps, the bars how much. */
-export function FiguresTable({ figures, leftName, rightName }: FiguresTableProps) {
+export function FiguresTable({ figures, leftName, rightName, others = [] }: FiguresTableProps) {
   return (
     <DataTable caption={`Numbers of ${leftName} and ${rightName}`} className="min-w-[34rem]">
       <thead>
@@ -32,18 +34,32 @@ export function FiguresTable({ figures, leftName, rightName }: FiguresTableProps
           <HeadCell figures>
             {rightName} − {leftName}
           </HeadCell>
+          {others.map(({ name }) => (
+            <HeadCell key={name} figures>
+              {name}
+            </HeadCell>
+          ))}
         </tr>
       </thead>
       <tbody>
         {figures.map((figure) => (
-          <FigureRow key={figure.label} figure={figure} />
+          <FigureRow
+            key={figure.label}
+            figure={figure}
+            others={others.flatMap(({ figures: further }) => further.find(({ label }) => label === figure.label) ?? [])}
+          />
         ))}
       </tbody>
     </DataTable>
   );
 }
 
-function FigureRow({ figure }: { readonly figure: ComparedFigure }) {
+interface FigureRowProps {
+  readonly figure: ComparedFigure;
+  readonly others: readonly ComparedFigure[];
+}
+
+function FigureRow({ figure, others }: FigureRowProps) {
   const { label, unit, decimals, left, right, leftOf, rightOf } = figure;
   const verdict = verdictOf(figure);
   const figureText = (value: number | null, of: number | undefined) =>
@@ -68,6 +84,12 @@ function FigureRow({ figure }: { readonly figure: ComparedFigure }) {
         {formatFigure(change, { decimals, signed: true })}
         <span className="sr-only"> {WORDS[verdict]}</span>
       </DataCell>
+      {others.map((other, index) => (
+        <DataCell key={index} figures className={classNames('h-7.5! py-0.5!', TONES[verdictOf(other)])}>
+          {figureText(other.right, other.rightOf)}
+          <span className="sr-only"> {WORDS[verdictOf(other)]}</span>
+        </DataCell>
+      ))}
     </DataRow>
   );
 }

@@ -22,6 +22,8 @@ import type { Remark } from '@/lib/contracts/remarks';
 import { shortNames } from './sheet-names';
 import { LEAST_HEIGHT_PX, TrioPanel } from './trio-panel';
 import { DifferenceKey, ScaleKey } from './trio-keys';
+import { SwipeSheets } from './swipe-sheets';
+import type { CompareLook } from './compare-tools';
 import type { Comparison } from './use-comparison';
 import type { Side } from './use-side';
 
@@ -31,14 +33,17 @@ interface SheetTrioProps {
   readonly leftRemarks: readonly Remark[];
   /** The choice of measure; stands over the difference. */
   readonly measureChoice: ReactNode;
+  readonly look: CompareLook;
 }
 
 type Shown = 'left' | 'right' | 'difference';
 const FIT_MARGIN_PX = 14;
 const HEIGHT_SHARE = 0.88;
+/** One sheet over the whole width must still leave the numbers in sight. */
+const SWIPE_MOST_PX = 560;
 
 /** Left, right and what changes, moved and zoomed as one. On a narrow screen one at a time, at the same spot of the floor. */
-export function SheetTrio({ comparison, scale, leftRemarks, measureChoice }: SheetTrioProps) {
+export function SheetTrio({ comparison, scale, leftRemarks, measureChoice, look }: SheetTrioProps) {
   const { left, right } = comparison;
   const [leftName, rightName] = shortNames(left.document, right.document);
   const isNarrow = useMedia('(max-width: 1023px)');
@@ -54,6 +59,14 @@ export function SheetTrio({ comparison, scale, leftRemarks, measureChoice }: She
     const bounds = unionBounds(left.reading.bounds, right.reading.bounds);
     return moved ?? fitBounds(bounds ?? EMPTY_FLOOR, size ?? { width: 1, height: 1 }, FIT_MARGIN_PX);
   }, [moved, left.reading.bounds, right.reading.bounds, size]);
+  const swipeSize = useMemo(
+    () => box && { width: box.width, height: Math.round(Math.min(box.width * HEIGHT_SHARE, SWIPE_MOST_PX)) },
+    [box],
+  );
+  const swipeViewport = useMemo(() => {
+    const bounds = unionBounds(left.reading.bounds, right.reading.bounds);
+    return moved ?? fitBounds(bounds ?? EMPTY_FLOOR, swipeSize ?? { width: 1, height: 1 }, FIT_MARGIN_PX);
+  }, [moved, left.reading.bounds, right.reading.bounds, swipeSize]);
   const pins = useMemo(
     () => leftRemarks.map((remark) => ({ ...remark, resolved: remark.resolvedAt !== null })),
     [leftRemarks],
@@ -133,6 +146,53 @@ export function SheetTrio({ comparison, scale, leftRemarks, measureChoice }: She
     </TrioPanel>
   );
 
+  if (look === 'swipe') {
+    return (
+      <TrioPanel
+        title={`${leftName} and ${rightName}`}
+        aside={measureChoice}
+        foot={<ScaleKey measure={comparison.measure} scale={scale} range={comparison.range} />}
+        measure={boxRef}
+        height={swipeSize?.height}
+      >
+        {swipeSize && (
+          <SwipeSheets
+            leftName={leftName}
+            rightName={rightName}
+            size={swipeSize}
+            left={
+              <SideSheet
+                side={left}
+                comparison={comparison}
+                map={comparison.leftMap}
+                scale={scale}
+                label={`Drawing of ${leftName}`}
+                {...swipeSize}
+                viewport={swipeViewport}
+                onViewportChange={setMoved}
+              >
+                {null}
+              </SideSheet>
+            }
+            right={
+              <SideSheet
+                side={right}
+                comparison={comparison}
+                map={comparison.rightMap}
+                scale={scale}
+                label={`Drawing of ${rightName}`}
+                {...swipeSize}
+                viewport={swipeViewport}
+                onViewportChange={setMoved}
+              >
+                {null}
+              </SideSheet>
+            }
+          />
+        )}
+      </TrioPanel>
+    );
+  }
   if (!isNarrow) {
     return (
       <div className="grid grid-cols-3 gap-3.5">

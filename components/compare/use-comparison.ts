@@ -4,7 +4,7 @@ import { useMemo } from 'react';
 import { nice } from 'd3';
 import { floorDifference, type FloorDifference } from '@/lib/layout/floor-figures';
 import { composeFloorMap, floorGridOf, type FloorMap } from '@/lib/layout/floor-map';
-import { comparedFigures, guardedAreaM2, type ComparedFigure } from '@/lib/layout/compared-figures';
+import { comparedFigures, guardedAreaM2, type ComparedFigure, type SheetFigures } from '@/lib/layout/compared-figures';
 import { itemDifferences, matchItems, moveWords, type ItemDifference, type ItemPair } from '@/lib/layout/differences';
 import type { MapMeasure, MapSettings } from '@/lib/layout/map-settings';
 import { valueRange, type ValueRange } from '@/lib/layout/scales';
@@ -31,10 +31,18 @@ export interface Comparison {
   readonly figures: readonly ComparedFigure[];
   readonly changed: readonly ChangedItem[];
   readonly moved: readonly ItemPair[];
+  /** Further sheets for the table of numbers, each against the left one. */
+  readonly others: readonly { readonly side: Side; readonly figures: readonly ComparedFigure[] }[];
 }
 
 /** Everything that two sheets say beside one another, at one question. */
-export function useComparison(left: Side | null, right: Side | null, settings: MapSettings): Comparison | null {
+export function useComparison(
+  left: Side | null,
+  right: Side | null,
+  settings: MapSettings,
+  third: Side | null,
+  fourth: Side | null,
+): Comparison | null {
   const maps = useMemo(() => left && right && composeBoth(left, right, settings), [left, right, settings]);
   return useMemo(() => {
     if (!left || !right || !maps) return null;
@@ -44,6 +52,9 @@ export function useComparison(left: Side | null, right: Side | null, settings: M
       floor: map && floorFigures(map, map.measure === 'reach' ? null : threshold),
       guardedM2: guardedAreaM2(document.items.filter(({ hidden }) => !hidden)),
     });
+    const leftFigures = figuresOf(left, maps.leftMap);
+    const against = (figures: SheetFigures) => comparedFigures(leftFigures, figures, settings.measure, threshold);
+    const others = [third, fourth].filter((side) => side !== null);
     const matched = matchItems(left.document.items, right.document.items);
     const changes = pointChanges(matched, left.reading.verdicts, right.reading.verdicts);
     return {
@@ -52,19 +63,20 @@ export function useComparison(left: Side | null, right: Side | null, settings: M
       ...maps,
       measure: settings.measure,
       threshold,
-      figures: comparedFigures(
-        figuresOf(left, maps.leftMap),
-        figuresOf(right, maps.rightMap),
-        settings.measure,
-        threshold,
-      ),
+      figures: against(figuresOf(right, maps.rightMap)),
+      others: others.map((side) => ({ side, figures: against(figuresOf(side, composeOne(side, settings))) })),
       changed: itemDifferences(matched).map((difference) => ({
         ...difference,
         effects: effectsOf(difference, changes),
       })),
       moved: matched.pairs.filter((pair) => moveWords(pair.left, pair.right) !== null),
     };
-  }, [left, right, maps, settings]);
+  }, [left, right, maps, settings, third, fourth]);
+}
+
+function composeOne({ placed }: Side, { stepMm, measure }: MapSettings): FloorMap | null {
+  const grid = floorGridOf(placed, stepMm);
+  return grid && placed.length > 0 ? composeFloorMap(grid, placed, measure) : null;
 }
 
 function composeBoth(left: Side, right: Side, { stepMm, measure }: MapSettings) {

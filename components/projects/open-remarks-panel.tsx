@@ -1,6 +1,7 @@
 'use client';
 
 import Link from 'next/link';
+import { TextLink } from '@/components/ui/link-button';
 import { LoadingLine } from '@/components/ui/loading-line';
 import { Moment } from '@/components/ui/moment';
 import { Notice } from '@/components/ui/notice';
@@ -15,7 +16,15 @@ import { DataPart } from '@/components/ui/data-part';
 export function OpenRemarksPanel({ projectId, count }: { projectId: string; count: number | undefined }) {
   const answer = useLayouts(projectId);
   return (
-    <Panel title="Open remarks" aside={<span className="font-mono font-medium text-ink">{count}</span>}>
+    <Panel
+      title="Open remarks"
+      aside={
+        <>
+          <TextLink href={`/projects/${projectId}/remarks`}>All as a table</TextLink>
+          <span className="font-mono font-medium text-ink">{count}</span>
+        </>
+      }
+    >
       {count === undefined ? (
         <LoadingLine label="Loading the remarks" />
       ) : count === 0 ? (

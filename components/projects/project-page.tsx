@@ -10,6 +10,7 @@ import { TitleBlock } from '@/components/ui/title-block';
 import { useMayActAs } from '@/lib/client/account-context';
 import { useProject } from '@/lib/client/use-project';
 import { useProjectActions } from '@/lib/client/use-projects';
+import { ComparisonsPanel } from './comparisons-panel';
 import { FloorPlansPanel } from './floor-plans-panel';
 import { OpenRemarksPanel } from './open-remarks-panel';
 import { SubjectFault } from '@/components/shell/subject-fault';
@@ -66,6 +67,9 @@ export function ProjectPage({ projectId }: { projectId: string }) {
             {mayPlan && <VariantsPanel projectId={projectId} />}
             <div className="order-3 min-w-0">
               <RevisionsPanel projectId={projectId} />
+              <div className="mt-4 empty:hidden">
+                <ComparisonsPanel projectId={projectId} />
+              </div>
             </div>
           </div>
           <div className="contents min-w-0 gap-4 lg:flex lg:flex-col">

@@ -6,8 +6,9 @@ import { askMap } from '@/lib/server/maps';
 import { askStudy } from '@/lib/server/studies';
 import { invitationRequestSchema } from '@/lib/contracts/accounts';
 import { mapQuestionSchema } from '@/lib/contracts/maps';
+import { putObject } from '@/lib/server/object-store';
 import { createInvitation } from '@/lib/server/invitations/create-invitation';
-import type { DexterityMap, Study } from '@/models';
+import { Comparison, RemarkPicture, DexterityMap, Study } from '@/models';
 import { newStudyQuestion } from './study-jobs';
 import {
   createArm,
@@ -62,6 +63,9 @@ export async function buildAccessWorld() {
   const snapshot = { projectName: `Project ${SECRET}`, floorPlan, maps };
   const revision = await createRevision({ layoutId: layout.id, issuedBy: planner.user.id, snapshot });
   const remark = await createRemark({ revisionId: revision.id, userId: callers.viewer.user.id });
+  const objectKey = `remarks/${organisationId}/${randomUUID()}`;
+  await putObject(objectKey, Buffer.from('picture'), 'image/webp');
+  const picture = await RemarkPicture.create({ remarkId: remark.id, objectKey, widthPx: 1, heightPx: 1 });
   const { token } = await createShareLink({ revisionId: revision.id, maySign: true });
 
   const askNewMap = (): Promise<DexterityMap> => askMap(planner.actor, newQuestion(arm.id));
@@ -75,14 +79,26 @@ export async function buildAccessWorld() {
     mapId: map.id,
     layoutId: layout.id,
     revisionId: revision.id,
-    sha256: revision.sha256,
     remarkId: remark.id,
+    pictureId: picture.id,
     // What a caller may take away is made anew for each of them.
     addArm: () => createArm({ organisationId }),
     addLibraryFixture: () => createLibraryFixture({ organisationId }),
     addFloorPlan,
     addLayout,
     addShareLink: async () => (await createShareLink({ revisionId: revision.id })).shareLink,
+    /** A revision that no other row can supersede, and a link that may sign it. */
+    addSignable: async () => {
+      const { id, sha256 } = await createRevision({ layoutId: (await addLayout()).id, snapshot });
+      return { id, sha256, token: (await createShareLink({ revisionId: id, maySign: true })).token };
+    },
+    addComparison: () =>
+      Comparison.create({
+        projectId,
+        name: `Comparison ${SECRET}`,
+        sheets: [`layout:${layout.id}`, `revision:${revision.id}`],
+        view: { measure: 'reach', wrist: 'held' },
+      }),
     addMember: () => createMember('planner', { organisationId }),
     addInvitation: () =>
       createInvitation(
