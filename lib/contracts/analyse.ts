@@ -82,12 +82,33 @@ export const mapRequestSchema = z
     message: `A map has at most ${MAX_CELLS.toLocaleString('en')} cells here; take a larger step.`,
   });
 
+const seconds = z.number('Write a time (s).').min(0, 'A time is 0 s or more.').max(36_000);
+
+/** A move to a target, or a wait; the last step leads back to the first. */
+const sequenceStepSchema = z.union(
+  [
+    z.strictObject({
+      target: targetSchema,
+      motion: z.enum(['joint', 'straight']).default('joint'),
+      via: z.array(triple).max(20).default([]),
+      dwell: seconds.default(0),
+    }),
+    z.strictObject({ wait: seconds }),
+  ],
+  'A step is { "target", "motion"?, "via"?, "dwell"? } or { "wait": seconds }.',
+);
+export const analyseSequenceSchema = z.object({
+  steps: z.array(sequenceStepSchema).min(1, 'A sequence has at least one step.').max(300),
+});
+export type AnalyseSequence = z.infer<typeof analyseSequenceSchema>;
+
 export const analyseRequestSchema = z
   .object({
     arm: armSchema,
     postures: z.array(z.array(coordinate)).max(100_000).optional(),
     targets: z.array(targetSchema).max(100_000).optional(),
     map: mapRequestSchema.optional(),
+    sequence: analyseSequenceSchema.optional(),
   })
   .superRefine(({ arm, postures }, context) => {
     const values = arm.coupling?.[0]?.length ?? arm.joints.length;
@@ -127,6 +148,28 @@ export const analyseAnswerSchema = z.object({
     )
     .optional(),
   targets: z.array(z.object({ reached: z.boolean(), reason: z.string().nullable(), solutions: rows })).optional(),
+  sequence: z
+    .object({
+      /** From the last step round to the last step, s; an estimate. */
+      time: z.number(),
+      steps: z.array(
+        z.object({
+          reached: z.boolean(),
+          reason: z.string().nullable(),
+          motion: z.enum(['joint', 'straight']).nullable(),
+          moveTime: z.number(),
+          hold: z.number(),
+          /** From 1. */
+          slowestJoint: z.number().int().nullable(),
+          branch: z.string(),
+          posture: z.array(z.number()).nullable(),
+          crossings: z.array(
+            z.object({ from: z.number(), to: z.number(), joint: z.number().int().nullable(), speed: z.number() }),
+          ),
+        }),
+      ),
+    })
+    .optional(),
   map: z
     .object({
       columns: z.number().int(),

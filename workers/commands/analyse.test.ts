@@ -23,7 +23,37 @@ describe('the analyse command', () => {
     expect(answer.targets).toEqual([]);
   });
 
+  it('times a sequence: 90° at 180 °/s and 600 °/s² there and back, and a wait', () => {
+    const degree = Math.PI / 180;
+    const joint = { type: 'revolute', a: 0.5, alpha: 0, d: 0, theta: 0, min: -2, max: 2 };
+    const turning = { ...joint, maxSpeed: 180 * degree, maxAcceleration: 600 * degree };
+    const target = (angle: number) => ({
+      target: { position: [0.5 * Math.cos(angle), 0.5 * Math.sin(angle), 0], direction: [0, 0, 1], roll: 'free' },
+    });
+    const question = {
+      arm: { convention: 'standard', freedoms: ['x', 'y'], joints: [turning] },
+      sequence: {
+        steps: [
+          target(0),
+          target(90 * degree),
+          { wait: 0.5 },
+          { target: { ...target(0).target, position: [9, 0, 0] } },
+        ],
+      },
+    };
+    const { status, stdout } = run(JSON.stringify(question));
+    expect(status).toBe(0);
+    const { sequence } = JSON.parse(stdout) as {
+      sequence: { time: number; steps: { reached: boolean; reason: string | null }[] };
+    };
+    // 0.8 s a way (KINEMATICS.md: trapezoid check value).
+    expect(sequence.time).toBeCloseTo(0.8 + 0.8 + 0.5, 6);
+    expect(sequence.steps.map(({ reached }) => reached)).toEqual([true, true, true, false]);
+    expect(sequence.steps[3].reason).toMatch(/^Out of reach by 8500 mm\. The step is left out\.$/);
+  });
+
   it.each([
+    ['a wait below zero', JSON.stringify({ arm, sequence: { steps: [{ wait: -1 }] } }), 'sequence.steps[0]'],
     ['nothing', '', ''],
     ['blanks', ' \n', ''],
     ['no JSON', '{"arm": NaN}', ''],

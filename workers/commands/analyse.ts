@@ -1,6 +1,7 @@
 import { text } from 'node:stream/consumers';
 import { analyse } from '@/lib/kinematics/analyse';
 import { analyseRequestSchema } from '@/lib/contracts/analyse';
+import { answerSequence } from '@/lib/layout/cycle/answer-sequence';
 
 /** Reads one JSON question from standard input and prints one JSON answer; see README, "analyse". */
 
@@ -30,7 +31,9 @@ if (!question.success) {
   refuse(pathOf(first.path), first.message);
 }
 try {
-  process.stdout.write(`${JSON.stringify(analyse(question.data))}\n`);
+  const { arm, sequence } = question.data;
+  const answers = { ...analyse(question.data), ...(sequence && { sequence: answerSequence(arm, sequence.steps) }) };
+  process.stdout.write(`${JSON.stringify(answers)}\n`);
 } catch (error) {
   // The kernel refuses what no schema can see, such as a branch that this arm does not have.
   if (error instanceof RangeError) refuse('map.branch', error.message);

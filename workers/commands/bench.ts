@@ -4,6 +4,7 @@ import { compareWithBaseRate } from '../bench/base-rate';
 import { heapGrowth } from '../bench/heap';
 import { frames } from '../bench/browser/frames';
 import { liveMap } from '../bench/browser/live-map';
+import { judge } from '../bench/judge';
 import { compareRoutes, growth } from '../bench/maps';
 import { say, title } from '../bench/print';
 import { ROUNDS } from '../bench/rounds';
@@ -22,6 +23,7 @@ const PARTS: Record<string, () => Promise<void>> = {
   growth,
   heap: heapGrowth,
   workers: compareWorkers,
+  judge,
   live: liveMap,
   frames,
 };

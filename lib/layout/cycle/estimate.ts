@@ -65,8 +65,12 @@ export function estimateCycles(items: readonly Item[], armOf: ArmOf): CycleEstim
 
 /** Times a robot's sequence, with the branches that make the whole round quickest. */
 export function estimateCycle(bench: Bench, items: readonly Item[]): CycleEstimate {
+  return estimateSteps(bench, resolveSteps(bench.robot.sequence, items));
+}
+
+/** The same for steps that are looked up already. */
+export function estimateSteps(bench: Bench, resolved: readonly ResolvedStep[]): CycleEstimate {
   const { robot } = bench;
-  const resolved = resolveSteps(robot.sequence, items);
   const problems: StepProblem[] = [];
   const name = (step: ResolvedStep, message: string): void => {
     const number = resolved.indexOf(step) + 1;
@@ -157,7 +161,7 @@ function timeMoves(
       holdS: step.kind === 'point' ? step.dwellS : 0,
       slowestJoint: slowest ? slowest.slowestJoint : byJoints.slowest < 0 ? null : byJoints.slowest + 1,
       lengthMm: readings.length === 0 ? null : readings.reduce((sum, { lengthMm }) => sum + lengthMm, 0),
-      leastSpeedMmS: slowest?.leastSpeedMmS ?? null,
+      leastSpeedMmS: slowest && Number.isFinite(slowest.leastSpeedMmS) ? slowest.leastSpeedMmS : null,
       crossings: readings.flatMap(({ crossings }) => crossings),
       branch: branchOf(bench.solver, layer.ends[state]),
       posture: Array.from(layer.ends[state]),
