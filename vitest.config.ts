@@ -17,6 +17,8 @@ export default defineConfig({
         test: {
           name: 'unit',
           environment: 'node',
+          // Pure code shares nothing that a test could spoil; loading it once halves the time.
+          isolate: false,
           include: ['{app,lib,models,workers,tests}/**/*.test.{ts,mjs}', 'proxy.test.ts'],
           exclude: ['tests/integration/**', 'tests/browser/**'],
           testTimeout: 60_000,

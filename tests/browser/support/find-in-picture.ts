@@ -1,6 +1,8 @@
 import sharp, { type Sharp } from 'sharp';
 import type { Page } from '@playwright/test';
 
+/** Thin lines that are half a pixel off must still look alike, px. */
+const BLUR = 2;
 /** Half the side of the patch looked for and how far it may be off, screen pixels. */
 const HALF = 60;
 const SEARCH = 30;
@@ -14,6 +16,7 @@ async function patchOf(image: Sharp, side: number): Promise<Patch> {
   const { data } = await image
     .resize(side, side, { fit: 'fill' })
     .greyscale()
+    .blur(BLUR)
     .raw()
     .toBuffer({ resolveWithObject: true });
   return { side, values: new Uint8Array(data) };
