@@ -4,7 +4,7 @@ import { aligned, distributed } from '../arrange';
 import { copiedText, pasted, readCopied } from '../clipboard';
 import { duplicated, edited, flagged, moved, removed, turnedBy } from '../edits';
 import { grouped, ungrouped } from '../groups';
-import { newBlock, newDimension, newLine, newRobot } from '../make-items';
+import { newBlock, newColumn, newDimension, newLine, newNote, newRobot, newSectionLine } from '../make-items';
 import { reorder } from '../order';
 import type { Sheet } from '../sheet';
 import type { Seeded } from './seeded';
@@ -15,7 +15,7 @@ export function randomItem(random: Seeded, sheet: Sheet): Item {
   const at = { id: random.id(), xMm: random.below(9000), yMm: random.below(6000) };
   const to: [number, number] = [random.below(9000), random.below(6000) + 7000];
   const corners: [number, number][] = [[at.xMm, at.yMm], to, [to[0] + 500, at.yMm]];
-  switch (random.below(6)) {
+  switch (random.below(10)) {
     case 0:
       return newRobot(items, at, random.id());
     case 1:
@@ -26,8 +26,20 @@ export function randomItem(random: Seeded, sheet: Sheet): Item {
       return newLine(items, 'guardLine', at.id, corners, true);
     case 4:
       return newLine(items, 'walkway', at.id, corners, false);
-    default:
-      return newDimension(items, at.id, [at.xMm, at.yMm], to, random.below(500));
+    case 5:
+      return newLine(items, 'conveyor', at.id, corners, false);
+    case 6:
+      return newColumn(items, at);
+    case 7:
+      return newNote(items, at);
+    case 8:
+      return newSectionLine(items, at.id, [at.xMm, at.yMm], to);
+    default: {
+      // Attached where there is something to attach to, so that removals and undos meet dimensions that follow.
+      const item = items.size > 0 ? random.pick([...items.values()]) : undefined;
+      const start = { atMm: [at.xMm, at.yMm] as const, item: item?.kind === 'dimension' ? undefined : item };
+      return newDimension(items, at.id, start, to, random.below(500));
+    }
   }
 }
 
