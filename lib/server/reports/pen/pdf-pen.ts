@@ -7,6 +7,8 @@ type Document = PDFKit.PDFDocument;
 /** A document whose pages are added one by one, with the shipped fonts in it. */
 export function openPdf(info: { title: string; author: string }): Document {
   const document = new PDFDocument({
+    // Blending and transparency came with 1.4.
+    pdfVersion: '1.7',
     autoFirstPage: false,
     bufferPages: true,
     margin: 0,
