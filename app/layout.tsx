@@ -9,6 +9,7 @@ import '@fontsource/sometype-mono/500.css';
 import '@fontsource/sometype-mono/600.css';
 import './globals.css';
 import { BOARD_COOKIE, boardScript, isBoard } from '@/components/ui/board';
+import { UnitsProvider } from '@/components/shell/units-provider';
 import { Toaster } from '@/components/ui/toaster';
 import { TooltipProvider } from '@/components/ui/tooltip';
 import { DataProvider } from '@/lib/client/data-provider';
@@ -45,7 +46,9 @@ export default async function RootLayout({ children }: { children: ReactNode }) 
       </head>
       <body>
         <DataProvider>
-          <TooltipProvider>{children}</TooltipProvider>
+          <UnitsProvider>
+            <TooltipProvider>{children}</TooltipProvider>
+          </UnitsProvider>
         </DataProvider>
         <Toaster />
       </body>

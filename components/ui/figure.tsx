@@ -1,9 +1,8 @@
 'use client';
 
-import { useUnits } from '@/lib/client/use-units';
-import { MM_PER_UNIT } from '@/lib/layout/length-units';
 import { classNames } from './class-names';
 import { formatFigure, NO_BREAK_SPACE, type FigureFormat } from './format-figure';
+import { useMillimetres } from './millimetres-context';
 
 interface FigureProps extends FigureFormat {
   value: number | null | undefined;
@@ -13,11 +12,11 @@ interface FigureProps extends FigureFormat {
 
 /** A number with its unit, in the mono face. A length in mm is written in the reader's own unit. */
 export function Figure({ value: given, unit: givenUnit, className, ...givenFormat }: FigureProps) {
-  const { unit: lengthUnit } = useUnits();
-  const isInch = givenUnit === 'mm' && lengthUnit === 'in';
-  const unit = isInch ? 'in' : givenUnit;
-  const value = isInch && typeof given === 'number' ? given / MM_PER_UNIT.in : given;
-  const format = isInch ? { ...givenFormat, decimals: (givenFormat.decimals ?? 0) + 2 } : givenFormat;
+  const chosen = useMillimetres();
+  const length = givenUnit === 'mm' ? chosen : null;
+  const unit = length?.unit ?? givenUnit;
+  const value = length && typeof given === 'number' ? given / length.mmPerUnit : given;
+  const format = { ...givenFormat, decimals: (givenFormat.decimals ?? 0) + (length?.moreDecimals ?? 0) };
   const text = formatFigure(value, format);
   const joint = unit === '°' || unit === '%' ? '' : NO_BREAK_SPACE;
   return (

@@ -1,12 +1,10 @@
 'use client';
 
 import { useState, type ComponentProps, type KeyboardEvent } from 'react';
-import { useUnits } from '@/lib/client/use-units';
-import { parseMeasure } from '@/lib/editor/measure-text';
-import { MM_PER_UNIT, stepIn } from '@/lib/layout/length-units';
 import { classNames } from './class-names';
 import { CONTROL_LOOK } from './control-look';
 import { useFieldWiring } from './field-context';
+import { useMillimetres } from './millimetres-context';
 import { parseNumber } from './parse-number';
 
 type Passed = Omit<ComponentProps<'input'>, 'value' | 'defaultValue' | 'onChange' | 'type' | 'step' | 'min' | 'max'>;
@@ -48,19 +46,17 @@ export function NumberInput({
   ...rest
 }: NumberInputProps) {
   const [draft, setDraft] = useState<string | null>(null);
-  const { unit: lengthUnit } = useUnits();
-  const isLength = givenUnit === 'mm';
-  const unit = isLength ? lengthUnit : givenUnit;
-  const perUnit = isLength ? MM_PER_UNIT[lengthUnit] : 1;
-  const decimals = isLength && lengthUnit === 'in' ? givenDecimals + 1 : givenDecimals;
-  const step = isLength ? stepIn(givenStep, lengthUnit) : givenStep;
+  const chosen = useMillimetres();
+  const length = givenUnit === 'mm' ? chosen : null;
+  const unit = length?.unit ?? givenUnit;
+  const perUnit = length?.mmPerUnit ?? 1;
+  const decimals = givenDecimals + (length?.moreDecimals ?? 0);
+  const step = length ? length.step(givenStep) : givenStep;
   const shown = show(value === null ? null : value / perUnit, decimals);
   /** What stands in the field and was not touched is the value itself, to the last digit. */
   const read = (text: string): number | null => {
     if (text.trim() === shown && value !== null) return value;
-    if (!isLength) return parseNumber(text);
-    const parsed = parseMeasure(text, 'length', lengthUnit);
-    return parsed.ok ? parsed.value : null;
+    return length ? length.read(text) : parseNumber(text);
   };
   const clamp = (number: number) => Math.min(max, Math.max(min, number));
 
@@ -95,7 +91,7 @@ export function NumberInput({
         {...rest}
         {...useFieldWiring(rest)}
         type="text"
-        inputMode={isLength ? 'text' : 'decimal'}
+        inputMode={length ? 'text' : 'decimal'}
         autoComplete="off"
         value={draft ?? shown}
         onChange={(event) => {
