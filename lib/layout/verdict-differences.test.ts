@@ -33,6 +33,7 @@ const verdict = (pointNumber: number, band: VerdictBand, robotNumber: number): P
     bindingJoint: null,
     posture: null,
     speedMarginMmS: null,
+    shortfallMm: null,
   };
   return {
     pointId: id(pointNumber),

@@ -227,6 +227,12 @@ describe('a robot chosen by hand', () => {
   it('counts, even where another would do better', () => {
     expect(judge(null)).toMatchObject({ assignment: 'best robot', best: { robotId: near.id, reached: true } });
     expect(judge(far.id)).toMatchObject({ assignment: 'by hand', best: { robotId: far.id, reached: false } });
+    // Of robots that do not reach a point, the one that misses least is told.
+    const away = fixture({ taskPoints: [{ id: id(70), name: 'Pick', xMm: 6500, yMm: 0, zMm: 700 }] });
+    expect(judgeItems([near, far, away], () => sixAxis, 'held')[0].best).toMatchObject({
+      robotId: far.id,
+      reached: false,
+    });
     expect(judge(id(99))).toMatchObject({ assignment: 'robot gone', best: { robotId: near.id } });
   });
 });

@@ -28,6 +28,8 @@ export interface RobotVerdict {
   readonly posture: ReachedPosture | null;
   /** Sure speed less wanted speed, mm/s; null where none is wanted or the point is not reached. */
   readonly speedMarginMmS: number | null;
+  /** How far out of reach or too near, mm; null where that is not what is wrong. */
+  readonly shortfallMm: number | null;
 }
 
 export interface ReachedPosture {
@@ -86,6 +88,7 @@ export function judgeTarget(bench: Bench, target: Target, wantedMmS: number | nu
       limitSlides: bench.solver.chain.prismatic[best.margin.joint] === 1,
     },
     speedMarginMmS: wantedMmS === null ? null : best.sureSpeedMmS - wantedMmS,
+    shortfallMm: null,
   };
 }
 
@@ -113,12 +116,18 @@ function refused({ robot, solver }: Bench, { reason, joint, by }: ReachAnswer): 
     bindingJoint,
     posture: null,
     speedMarginMmS: null,
+    shortfallMm: reason === 'too far' || reason === 'too near' ? by * 1000 : null,
   };
 }
 
-/** The place of a verdict among others: one that is met after one that is reached after one that is not; then by conditioning. */
-export const worthOfVerdict = ({ met, reached, posture }: RobotVerdict): number =>
-  (met ? 2 : 0) + (reached ? 1 : 0) + (posture?.inverseConditionNumber ?? -1);
+/**
+ * The place of a verdict among others: one that is met after one that is reached after one that is not; then by conditioning, and of
+ * those not reached by how little is missing.
+ */
+export function worthOfVerdict({ met, reached, posture, shortfallMm }: RobotVerdict): number {
+  if (!reached) return -1 - (shortfallMm ?? 0);
+  return (met ? 3 : 1) + (posture?.inverseConditionNumber ?? 0);
+}
 
 /** One that meets the point goes before one that does not, then the better conditioned; the earlier one on a tie. */
 export function betterOf(best: RobotVerdict, next: RobotVerdict): RobotVerdict {

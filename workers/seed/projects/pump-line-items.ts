@@ -8,9 +8,10 @@ import {
   obstacleSchema,
   walkwaySchema,
   type Item,
+  type Robot,
 } from '@/lib/layout/items';
 import type { Hall } from './draw-hall';
-import { at, fixture, robot, type Place } from './items';
+import { at, fixture, robot, withPattern, withSequence, type Place } from './items';
 
 /** All invented. The origin is the crossing of two building axes outside the hall. */
 export const PUMP_HALL: Hall = {
@@ -34,6 +35,14 @@ export const PLACES = {
 } as const satisfies Record<string, Place>;
 
 export const pumpRobot = (name: string, armId: string, place: Place) => robot(name, armId, place, RISER_MM);
+
+/** What the robots go through in a cycle: R1 feeds the fixture and clears it, R2 deburrs and sets down. */
+export const R1_STEPS = ['Infeed 1', 'grip', 'Fixture A 1', '!Fixture A 2', '!Fixture A 3', 'grip', 'Outfeed 1'];
+export const R2_STEPS = ['Deburr 2', 'Deburr 1', 'grip', 'Outfeed 2', 'grip'];
+const TARGET_CYCLE_S = 12;
+
+export const working = (item: Robot, steps: readonly string[], items: readonly Item[]): Robot =>
+  withSequence(item, steps, items, TARGET_CYCLE_S);
 
 /** The distance between the robots along x. */
 export function robotsApart(fromXMm: number, toXMm: number): Item {
@@ -76,15 +85,30 @@ function stations(): Item[] {
       ],
       20,
     ),
-    fixture(
-      'Infeed tray',
-      [3090, 5230, 8],
-      [840, 840, 800],
-      [
-        ['Infeed 1', -60, -230, 850, { speedMmS: 250, dwellS: 0.5 }],
-        ['Infeed 2', 180, -60, 850, { speedMmS: 250, dwellS: 0.5 }],
-      ],
-      10,
+    withPattern(
+      fixture(
+        'Infeed tray',
+        [3090, 5230, 8],
+        [840, 840, 800],
+        [
+          ['Infeed 1', -60, -230, 850, { speedMmS: 250, dwellS: 0.5 }],
+          ['Infeed 2', 180, -60, 850, { speedMmS: 250, dwellS: 0.5 }],
+        ],
+        10,
+      ),
+      {
+        name: 'Housing nests',
+        xMm: -60,
+        yMm: -290,
+        zMm: 850,
+        rows: 2,
+        columns: 3,
+        pitchXMm: 120,
+        pitchYMm: 110,
+        speedMmS: 250,
+        numbering: 'snake',
+        order: 12,
+      },
     ),
     fixture(
       'Deburr stand',

@@ -12,7 +12,16 @@ import type { SeedContext } from '../context';
 import { addHall, addVariant, addVariantFrom, armNamed } from './build';
 import type { Place } from './items';
 import { finishMaps } from './maps';
-import { PLACES, PUMP_HALL, pumpRobot, pumpStations, robotsApart } from './pump-line-items';
+import {
+  PLACES,
+  PUMP_HALL,
+  pumpRobot,
+  pumpStations,
+  R1_STEPS,
+  R2_STEPS,
+  robotsApart,
+  working,
+} from './pump-line-items';
 
 const ISSUED_LETTER = 'C';
 
@@ -27,22 +36,25 @@ async function addProject({ planner }: SeedContext['brackwater'], transaction: T
   const armId = await armNamed(planner, 'Six-axis 12 kg, 1.4 m', transaction);
   const { alone, r1, r2FaceToFace, r2TurnedIn } = PLACES;
 
+  const stations = pumpStations();
+  const first = working(pumpRobot('R1', armId, alone), R1_STEPS, stations);
   const a = await addVariant(
     planner,
     project.id,
-    { name: 'one robot', floorPlanId: floorPlan.id, items: [pumpRobot('R1', armId, alone), ...pumpStations()] },
+    { name: 'one robot', floorPlanId: floorPlan.id, items: [first, ...stations] },
     transaction,
   );
   const faceToFace = (items: Item[]): Item[] => [
     ...items.filter((item) => isRobot(item, 'R1')).map((item) => moved(item, r1)),
-    { ...pumpRobot('R2', armId, r2FaceToFace), order: 0.5 },
+    { ...working(pumpRobot('R2', armId, r2FaceToFace), R2_STEPS, items), order: 0.5 },
     { ...robotsApart(r1[0], r2FaceToFace[0]), order: items.length },
   ];
   const b = await addVariantFrom(planner, a, 'robots face to face', faceToFace, transaction);
   const turnedIn = (items: Item[]): Item[] =>
     items.flatMap((item): Item[] => {
       if (isRobot(item, 'R2')) return [moved(item, r2TurnedIn)];
-      if (item.kind === 'dimension' && item.name === 'Robots apart') return [{ ...item, toMm: [r2TurnedIn[0] - r1[0], 0] }];
+      if (item.kind === 'dimension' && item.name === 'Robots apart')
+        return [{ ...item, toMm: [r2TurnedIn[0] - r1[0], 0] }];
       return [];
     });
   await addVariantFrom(planner, b, 'R2 turned in', turnedIn, transaction);
