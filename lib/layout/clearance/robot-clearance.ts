@@ -51,6 +51,8 @@ interface Stood {
   readonly chain: Chain;
   readonly links: Links;
   readonly reachM: number;
+  /** The links as each posture of the work holds them. */
+  readonly held: readonly Links[];
 }
 
 /**
@@ -82,11 +84,13 @@ function standRobot(source: WorkingRobot): Stood {
   const base = multiplyTransforms(frameOnFloor(robot, robot.riserMm), compiled.base, identityTransform());
   const chain = { ...compiled, base };
   const radiusMm = Math.max(robot.tool.radiusMm, robot.part?.radiusMm ?? 0);
+  const newLinks = () => makeLinks(chain, estimatedLinkRadius(reachMm), radiusMm / 1000);
   return {
     source,
     chain,
-    links: makeLinks(chain, estimatedLinkRadius(reachMm), radiusMm / 1000),
+    links: newLinks(),
     reachM: reachRadius(arm),
+    held: source.postures.map(({ joints }) => standLinks(chain, joints, newLinks())),
   };
 }
 
@@ -110,9 +114,8 @@ function rowAt(
     if (!moving) linksToPrisms(one.links, prisms, skip, toSolid);
     else linksToPrisms(withoutTool(one.links), prisms, -1, toSolid);
     for (const other of others) {
-      for (const theirs of other.source.postures) {
-        standLinks(other.chain, theirs.joints, other.links);
-        const near = linksToLinks(one.links, other.links, nothingNear());
+      for (const held of other.held) {
+        const near = linksToLinks(one.links, held, nothingNear());
         if (toRobot === null || near.distance < toRobot.near.distance) toRobot = { near, other };
       }
     }
