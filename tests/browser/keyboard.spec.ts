@@ -5,7 +5,7 @@ import { accountOf, INTEGRATOR } from './support/people';
 import { Sheet } from './support/sheet';
 
 test('from signing in to the share link by keyboard alone, with nothing for axe to find', async ({ page }) => {
-  test.setTimeout(170_000);
+  test.setTimeout(270_000);
   const keys = new Keys(page);
   const sheet = new Sheet(page);
   const button = (name: string | RegExp) => page.getByRole('button', { name }).first();
