@@ -4,8 +4,8 @@ import { mapRequestOf, questionOfRobot } from '@/lib/layout/map-question';
 import { mapSettingsSchema } from '@/lib/layout/map-settings';
 import { robotSchema } from '@/lib/layout/items';
 import { makeMapComputer } from '@/lib/kinematics/maps/compute-tile';
-import { ARC_MINUTE_RAD, worstErrorM } from './error-gain';
-import { bestPlumb, floorSpeeds, plumbOnFloor, readPlumb } from './plumb';
+import { bestPlumb, plumbOnFloor, plumbSpeeds, readPlumb } from './plumb';
+import { plumbFigures } from './plumb-figures';
 import { sectionRows } from './section-map';
 import { seeded } from './testing/seeded';
 
@@ -55,11 +55,13 @@ describe('the plumb', () => {
 
   it('reads a palletiser, which has fewer actuators than joints', () => {
     const palletiser = BUILT_IN_ARMS.find(({ slug }) => slug === 'palletiser-130kg')!.arm;
-    const [posture] = readPlumb(robot, palletiser, plumbOnFloor({ xMm: 5720, yMm: 3920 }, settings), settings).postures;
+    const reading = readPlumb(robot, palletiser, plumbOnFloor({ xMm: 5720, yMm: 3920 }, settings), settings);
+    const [posture] = reading.postures;
+    const { error } = plumbFigures(reading, posture, 'held');
     expect(posture.joints).toHaveLength(4);
     // Two metres out, a minute of arc of the column alone is 0.58 mm (2000 mm × π / 180 / 60).
-    expect(posture.errorGainMm).toBeGreaterThan(0.58);
-    expect(posture.errorGainMm).toBeLessThan(5);
+    expect(error.worstMm).toBeGreaterThan(0.58);
+    expect(error.worstMm).toBeLessThan(5);
   });
 
   it('says why a spot is out of reach', () => {
@@ -81,7 +83,7 @@ describe('the plumb', () => {
   it('draws a velocity polygon whose farthest corner is no farther than the fastest tool speed', () => {
     const reading = readPlumb(robot, ARM, plumbOnFloor({ xMm: 4420, yMm: 3210 }, settings), settings);
     const [best] = reading.postures;
-    const { polygon } = floorSpeeds(reading, best, 'held');
+    const { polygon } = plumbSpeeds(reading, best, 'held').floor;
     const farthest = Math.max(...polygon.map(([x, y]) => Math.hypot(x, y)));
     expect(farthest).toBeLessThanOrEqual((best.maximumToolSpeed ?? 0) + 1e-9);
     expect(farthest).toBeGreaterThan((best.sureSpeed ?? 0) - 1e-9);
@@ -124,27 +126,5 @@ describe('the plumb', () => {
       if (!best) expect(cut).toBeNaN();
       else expect(Math.abs(cut - (best.inverseConditionNumber ?? NaN))).toBeLessThan(0.003);
     }
-  });
-});
-
-describe('error gain', () => {
-  // A planar arm of two links laid straight: the errors of both joints add up at right angles to it, (l1 + l2) ε + l2 ε.
-  it('is the sum of both joints for a straight arm', () => {
-    const jacobian = [
-      [0, 0],
-      [0.9, 0.4],
-      [0, 0],
-    ];
-    expect(worstErrorM(jacobian, [ARC_MINUTE_RAD, ARC_MINUTE_RAD])).toBeCloseTo(1.3 * ARC_MINUTE_RAD, 12);
-  });
-
-  it('is the diagonal for joints at right angles, and nothing where no joint errs', () => {
-    const jacobian = [
-      [3, 0],
-      [0, 4],
-      [0, 0],
-    ];
-    expect(worstErrorM(jacobian, [1, 1])).toBeCloseTo(5, 12);
-    expect(worstErrorM(jacobian, [0, 0])).toBe(0);
   });
 });

@@ -1,8 +1,6 @@
-import { analysePosture } from '@/lib/kinematics/posture';
 import { makeSpotReader, type SpotPosture } from '@/lib/kinematics/spot';
-import type { Arm, Joint, MapDirection, Target, Vec3, WristMode } from '@/lib/kinematics/types';
-import { velocityOutlines } from '@/lib/kinematics/velocity-outline';
-import { actuatorType } from '@/lib/layout/arm-columns';
+import type { Arm, MapDirection, Target, Vec3, WristMode } from '@/lib/kinematics/types';
+import { velocityOutlines, type VelocityOutline } from '@/lib/kinematics/velocity-outline';
 import { turned } from '@/lib/layout/geometry';
 import type { Item, Robot } from '@/lib/layout/items';
 import { mapRequestOf, questionOfRobot } from '@/lib/layout/map-question';
@@ -10,7 +8,6 @@ import type { MapSettings } from '@/lib/layout/map-settings';
 import { armWithTool, baseToFloor, floorToBase } from '@/lib/layout/robot-frame';
 import { floorTaskPoints, targetInBase, type FloorTaskPoint } from '@/lib/layout/task-points';
 import { shortfallWords } from '@/lib/layout/verdict-words';
-import { ARC_MINUTE_RAD, worstErrorM } from './error-gain';
 
 /** A spot that the plumb hangs over: anywhere on the floor with the sheet's tool pose, or a task point with its own. */
 export interface PlumbSpot {
@@ -35,8 +32,6 @@ export interface PlumbPosture {
   readonly inverseConditionNumber: number | null;
   readonly maximumToolSpeed: number | null;
   readonly sureSpeed: number | null;
-  /** Farthest that the tool can be off where every turning joint is off by an arc minute, mm. */
-  readonly errorGainMm: number;
   readonly limit: { readonly joint: number; readonly words: string };
   /** The joint whose speed limit sets the sure speed; null where no single one does. */
   readonly bindingJoint: number | null;
@@ -108,7 +103,6 @@ function headingDeg(robot: Robot, { positionMm: [x, y] }: PlumbSpot): number {
 
 function told(spot: SpotPosture, robot: Robot, arm: Arm, wrist: WristMode): PlumbPosture {
   const measures = wrist === 'held' ? spot.wristHeld : spot.wristFree;
-  const { jacobian } = analysePosture(arm, spot.posture);
   const { joint, angle } = spot.limitMargin;
   const prismatic = arm.joints[joint]?.type === 'prismatic';
   return {
@@ -117,11 +111,6 @@ function told(spot: SpotPosture, robot: Robot, arm: Arm, wrist: WristMode): Plum
     inverseConditionNumber: measures.inverseConditionNumber,
     maximumToolSpeed: measures.maximumToolSpeed,
     sureSpeed: measures.sureSpeed,
-    errorGainMm:
-      worstErrorM(
-        jacobian,
-        typesOfColumns(arm).map((type) => (type === 'revolute' ? ARC_MINUTE_RAD : 0)),
-      ) * 1000,
     limit: {
       joint: joint + 1,
       words: prismatic ? `${Math.round(angle * 1000)} mm` : `${Math.round((angle * 180) / Math.PI)}°`,
@@ -131,31 +120,32 @@ function told(spot: SpotPosture, robot: Robot, arm: Arm, wrist: WristMode): Plum
   };
 }
 
-/** Under a coupling the columns of the Jacobian are of the actuators, which may be fewer than the joints. */
-function typesOfColumns({ joints, coupling }: Arm): Joint['type'][] {
-  if (!coupling) return joints.map(({ type }) => type);
-  return coupling[0].map((_, actuator) => actuatorType(joints, coupling, actuator));
-}
-
-/** What the tool can do at the spot, as shapes on the floor about it: m/s along x and y of the floor. */
-export interface FloorSpeeds {
+/** What the tool can do at the spot in a plane through it, m/s. */
+export interface SpeedShape {
   readonly polygon: readonly (readonly [number, number])[];
   readonly ellipse: { readonly major: number; readonly minor: number; readonly angleDeg: number };
 }
 
-export function floorSpeeds(
+/** On the floor along its x and y, and upright along the heading of the plumb and up. */
+export interface PlumbSpeeds {
+  readonly floor: SpeedShape;
+  readonly upright: SpeedShape;
+}
+
+export function plumbSpeeds(
   { arm, robot, headingDeg: heading }: PlumbReading,
   posture: PlumbPosture,
   wrist: WristMode,
-): FloorSpeeds {
+): PlumbSpeeds {
   const headingInBase = ((heading - robot.angleDeg) * Math.PI) / 180;
-  const { floor } = velocityOutlines(arm, posture.joints, wrist, headingInBase);
-  return {
-    polygon: floor.polygon.map((point) => turned(point, robot.angleDeg)),
+  const { floor, upright } = velocityOutlines(arm, posture.joints, wrist, headingInBase);
+  const shape = ({ polygon, ellipse }: VelocityOutline, turnDeg: number): SpeedShape => ({
+    polygon: polygon.map((point) => turned(point, turnDeg)),
     ellipse: {
-      major: floor.ellipse.major,
-      minor: floor.ellipse.minor,
-      angleDeg: (floor.ellipse.angleRad * 180) / Math.PI + robot.angleDeg,
+      major: ellipse.major,
+      minor: ellipse.minor,
+      angleDeg: (ellipse.angleRad * 180) / Math.PI + turnDeg,
     },
-  };
+  });
+  return { floor: shape(floor, robot.angleDeg), upright: shape(upright, 0) };
 }

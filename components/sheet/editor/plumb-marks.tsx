@@ -4,7 +4,7 @@ import { useMemo } from 'react';
 import { Shape } from 'react-konva';
 import { usePalette } from '@/components/sheet/drawing';
 import { inkOf, pixelOf, strokeInk, traceCircle, tracePath } from '@/components/sheet/drawing/ink';
-import { floorSpeeds } from '@/lib/editor/plumb';
+import { plumbSpeeds } from '@/lib/editor/plumb';
 import { useBoardSettings } from './board-context';
 import { usePlumb } from './readings-context';
 
@@ -17,7 +17,7 @@ export function PlumbMarks() {
   const { wrist } = useBoardSettings();
   const palette = usePalette();
   const speeds = useMemo(
-    () => (reading && posture ? floorSpeeds(reading, posture, wrist) : null),
+    () => (reading && posture ? plumbSpeeds(reading, posture, wrist).floor : null),
     [reading, posture, wrist],
   );
   if (!spot) return null;

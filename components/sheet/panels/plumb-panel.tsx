@@ -9,8 +9,10 @@ import { Button } from '@/components/ui/button';
 import { Select } from '@/components/ui/select';
 import { printed } from '@/lib/editor/measure-text';
 import type { PlumbPosture, PlumbReading } from '@/lib/editor/plumb';
+import { PlumbFiguresList } from './plumb-figures-list';
 import { Reading, ReadingList } from './reading-list';
 import { SideElevation } from './side-elevation';
+import { SpeedShapes } from './speed-shapes';
 
 const BEST = 'best';
 
@@ -70,7 +72,11 @@ export function PlumbPanel() {
         <>
           <SideElevation reading={reading} posture={posture} arm={arms.get(reading.robot.armId)} settings={settings} />
           {posture ? (
-            <PostureReadings reading={reading} posture={posture} />
+            <>
+              <PostureReadings reading={reading} posture={posture} />
+              <SpeedShapes reading={reading} posture={posture} />
+              <PlumbFiguresList reading={reading} posture={posture} />
+            </>
           ) : (
             <p role="status" className="mt-2 font-medium text-red">
               {reading.robot.name}: {reading.refusal}
@@ -131,7 +137,6 @@ function PostureReadings({ reading, posture }: PostureReadingsProps) {
       <Reading label="Fastest tool speed" value={posture.maximumToolSpeed} digits={2} unit="m/s" />
       <Reading label="Speed in every direction" value={posture.sureSpeed} digits={2} unit="m/s" />
       <Reading label="Bound by" words={posture.bindingJoint === null ? '–' : `J${posture.bindingJoint}`} />
-      <Reading label="Error gain, 1 arcmin a joint" value={posture.errorGainMm} digits={2} unit="mm" />
       <Reading label="Nearest joint limit" words={`J${posture.limit.joint}, ${posture.limit.words}`} />
     </ReadingList>
   );
