@@ -36,6 +36,9 @@ let revision: Awaited<ReturnType<typeof issueRevision>>;
 const folder = mkdtempSync(join(tmpdir(), 'reports-'));
 afterAll(() => rmSync(folder, { recursive: true }));
 
+/** Beside the distance itself. */
+const SAFETY_WORDS = 'Needs a risk assessment, measured stopping times, local codes and competent persons.';
+
 const POINTS = ['Infeed left', 'Far corner', '=Deburr 2'];
 
 function fixture(): Item {
@@ -61,7 +64,10 @@ beforeAll(async () => {
   const robot = robotItem(arm.id);
   const guard = itemSchema.parse({ kind: 'guardLine', id: randomUUID(), name: 'Guard', xMm: 0, yMm: 0, angleDeg: 0, pointsMm: [[-3000, -2500], [3500, -2500], [3500, 2500], [-3000, 2500]] }); // prettier-ignore
   const mapSettings = mapSettingsSchema.parse({ stepMm: 50, toolHeightMm: 600 });
-  const layout = await createLayout({ projectId, items: [robot, fixture(), guard] });
+  const device = (name: string, stopS: number | null) =>
+    itemSchema.parse({ kind: 'protectiveDevice', id: randomUUID(), name, xMm: 0, yMm: 0, angleDeg: 0, pointsMm: [[0, -2500], [2000, -2500]], stopS, responseS: 0.05, detectionMm: 30 }); // prettier-ignore
+  const items = [robot, fixture(), guard, device('Curtain told', 0.3), device('Curtain open', null)];
+  const layout = await createLayout({ projectId, items });
   await Layout.update({ mapSettings }, { where: { id: layout.id } });
   const map = await askMap(integrator.actor, questionOfRobot(robotSchema.parse(robot), mapSettings));
   await runTiles(map.id);
@@ -161,6 +167,11 @@ describe('a PDF report, read back', () => {
     for (const word of ['Assumptions', 'tool down, height 600 mm', 'kernel version', 'Inverse condition number']) {
       expect(text).toContain(word);
     }
+    // ISO 13855:2010 at right angles, d ≤ 40 mm (from memory): S = 2000 T + 8 (d − 14) = 700 + 128 > 500, so the slow form
+    // counts where it gives at least 500: S = 1600 × 0.35 + 128 = 688.
+    expect(text).toMatch(/Distance, planning aid 688 mm/);
+    expect(text).toContain('not told: figures are missing');
+    expect(squeezed(text)).toContain(squeezed(SAFETY_WORDS));
     expect(text).toContain('Certificate of sign-off');
     expect(text).toContain('Vera Holt');
     expect(text).not.toContain('vera@example.com');
