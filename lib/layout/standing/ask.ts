@@ -1,10 +1,10 @@
 import type { Arm, WristMode } from '@/lib/kinematics/types';
-import { liesInside } from '../clearance/plane';
-import { itemToFloor, type PointMm } from '../geometry';
+import { itemToFloor } from '../geometry';
 import type { Fixture, Item, Robot } from '../items';
 import { patternPlaces } from '../judging/places';
 import { reachRadius } from '../reach-radius';
 import { armWithTool } from '../robot-frame';
+import { commonBox, gridOver, tidy } from './grid-over';
 import { takenOutlines } from './taken-floor';
 import type { MapSettings } from '../map-settings';
 import type { ErrorGainQuestion, StandingQuestion, ToleranceQuestion, WorkPoint } from './question';
@@ -166,46 +166,4 @@ function turnsFrom(angleDeg: number, count: number): number[] {
     const turn = angleDeg + (360 * index) / count;
     return Number((turn > 180 ? turn - 360 : turn).toFixed(6));
   });
-}
-
-interface Box {
-  readonly min: PointMm;
-  readonly max: PointMm;
-}
-
-/** What lies within `reachMm` of every point, along x and along y. */
-function commonBox(points: readonly PointMm[], reachMm: number): Box {
-  const [xs, ys] = [points.map(([x]) => x), points.map(([, y]) => y)];
-  return {
-    min: [Math.max(...xs) - reachMm, Math.max(...ys) - reachMm],
-    max: [Math.min(...xs) + reachMm, Math.min(...ys) + reachMm],
-  };
-}
-
-/** Inside the guard line that the mover stands in; the drawn place is one of the grid's places. */
-function gridOver(items: readonly Item[], reachable: Box, drawn: PointMm, stepMm: number): StandingQuestion['grid'] {
-  const guard = guardBox(items, drawn);
-  const axis = (k: 0 | 1) => {
-    const low = Math.max(reachable.min[k], guard?.min[k] ?? -Infinity);
-    const high = Math.min(reachable.max[k], guard?.max[k] ?? Infinity);
-    // Points too far apart for any place leave one place, so that the answer can say so.
-    if (!(high >= low)) return { from: drawn[k], count: 1 };
-    const before = Math.max(0, Math.floor((drawn[k] - low) / stepMm));
-    const after = Math.max(0, Math.floor((high - drawn[k]) / stepMm));
-    return { from: drawn[k] - before * stepMm, count: before + after + 1 };
-  };
-  const [x, y] = [axis(0), axis(1)];
-  return { originMm: [tidy(x.from), tidy(y.from)], stepMm, columns: x.count, rows: y.count };
-}
-
-const tidy = (value: number): number => Math.round(value * 1e4) / 1e4;
-
-function guardBox(items: readonly Item[], [x, y]: PointMm): Box | null {
-  const around = items
-    .filter((item) => item.kind === 'guardLine' && item.closed && !item.hidden)
-    .map((item) => (item.kind === 'guardLine' ? item.pointsMm.map((point) => itemToFloor(item, point)) : []))
-    .find((outline) => outline.length >= 3 && liesInside(outline, x, y));
-  if (!around) return null;
-  const [xs, ys] = [around.map(([px]) => px), around.map(([, py]) => py)];
-  return { min: [Math.min(...xs), Math.min(...ys)], max: [Math.max(...xs), Math.max(...ys)] };
 }
