@@ -68,7 +68,9 @@ export function payloadPages(flow: Flow, { payloads }: VerdictsAnswer): void {
       figure(payload.inertiaKgM2, 'kg m²'),
       payload.within === null
         ? 'not told'
-        : { text: payload.within ? 'yes' : 'no', colour: payload.within ? green : red, face: 'sans-bold' },
+        : payload.within && payload.questions.length > 0
+          ? 'as far as known'
+          : { text: payload.within ? 'yes' : 'no', colour: payload.within ? green : red, face: 'sans-bold' },
       payload.questions.map(({ words }) => words).join(' '),
     ]),
   );
