@@ -38,8 +38,9 @@ export function boxOf(items: readonly Item[]): FloorBounds | null {
 
 /** The lines that the items of a sheet offer: both edges and the middle of what they cover, their places, and their task points. */
 function linesOfItem(item: Item): SnapLine[] {
-  // What measures is no edge of anything.
-  const box = item.hidden || item.kind === 'dimension' ? null : boxOf([item]);
+  // What measures or explains is no edge of anything.
+  const isWords = item.kind === 'dimension' || item.kind === 'note';
+  const box = item.hidden || isWords ? null : boxOf([item]);
   if (!box) return [];
   const both = (xMm: number, yMm: number, what: Guide['what']): SnapLine[] => [
     { axis: 'x', atMm: xMm, fromMm: box.minYMm, toMm: box.maxYMm, what, itemId: item.id },

@@ -17,6 +17,7 @@ test('a planner draws every kind of thing by clicks, edits an outline and keeps 
   await createProject(page, `Kinds of things ${Date.now()}`);
   await newVariant(page, 'all kinds');
   const sheet = new Sheet(page);
+  const chosen = sheet.values.locator('[data-inspector]');
   const value = (label: string) => sheet.values.getByLabel(label, { exact: true }).first();
   const set = async (label: string, words: string) => {
     await value(label).fill(words);
@@ -115,7 +116,7 @@ test('a planner draws every kind of thing by clicks, edits an outline and keeps 
     await sheet.click(2400, 2600);
     await sheet.click(2700, 2400);
     await page.keyboard.press('Escape');
-    await sheet.values.getByRole('button', { name: /Fixture A 1/ }).click();
+    await chosen.getByRole('button', { name: /^Fixture A 1/ }).click();
     await set('Wanted speed', '250');
     await set('Tilt from down', '45');
     await expect(value('Tilt from down')).toHaveValue('45');
@@ -133,7 +134,7 @@ test('a planner draws every kind of thing by clicks, edits an outline and keeps 
     await sheet.click(4500, 900);
     await expect(page.locator('[data-item-kind="fixture"]')).toHaveCount(2);
     await expect(value('x')).toHaveValue('4500');
-    await expect(sheet.values.getByRole('button', { name: /Fixture A [12]/ })).toHaveCount(2);
+    await expect(chosen.getByRole('button', { name: /^Fixture A [12]/ })).toHaveCount(2);
 
     await take(page, 'ownFixture');
     await page.getByRole('menuitem', { name: 'Rename or delete…' }).click();
