@@ -44,12 +44,52 @@ export function reach(solver: Solver, target: Target, score?: Score): ReachAnswe
   if (!free) return reachPose(solver, pose, 0, false, score);
   if (solver.toolOnLastAxis) return reachPose(solver, pose, 0, true, score);
   const samples = solver.closedForm.family ? FAMILY_ROLL_SAMPLES : ROLL_SAMPLES;
-  const answers = Array.from({ length: samples }, (_, k) => {
-    const roll = (2 * Math.PI * k) / samples;
+  const at = (roll: number): ReachAnswer => {
     const answer = reachPose(solver, rolled(pose, roll, identityTransform()), roll, false, score);
     return solver.closedForm!.family ? bestOfEachClass(solver, answer, score) : answer;
-  });
+  };
+  const stride = (2 * Math.PI) / samples;
+  const answers = Array.from({ length: samples }, (_, k) => at(k * stride));
+  const climbs = solver.closedForm.family ? FAMILY_ROLL_CLIMBS : ROLL_CLIMBS;
+  if (score) answers.push(...climbRolls(answers, stride, climbs, at, score));
   return bestOf(answers);
+}
+
+/** Rolls from which the best one is climbed to, and steps of falling size for each. */
+const ROLL_CLIMBS = 2;
+/** A redundant chain has a whole family to look through at each roll. */
+const FAMILY_ROLL_CLIMBS = 1;
+const ROLL_HALVINGS = 6;
+
+/** Answers at rolls beside the even samples, closer and closer about the best of them. */
+function climbRolls(
+  samples: readonly ReachAnswer[],
+  stride: number,
+  climbs: number,
+  at: (roll: number) => ReachAnswer,
+  score: Score,
+): ReachAnswer[] {
+  const worthOf = ({ postures }: ReachAnswer) => Math.max(-1, ...postures.map(({ posture }) => score(posture)));
+  const tops = samples
+    .map((answer, k) => ({ roll: k * stride, worth: worthOf(answer) }))
+    .filter(({ worth }) => worth >= 0)
+    .sort((one, other) => other.worth - one.worth)
+    .slice(0, climbs);
+  const found: ReachAnswer[] = [];
+  for (const top of tops) {
+    let { roll, worth } = top;
+    for (let halving = 0, step = stride / 2; halving < ROLL_HALVINGS; halving++, step /= 2) {
+      const middle = roll;
+      for (const trial of [middle - step, middle + step]) {
+        const answer = at(trial);
+        const there = worthOf(answer);
+        if (there <= worth) continue;
+        [roll, worth] = [trial, there];
+        found.push(answer);
+      }
+    }
+  }
+  return found;
 }
 
 /** `lastIsFree`: any value of the last joint will do, since it only rolls the tool, so it is laid in the middle of its range. */

@@ -6,8 +6,8 @@ import type { Arm, MapRequest } from '../types';
  * solutions, and so do the postures of a redundant arm; an arm without a closed form iterates; a cone asks once a direction.
  */
 const SEARCHED_ROLL_WORK = 80;
-const FAMILY_WORK = 8;
-const SEARCHED_FAMILY_WORK = 100;
+const FAMILY_WORK = 14;
+const SEARCHED_FAMILY_WORK = 200;
 const NUMERICAL_WORK = 800;
 
 export function mapWorkPerSpot(arm: Arm, request: MapRequest): number {
