@@ -64,21 +64,34 @@ function zoneOf({ spaces }: RobotSpaces): readonly PointMm[] {
   return (spaces.find(({ kind }) => kind === 'restricted') ?? spaces[0]).outlineMm;
 }
 
+type Search = ReturnType<typeof restrictedSearch>;
+
+/** Several panels look at the same spaces: each search is made once, and goes on from wherever it is looked at. */
+const searches = new Map<string, Search>();
+const KEPT_SEARCHES = 60;
+
+function searchFor({ robot, arm }: Subject): Search {
+  const { xMm, yMm, angleDeg, tool, part, jointStops } = robot;
+  const key = JSON.stringify([arm.id, xMm, yMm, angleDeg, tool, part?.radiusMm ?? 0, jointStops]);
+  const known = searches.get(key);
+  if (known) return known;
+  const made = restrictedSearch(robot, arm.definition, arm.reachMm);
+  searches.set(key, made);
+  if (searches.size > KEPT_SEARCHES) searches.delete(searches.keys().next().value!);
+  return made;
+}
+
 /** Searches direction by direction, so that the page stays quick under the hand. */
 function useRestricted(subjects: readonly Subject[]): ReadonlyMap<string, Space> {
   const [found, setFound] = useState<ReadonlyMap<string, Space>>(new Map());
   useEffect(() => {
-    const searches = subjects.map(({ robot, arm }) => ({
-      id: robot.id,
-      search: restrictedSearch(robot, arm.definition, arm.reachMm),
-    }));
     const done = new Map<string, Space>();
     let timer: ReturnType<typeof setTimeout>;
     const goOn = () => {
-      const open = searches.find(({ id }) => !done.has(id));
+      const open = subjects.find(({ robot }) => !done.has(robot.id));
       if (!open) return setFound(done);
-      const space = open.search.next();
-      if (space) done.set(open.id, space);
+      const space = searchFor(open).next();
+      if (space) done.set(open.robot.id, space);
       timer = setTimeout(goOn, 0);
     };
     timer = setTimeout(goOn, 0);
