@@ -72,6 +72,13 @@ describe('being seen on a sheet', () => {
     expect(waits.at(-1)).toBe(1000);
   });
 
+  it('is nowhere once the pointer is farther off than a sheet goes', async () => {
+    const { keeper, reports, turn } = bench();
+    keeper.pointAt({ xMm: 2_000_000, yMm: 0 });
+    await turn();
+    expect(reports[0].at).toBe(null);
+  });
+
   it('is silent on a hidden page, and gives its seat up when it ends', async () => {
     const { keeper, line, reports, turn, due } = bench();
     line.awake = false;

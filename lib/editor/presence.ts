@@ -19,6 +19,8 @@ export interface PresencePorts {
 const REPORT_EVERY_MS = 1000;
 const LONGEST_WAIT_MS = 15_000;
 const MOST_IDS = 50;
+/** No sheet goes farther; the server refuses a cursor beyond, and with it the whole report. */
+const FARTHEST_MM = 1_000_000;
 
 /** Says again and again where this planner is, and holds where the others are. */
 export class PresenceKeeper {
@@ -42,7 +44,8 @@ export class PresenceKeeper {
 
   /** The pointer is here on the floor; null: off the sheet. Sent with the next report. */
   readonly pointAt = (at: PresenceReport['at']): void => {
-    this.at = at;
+    const isOnSheet = at && Math.abs(at.xMm) <= FARTHEST_MM && Math.abs(at.yMm) <= FARTHEST_MM;
+    this.at = isOnSheet ? at : null;
   };
 
   /** Ends it and gives the seat up. */
