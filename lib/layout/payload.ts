@@ -61,7 +61,7 @@ export function checkPayload(
       field: 'inertia',
       words: 'What are the moments of inertia of tool and part? Without them inertia is not checked.',
     });
-  if (hasCentres && (wristRating?.momentNm == null || wristRating.inertiaKgM2 === null))
+  if (hasCentres && [wristRating?.momentNm ?? null, wristRating?.inertiaKgM2 ?? null].includes(null))
     questions.push({
       field: 'rating',
       words: 'What moment and inertia does the data sheet allow at the flange? Without them they are not checked.',
