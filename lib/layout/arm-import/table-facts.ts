@@ -39,7 +39,7 @@ export function readFact(line: string, number: number, facts: TableFacts): void 
   else if (word === 'payload') facts.payloadKg = numbersOf(value, 1, 'the payload in kg', where)[0];
   else if (word === 'convention') facts.convention = conventionOf(value, where);
   else if (word === 'base' || word === 'tool')
-    facts[word] = frameOfNumbers(numbersOf(value, 6, 'x y z in mm and roll pitch yaw in degrees', where));
+    facts[word] = frameOfNumbers(numbersOf(value, 6, 'x y z in mm and roll pitch yaw in degrees', `${where}, ${word}`));
   else if (word === 'controls') facts.freedoms = value.split(/\s+/).map((each) => freedomOf(each, where));
   else if (word === 'coupling') facts.coupling.push(numbersOf(value, null, 'one figure an actuator', where));
   else if (word === 'actuator')

@@ -138,7 +138,7 @@ describe('readArmTable', () => {
     ],
     ['an open quotation mark', `${HEADER}\n${ROW.replace('450', '"450')}`, /^Line 2: A quotation mark is opened/],
     ['joints out of order', `joint,${HEADER}\n2,${ROW}`, /^Line 2, column joint: Joint 1 is due here/],
-    ['a broken tool line', `# tool (mm, deg): 0 0 x 0 0 0\n${HEADER}\n${ROW}`, /^Line 1: Write x y z in mm/],
+    ['a broken tool line', `# tool (mm, deg): 0 0 x 0 0 0\n${HEADER}\n${ROW}`, /^Line 1, tool: Write x y z in mm/],
     ['another convention', `# convention: mine\n${HEADER}\n${ROW}`, /^Line 1: The convention is/],
   ])('refuses %s with its place', (_case, text, words) => {
     expect(refused(text)).toContainEqual(expect.stringMatching(words));
