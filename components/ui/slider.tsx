@@ -7,6 +7,8 @@ interface SliderProps {
   label: string;
   value: number;
   onValueChange: (value: number) => void;
+  /** Once the value is put down. */
+  onValueCommit?: (value: number) => void;
   /** Without these a share of a hundred in steps of five. */
   min?: number;
   max?: number;
@@ -28,6 +30,7 @@ export function Slider(props: SliderProps) {
       max={max}
       step={step}
       onValueChange={([next = value]) => onValueChange(next)}
+      onValueCommit={([next = value]) => props.onValueCommit?.(next)}
       className={classNames(
         'relative flex h-7 w-full touch-none items-center select-none pointer-coarse:h-11',
         className,

@@ -11,6 +11,7 @@ import { printed } from '@/lib/editor/measure-text';
 import type { PlumbPosture, PlumbReading } from '@/lib/editor/plumb';
 import { PlumbFiguresList } from './plumb-figures-list';
 import { Reading, ReadingList } from './reading-list';
+import { RiserSlider } from './riser-slider';
 import { SideElevation } from './side-elevation';
 import { SpeedShapes } from './speed-shapes';
 
@@ -71,6 +72,7 @@ export function PlumbPanel() {
       {reading ? (
         <>
           <SideElevation reading={reading} posture={posture} arm={arms.get(reading.robot.armId)} settings={settings} />
+          <RiserSlider robot={reading.robot} />
           {posture ? (
             <>
               <PostureReadings reading={reading} posture={posture} />
