@@ -8,7 +8,7 @@ import { invitationRequestSchema } from '@/lib/contracts/accounts';
 import { mapQuestionSchema } from '@/lib/contracts/maps';
 import { putObject } from '@/lib/server/object-store';
 import { createInvitation } from '@/lib/server/invitations/create-invitation';
-import { Comparison, RemarkPicture, DexterityMap, Study } from '@/models';
+import { Comparison, ProjectViewer, RemarkPicture, DexterityMap, Study } from '@/models';
 import { newStudyQuestion } from './study-jobs';
 import {
   createArm,
@@ -87,9 +87,12 @@ export async function buildAccessWorld() {
     addFloorPlan,
     addLayout,
     addShareLink: async () => (await createShareLink({ revisionId: revision.id })).shareLink,
-    /** A revision that no other row can supersede, and a link that may sign it. */
+    /** A revision that no other row can supersede, in a project of its own, and a link that may sign it. */
     addSignable: async () => {
-      const { id, sha256 } = await createRevision({ layoutId: (await addLayout()).id, snapshot });
+      const { id: ownProjectId } = await createProject({ organisationId });
+      const membershipId = callers.viewer.membership.id;
+      await ProjectViewer.create({ projectId: ownProjectId, membershipId, organisationId });
+      const { id, sha256 } = await createRevision({ layoutId: (await createLayout({ projectId: ownProjectId })).id });
       return { id, sha256, token: (await createShareLink({ revisionId: id, maySign: true })).token };
     },
     addComparison: () =>
