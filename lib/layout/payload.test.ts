@@ -53,6 +53,8 @@ describe('tool plus part', () => {
   it('ask for what is missing, with nothing assumed', () => {
     const check = checkPayload(load({}), null);
     expect(check.within).toBeNull();
+    // A rating alone does not make an unknown tool light enough.
+    expect(checkPayload(load({}), 12)).toMatchObject({ within: null, massKg: { margin: null } });
     expect(check.questions.map(({ field }) => field)).toEqual(['payload', 'toolMass', 'part']);
     const known = { massKg: 4, centreMm, inertiaKgM2 };
     expect(checkPayload(load({ tool: known, part: known }), 12).questions.map(({ field }) => field)).toEqual([

@@ -67,9 +67,10 @@ export function checkPayload(
       words: 'What moment and inertia does the data sheet allow at the flange? Without them they are not checked.',
     });
 
+  // A tool whose mass nobody has typed is no tool of 0 kg: nothing is held against the rating until it is known.
   const massKg = against(
     bodies.reduce((sum, body) => sum + body.massKg, 0),
-    payloadKg,
+    tool.massKg === 0 ? null : payloadKg,
   );
   const momentNm = hasCentres
     ? against(GRAVITY * Math.hypot(...firstMoment(loaded)), wristRating?.momentNm ?? null)
