@@ -25,7 +25,13 @@ test('a planner draws every kind of thing by clicks, edits an outline and keeps 
   };
   // Something large first, and the view on it, so that every later spot is on the screen.
   await take(page, 'guardLine');
-  for (const spot of [[0, 0], [6000, 0], [6000, 4000], [0, 4000]] as const) await sheet.click(...spot); // prettier-ignore
+  for (const [x, y] of [
+    [0, 0],
+    [6000, 0],
+    [6000, 4000],
+    [0, 4000],
+  ])
+    await sheet.click(x, y);
   await page.keyboard.press('Enter');
   await page.getByRole('button', { name: 'Show the whole sheet' }).click();
   await expect(page.locator('[data-item-kind="guardLine"]')).toHaveCount(1);

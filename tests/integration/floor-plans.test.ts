@@ -17,6 +17,7 @@ import {
   createProject,
   robotItem,
   type TestMember,
+  type Handler,
 } from '@/tests/factories';
 import { storedKeys } from './support/stored-keys';
 import { upload } from './support/upload';
@@ -39,7 +40,7 @@ async function uploaded(): Promise<FloorPlan> {
   return floorPlanSchema.parse(await response.json());
 }
 
-const call = (handler: typeof GET, floorPlanId: string, as: TestMember, options: object = {}) =>
+const call = (handler: Handler, floorPlanId: string, as: TestMember, options: object = {}) =>
   callRoute(handler, { as, params: { floorPlanId }, ...options });
 
 /** A variant with a robot on it, so that there is something to issue. */

@@ -46,7 +46,15 @@ async function start(): Promise<WorkerProcess> {
 async function askSlowMap(toolHeightMm = 300): Promise<DexterityMap> {
   const arm = await createArm({ organisationId: planner.organisationId });
   const tool = { xMm: 20, yMm: 0, zMm: 100, rollDeg: 0, pitchDeg: 20, yawDeg: 0 };
-  const settings = { tiltDeg: 0, towards: 'outward', rollDeg: 'free', wrist: 'free', branch: 'best', coneDeg: 0, stepMm: 75 } as const;
+  const settings = {
+    tiltDeg: 0,
+    towards: 'outward',
+    rollDeg: 'free',
+    wrist: 'free',
+    branch: 'best',
+    coneDeg: 0,
+    stepMm: 75,
+  } as const;
   return askMap(planner.actor, question(arm.id, { tool, settings, toolHeightMm }));
 }
 

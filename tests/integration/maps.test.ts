@@ -21,6 +21,7 @@ import {
   createProject,
   createRevision,
   type TestMember,
+  type Handler,
 } from '@/tests/factories';
 import { inProcess, question, runTiles, SEVERAL_TILES, tileJobs, tilesOf } from './support/map-jobs';
 
@@ -45,7 +46,7 @@ async function askAs(member: TestMember, body: unknown) {
   return { status: response.status, json, map: dexterityMapSchema.safeParse(json).data };
 }
 
-async function call(handler: typeof read, member: TestMember, mapId: string, method = 'GET') {
+async function call(handler: Handler, member: TestMember, mapId: string, method = 'GET') {
   const response = await callRoute(handler, { as: member, method, path: `/api/maps/${mapId}`, params: { mapId } });
   return { status: response.status, json: (await response.json()) as unknown };
 }

@@ -28,6 +28,7 @@ import {
   createShareLink,
   emptySnapshot,
   type TestMember,
+  type Handler,
 } from '@/tests/factories';
 import { upload } from './support/upload';
 
@@ -41,7 +42,6 @@ beforeAll(async () => {
   revisionId = (await createRevision({ layoutId: (await createLayout({ projectId })).id })).id;
 });
 
-type Handler = typeof open;
 const visit = (handler: Handler, token: string, params: object = {}, path = '/') =>
   callRoute(handler, { params: { token, ...params }, path });
 
