@@ -1,3 +1,4 @@
+import { nextLetter } from '@/lib/server/layouts/letters';
 import { randomUUID } from 'node:crypto';
 import type { ArmContent, LibraryArm } from '@/lib/contracts/arms';
 import type { Snapshot } from '@/lib/contracts/revisions';
@@ -45,10 +46,11 @@ interface LayoutOptions {
 
 export async function createLayout(options: LayoutOptions = {}): Promise<Layout> {
   const projectId = options.projectId ?? (await createProject()).id;
-  const letter = String.fromCharCode(65 + (await Layout.count({ where: { projectId } })));
+  const given = await Layout.findAll({ where: { projectId }, attributes: ['letter'] });
+  const letter = nextLetter(given.map((layout) => layout.letter));
   const layout = await Layout.create({
     projectId,
-    letter,
+    letter: letter ?? 'A',
     name: options.name ?? unique('Variant'),
     mapSettings: mapSettingsSchema.parse({}),
     createdBy: options.createdBy ?? null,
