@@ -25,7 +25,7 @@ test('an integrator hands a variant over as PDF, DXF and JSON, and takes the JSO
   const fetchPdf = report.getByRole('button', { name: /^Download/ });
   await expect(fetchPdf).toBeVisible({ timeout: 90_000 });
   const pdf = await saved(page, () => fetchPdf.click());
-  expect(pdf.download.suggestedFilename()).toMatch(/-A-draft-A4\.pdf$/);
+  expect(pdf.download.suggestedFilename()).toMatch(/-B-draft-A4\.pdf$/);
   const text = execFileSync('pdftotext', ['-layout', pdf.path, '-'], { encoding: 'utf8' });
   for (const words of [DEMO_PROJECT, 'Verdicts', 'Deburr 2', 'Assumptions', 'Cautions', 'risk assessment']) {
     expect(text).toContain(words);
