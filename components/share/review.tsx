@@ -32,7 +32,9 @@ export function Review({ subject }: { readonly subject: ReviewSubject }) {
   const { verdicts, robots } = reading;
   const met = verdicts.filter(({ best }) => best?.met).length;
   const openCount = (review.remarks ?? []).filter(({ resolvedAt }) => resolvedAt === null).length;
-  const things = document.items.filter(({ hidden, kind }) => !hidden && !['dimension', 'sectionLine', 'note'].includes(kind));
+  const things = document.items.filter(
+    ({ hidden, kind }) => !hidden && !['dimension', 'sectionLine', 'note'].includes(kind),
+  );
 
   const pinSpot = (point: FloorPoint, itemId: string | null) => {
     setChosenId(null);

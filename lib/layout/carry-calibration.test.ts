@@ -11,7 +11,11 @@ const calibrated = calibrate({
 
 describe('a newer picture of the same floor plan', () => {
   it('puts the same spot of the paper on the same spot of the floor, at twice the pixels', () => {
-    const request = carriedCalibration(calibrated, { widthPx: 1000, heightPx: 1000 }, { widthPx: 2000, heightPx: 2000 });
+    const request = carriedCalibration(
+      calibrated,
+      { widthPx: 1000, heightPx: 1000 },
+      { widthPx: 2000, heightPx: 2000 },
+    );
     const carried = calibrate(request!);
     for (const spot of [
       [0, 0],
@@ -25,8 +29,8 @@ describe('a newer picture of the same floor plan', () => {
   });
 
   it('is refused where the picture has another shape', () => {
-    expect(
-      carriedCalibration(calibrated, { widthPx: 1000, heightPx: 1000 }, { widthPx: 2000, heightPx: 1500 }),
-    ).toBe(null);
+    expect(carriedCalibration(calibrated, { widthPx: 1000, heightPx: 1000 }, { widthPx: 2000, heightPx: 1500 })).toBe(
+      null,
+    );
   });
 });

@@ -53,7 +53,7 @@ describe('the analyse command', () => {
   });
 
   it.each([
-    ['a wait below zero', JSON.stringify({ arm, sequence: { steps: [{ wait: -1 }] } }), 'sequence.steps[0]'],
+    ['a wait below zero', JSON.stringify({ arm, sequence: { steps: [{ wait: -1 }] } }), 'sequence.steps[0].wait'],
     ['nothing', '', ''],
     ['blanks', ' \n', ''],
     ['no JSON', '{"arm": NaN}', ''],

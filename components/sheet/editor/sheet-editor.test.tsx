@@ -200,9 +200,7 @@ describe('the state of the sheet', () => {
 
 describe('remarks', () => {
   it('are listed with their pins’ numbers', async () => {
-    server.remarks = [
-      fakeRemark(30, { revisionId: fakeId(31), number: 3, xMm: 10, yMm: 20 }),
-    ];
+    server.remarks = [fakeRemark(30, { revisionId: fakeId(31), number: 3, xMm: 10, yMm: 20 })];
     const { user } = await open();
     await user.click(await screen.findByRole('tab', { name: /^Remarks/ }));
     await user.click(await screen.findByRole('button', { name: /maintenance cart/ }));

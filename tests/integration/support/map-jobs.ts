@@ -9,7 +9,15 @@ import type { MapQuestion } from '@/lib/contracts/maps';
 import { MapTile } from '@/models';
 
 /** Fine enough for several tiles. */
-export const SEVERAL_TILES = { tiltDeg: 0, towards: 'outward', rollDeg: 'free', wrist: 'held', branch: 'best', coneDeg: 0, stepMm: 25 } as const;
+export const SEVERAL_TILES = {
+  tiltDeg: 0,
+  towards: 'outward',
+  rollDeg: 'free',
+  wrist: 'held',
+  branch: 'best',
+  coneDeg: 0,
+  stepMm: 25,
+} as const;
 
 /** A coarse map of the test arm: one tile, done in a moment. */
 export function question(armId: string, change: Partial<MapQuestion> = {}): MapQuestion {
