@@ -1,11 +1,12 @@
 'use client';
 
+import { useMemo } from 'react';
 import { useRouter, useSearchParams } from 'next/navigation';
 import { SubjectFault } from '@/components/shell/subject-fault';
 import { Page } from '@/components/ui/page';
 import { TitleBlock } from '@/components/ui/title-block';
 import { useMayActAs } from '@/lib/client/account-context';
-import { comparisonViewSchema } from '@/lib/contracts/comparisons';
+import { comparisonViewSchema, type ComparisonView } from '@/lib/contracts/comparisons';
 import { parseSheetRef, sheetRefText, type SheetRef } from '@/lib/client/sheet-ref';
 import { useProject } from '@/lib/client/use-project';
 import { useSheetChoices } from '@/lib/client/use-sheet-choices';
@@ -15,6 +16,12 @@ import { chosenSheets } from './chosen-sheets';
 import { ComparedSheets } from './compared-sheets';
 
 type Side = 'left' | 'right' | 'third' | 'fourth';
+
+/** What the address chooses; a member that it leaves out is left out here too, or it would cover the sheet's own. */
+function viewOf(measure: string | null, wrist: string | null): Partial<ComparisonView> {
+  const chosen = { ...(measure !== null && { measure }), ...(wrist !== null && { wrist }) };
+  return comparisonViewSchema.partial().catch({}).parse(chosen);
+}
 
 /** Two sheets of a project side by side: map against map, number against number, thing against thing. */
 export default function ComparePage({ projectId }: { readonly projectId: string }) {
@@ -29,13 +36,8 @@ export default function ComparePage({ projectId }: { readonly projectId: string 
   const [thirdRef, fourthRef] = [parseSheetRef(search.get('third')), parseSheetRef(search.get('fourth'))];
   const thirdAsked = useSheetDocument(thirdRef);
   const fourthAsked = useSheetDocument(fourthRef);
-  const view = comparisonViewSchema
-    .partial()
-    .catch({})
-    .parse({
-      measure: search.get('measure') ?? undefined,
-      wrist: search.get('wrist') ?? undefined,
-    });
+  const [measureText, wristText] = [search.get('measure'), search.get('wrist')];
+  const view = useMemo(() => viewOf(measureText, wristText), [measureText, wristText]);
   const sheets = [leftRef, rightRef, thirdRef, fourthRef].flatMap((ref) => (ref ? sheetRefText(ref) : []));
 
   const fault = project.error ?? choicesError;

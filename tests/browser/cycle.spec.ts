@@ -76,7 +76,7 @@ test('work gets its verdicts, and a robot its cycle, timed as steps are added, m
   await fill(page, 'Target, 0 for none', '2');
   await expect(total).toContainText('over the 2.00 s wanted');
   await fill(page, 'Takes', '-1');
-  await expect(page.getByRole('alert')).toContainText('A time is 0 s or more.');
+  await expect(page.getByText('A time is 0 s or more.')).toBeVisible();
   await page.keyboard.press('Escape');
 
   // The keyboard moves a step, one undo brings it back, and a step can be taken out.
