@@ -90,16 +90,14 @@ async function build() {
   }
 }
 
-async function runVitest() {
-  for (const project of ['unit', 'components', 'integration']) {
-    if (!plan.wants(project)) continue;
-    const args = (report) =>
-      [bin.vitest, 'run', '--project', project, '--reporter=default', '--reporter=json'].concat(
-        `--outputFile.json=${report}`,
-        plan.files,
-      );
-    await test(project, 'vitest', args, () => ({}));
-  }
+async function runVitest(project) {
+  if (!plan.wants(project)) return;
+  const args = (report) =>
+    [bin.vitest, 'run', '--project', project, '--reporter=default', '--reporter=json'].concat(
+      `--outputFile.json=${report}`,
+      plan.files,
+    );
+  await test(project, 'vitest', args, () => ({}));
 }
 
 async function runBrowser() {
@@ -117,9 +115,18 @@ try {
   if (plan.wantsTests) await installTestPackages(installation.say);
   await installation.prepare({ services: plan.wantsServices });
   if (plan.wantsServices) await installation.startServices({ anew: true });
-  // Two cores: what reads the sources runs beside the tests that mostly wait.
-  const [built] = await Promise.all([readSources().then(() => plan.wants('browser') && build()), runVitest()]);
-  if (built) await runBrowser();
+  // Two cores: what reads the sources and the browser runs beside the other tests. The browser's stories begin with an empty
+  // database, so they wait for the integration tests to be through with theirs.
+  const integration = runVitest('integration');
+  await Promise.all([
+    readSources()
+      .then(() => plan.wants('browser') && build())
+      .then(async (built) => {
+        await integration;
+        if (built) await runBrowser();
+      }),
+    integration.then(() => runVitest('unit')).then(() => runVitest('components')),
+  ]);
   if (plan.wantsTests && total.passed + total.failed === 0) {
     total.failed = 1;
     console.log('\nNo test was found.');

@@ -3,7 +3,12 @@ import { chromium, type Page } from '@playwright/test';
 import { z } from 'zod';
 
 /** Where Debian and others put the browser; CHROMIUM names another one. */
-const PLACES = ['/usr/bin/chromium', '/usr/bin/chromium-browser', '/usr/bin/google-chrome'];
+const PLACES = [
+  '/usr/bin/chromium-headless-shell',
+  '/usr/bin/chromium',
+  '/usr/bin/chromium-browser',
+  '/usr/bin/google-chrome',
+];
 
 const accountsSchema = z.array(z.looseObject({ role: z.string(), email: z.string(), password: z.string() }));
 

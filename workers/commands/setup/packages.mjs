@@ -44,7 +44,7 @@ export function postgresPrograms(wanted) {
 export async function installDebianPackages(say, { database = true, browser = false } = {}) {
   const missing = [];
   if (database && !postgresPrograms()) missing.push('postgresql');
-  if (browser && !has('chromium')) missing.push('chromium');
+  if (browser && !has('chromium-headless-shell')) missing.push('chromium-headless-shell');
   if (missing.length === 0) return;
   if (!canInstall())
     throw new SetupError(
