@@ -99,6 +99,7 @@ test('work gets its verdicts, and a robot its cycle, timed as steps are added, m
 
   // What the tool weighs is asked before anything is said of the payload.
   await tab(page, 'Readings').click();
+  await sheet.row('R1').first().click();
   const payload = page.getByRole('region', { name: 'Payload' });
   await expect(payload).toContainText('What does the tool weigh?');
   await fill(page, 'Tool mass', '14');

@@ -11,7 +11,8 @@ interface ShortcutsDialogProps {
 export function ShortcutsDialog({ open, onOpenChange }: ShortcutsDialogProps) {
   return (
     <Dialog wide open={open} onOpenChange={onOpenChange} title="Keys and gestures">
-      <div className="grid gap-x-8 gap-y-4 sm:grid-cols-2">
+      {/* The list scrolls, so the keyboard has to be able to stand on it. */}
+      <div tabIndex={0} role="group" aria-label="All keys" className="grid gap-x-8 gap-y-4 sm:grid-cols-2">
         {SHORTCUTS.map(({ title, entries }) => (
           <section key={title}>
             <h3 className="mb-1 text-sm font-medium text-ink-soft">{title}</h3>
