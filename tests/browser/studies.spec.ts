@@ -31,7 +31,7 @@ test('a standing map finds a better place for a base, puts it there in one step,
   await page.locator('[data-put-there]').click();
   await expect(page.locator('[data-put-there]')).toHaveText(/stands there/);
   await sheet.row('R1').click();
-  await tab(page, 'Values').click();
+  await tab(page, 'Readings').click();
   await expect(sheet.values.getByLabel('x', { exact: true }).first()).toHaveValue(x[1]);
   // One step: one undo brings the drawn place back.
   await page.keyboard.press('Control+z');
