@@ -126,6 +126,8 @@ const withoutReact = {
     'migrations/**',
     'workers/**',
     'app/api/**',
+    'tests/**',
+    '**/*.test.ts',
   ],
   rules: Object.fromEntries(
     next

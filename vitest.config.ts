@@ -30,6 +30,8 @@ export default defineConfig({
         test: {
           name: 'components',
           environment: 'jsdom',
+          // React and the design are loaded once; every file cleans up after itself.
+          isolate: false,
           include: ['{app,components,lib}/**/*.test.tsx'],
           setupFiles: ['tests/components/setup.ts'],
           testTimeout: 60_000,
