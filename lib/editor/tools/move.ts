@@ -36,7 +36,7 @@ const unlocked = ({ itemIds }: Selection, { items }: View): Item[] =>
 /** The items of the snapshot follow the pointer, which took hold of them at `start`; letting go ends it as one step. */
 function following(
   name: 'select' | 'carry',
-  todo: string,
+  prompt: string,
   snapshot: readonly Item[],
   lead: Item | undefined,
   start: FloorSpot,
@@ -62,7 +62,7 @@ function following(
     }));
   };
 
-  const self = state(name, lead ? `${todo} Alt suspends snapping, Escape takes it back.` : 'It is locked.', {
+  const self = state(name, lead ? `${prompt} Alt suspends snapping, Escape takes it back.` : 'It is locked.', {
     busy: true,
     move: (press, now) => ({ tool: self, draft: { items: at(press, now) } }),
     release: (press, now) => ({
