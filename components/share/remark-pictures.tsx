@@ -43,7 +43,7 @@ export function RemarkPictures({ remark, review }: RemarkPicturesProps) {
                 aria-label={`Picture ${index + 1} of remark ${number}, full size`}
               >
                 {/* The picture's address is a key or needs the session: no optimiser may fetch it. */}
-                {/* eslint-disable-next-line @next/next/no-img-element */}
+                {/* eslint-disable-next-line @next/next/no-img-element -- the picture comes from a route behind the session or the link */}
                 <img
                   src={review.pictureUrl(id, picture.id)}
                   alt={`Picture ${index + 1} of remark ${number}`}

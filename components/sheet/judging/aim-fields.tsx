@@ -12,7 +12,7 @@ interface AimFieldsProps {
   readonly onEdit: (label: string, patch: Partial<Aim>) => string | null;
 }
 
-/** How the tool is held and how fast it shall go: the same for every place of a path or a pattern. Cells of a grid of three. */
+/** How the tool is held and how fast it shall go: at a task point, or at every place of a path or a pattern. Cells of a grid of three. */
 export function AimFields({ task, disabled, onEdit }: AimFieldsProps) {
   const isRollFree = task.rollDeg === 'free';
   return (

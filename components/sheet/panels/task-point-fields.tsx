@@ -3,7 +3,7 @@
 import { ArrowDown, ArrowUp, Plus, Trash2 } from 'lucide-react';
 import { useBoard, useBoardSheet } from '@/components/sheet/editor/board-context';
 import { Button } from '@/components/ui/button';
-import { Checkbox } from '@/components/ui/checkbox';
+import { AimFields } from '@/components/sheet/judging/aim-fields';
 import { classNames } from '@/components/ui/class-names';
 import { editedTaskPoint, reorderedTaskPoint, withoutTaskPoint } from '@/lib/editor/edits';
 import { placeTaskPointInView } from '@/lib/editor/place-in-view';
@@ -79,7 +79,6 @@ function OnePoint({ fixture, point }: { readonly fixture: Fixture; readonly poin
     put(label, result.value);
     return null;
   };
-  const isRollFree = point.rollDeg === 'free';
   const field = (label: string, key: 'xMm' | 'yMm' | 'zMm') => (
     <ValueField label={label} kind="length" value={point[key]} onCommit={(value) => edit(label, { [key]: value })} />
   );
@@ -117,42 +116,6 @@ function OnePoint({ fixture, point }: { readonly fixture: Fixture; readonly poin
         {field('y in fixture', 'yMm')}
         {field('z over floor', 'zMm')}
         <ValueField
-          label="Tilt from down"
-          kind="angle"
-          step={5}
-          value={point.tiltDeg}
-          onCommit={(tiltDeg) =>
-            tiltDeg < 0 || tiltDeg > 180 ? 'Write 0 (straight down) to 180 (straight up).' : edit('Tilt', { tiltDeg })
-          }
-        />
-        <ValueField
-          label="Tilts towards"
-          kind="angle"
-          step={5}
-          value={point.azimuthDeg}
-          onCommit={(azimuthDeg) => edit('Azimuth', { azimuthDeg })}
-        />
-        <ValueField
-          label="Roll"
-          kind="angle"
-          step={5}
-          value={point.rollDeg === 'free' ? 0 : point.rollDeg}
-          disabled={isRollFree}
-          onCommit={(rollDeg) => edit('Roll', { rollDeg })}
-        />
-        <ValueField
-          label="Wanted speed"
-          kind="number"
-          unit="mm/s"
-          step={50}
-          value={point.speedMmS ?? 0}
-          onCommit={(speed) =>
-            speed < 0
-              ? 'Write a speed above zero, or 0 for none.'
-              : edit('Speed', { speedMmS: speed === 0 ? null : speed })
-          }
-        />
-        <ValueField
           label="Dwell"
           kind="number"
           unit="s"
@@ -160,12 +123,7 @@ function OnePoint({ fixture, point }: { readonly fixture: Fixture; readonly poin
           value={point.dwellS}
           onCommit={(dwellS) => (dwellS < 0 ? 'A dwell is 0 s or more.' : edit('Dwell', { dwellS }))}
         />
-        <Checkbox
-          className="self-end"
-          label="Roll is free"
-          checked={isRollFree}
-          onCheckedChange={(free) => edit('Roll', { rollDeg: free ? 'free' : 0 })}
-        />
+        <AimFields task={point} onEdit={edit} />
       </div>
       <DoneBy robotId={point.robotId} disabled={fixture.locked} onChange={(robotId) => edit('Robot', { robotId })} />
     </div>

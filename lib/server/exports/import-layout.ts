@@ -1,11 +1,12 @@
 import { isDeepStrictEqual } from 'node:util';
 import type { LayoutFile, LayoutImportAnswer } from '@/lib/contracts/layout-file';
-import { Arm, Layout, LayoutItem } from '@/models';
+import { Arm, Layout } from '@/models';
 import { createArm } from '../arms/create-arm';
 import { recordAudit } from '../audit';
 import { inTransaction, type Transaction } from '../database';
 import { AppError } from '../errors';
 import { createLayout } from '../layouts/create-layout';
+import { layItems } from '../layouts/item-rows';
 import { deleteObjects } from '../object-store';
 import { actsAs, demandRole, type MemberActor } from '../policy';
 import { findProject } from '../projects/data';
@@ -57,20 +58,7 @@ async function insert(
   if (prepared && newId) await addPlan(actor, projectId, prepared, newId, transaction);
   const floorPlanId = knownId ?? newId;
   await Layout.update({ mapSettings: file.mapSettings, floorPlanId }, { where: { id: summary.id }, transaction });
-  // One behind another in time: items without a place of their own are listed as they came.
-  const startMs = Date.now();
-  await LayoutItem.bulkCreate(
-    withArms(file.items, armIds).map((item, index) => ({
-      layoutId: summary.id,
-      id: item.id,
-      version: 1,
-      kind: item.kind,
-      data: item,
-      layoutVersion: 0,
-      createdAt: new Date(startMs + index),
-    })),
-    { transaction },
-  );
+  await layItems(summary.id, withArms(file.items, armIds), transaction);
   const details = { letter: summary.letter, name: file.name, items: file.items.length };
   await recordAudit(actor, { action: 'layout.imported', subjectId: summary.id, details }, transaction);
   return {

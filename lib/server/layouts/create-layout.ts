@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import type { Transaction } from 'sequelize';
-import { Layout, LayoutItem, type Project } from '@/models';
+import { Layout, type Project } from '@/models';
 import type { LayoutRequest, LayoutSummary } from '@/lib/contracts/layouts';
 import { withFreshIds } from '@/lib/layout/fresh-ids';
 import { mapSettingsSchema } from '@/lib/layout/map-settings';
@@ -10,6 +10,7 @@ import { conflict, invalid } from '../errors';
 import type { MemberActor } from '../policy';
 import { findProject } from '../projects/data';
 import { storedItemsOf } from './data';
+import { layItems } from './item-rows';
 import { nextLetter } from './letters';
 import { summaryOf } from './read-layouts';
 
@@ -35,21 +36,7 @@ async function modelLayout(project: Project, layoutId: string, transaction: Tran
 async function copyItems(model: Layout, layout: Layout, transaction: Transaction): Promise<void> {
   // Items and their parts have ids of their own in every variant; what points to another item points to its copy.
   const originals = (await storedItemsOf(model.id, transaction)).map(({ item }) => item);
-  const items = withFreshIds(originals, randomUUID);
-  // One behind another in time, so that the copy lists them in the same order.
-  const startMs = Date.now();
-  await LayoutItem.bulkCreate(
-    items.map((item, index) => ({
-      layoutId: layout.id,
-      id: item.id,
-      version: 1,
-      kind: item.kind,
-      data: item,
-      layoutVersion: 0,
-      createdAt: new Date(startMs + index),
-    })),
-    { transaction },
-  );
+  await layItems(layout.id, withFreshIds(originals, randomUUID), transaction);
 }
 
 /** A new variant under the next free letter, empty or with the items, floor plan and map settings of another one. */

@@ -1,5 +1,6 @@
 import type { Transaction } from 'sequelize';
 import { LayoutItem, type Layout } from '@/models';
+import type { Item } from '@/lib/layout/items';
 import type { StoredItem } from '@/lib/layout/operations';
 
 /** The part of a sheet that a batch is about. */
@@ -22,6 +23,24 @@ export async function holdItems(
     items: rows.filter(({ removedAt }) => !removedAt).map(({ version, data }) => ({ version, item: data })),
     removedVersions: new Map(rows.filter(({ removedAt }) => removedAt).map(({ id, version }) => [id, version])),
   };
+}
+
+/** The first items of a layout that has none yet, at version 1. */
+export async function layItems(layoutId: string, items: readonly Item[], transaction: Transaction): Promise<void> {
+  // One behind another in time: items without a place in the list stand there as they came.
+  const startMs = Date.now();
+  await LayoutItem.bulkCreate(
+    items.map((item, index) => ({
+      layoutId,
+      id: item.id,
+      version: 1,
+      kind: item.kind,
+      data: item,
+      layoutVersion: 0,
+      createdAt: new Date(startMs + index),
+    })),
+    { transaction },
+  );
 }
 
 /** Writes what became of the items touched, under the layout's new version; those not in `after` become tombstones. */

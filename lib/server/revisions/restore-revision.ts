@@ -1,9 +1,10 @@
 import type { Transaction } from 'sequelize';
 import type { LayoutSummary } from '@/lib/contracts/layouts';
-import { FloorPlan, Layout, LayoutItem } from '@/models';
+import { FloorPlan, Layout } from '@/models';
 import { recordAudit } from '../audit';
 import { inTransaction } from '../database';
 import { letterFor } from '../layouts/create-layout';
+import { layItems } from '../layouts/item-rows';
 import { summaryOf } from '../layouts/read-layouts';
 import type { MemberActor } from '../policy';
 import { findProject } from '../projects/data';
@@ -36,20 +37,7 @@ export async function restoreRevision(
       },
       { transaction },
     );
-    const startMs = Date.now();
-    await LayoutItem.bulkCreate(
-      snapshot.items.map((item, index) => ({
-        layoutId: layout.id,
-        id: item.id,
-        version: 1,
-        kind: item.kind,
-        data: item,
-        layoutVersion: 0,
-        // One behind another in time, so that the sheet lists them in the same order.
-        createdAt: new Date(startMs + index),
-      })),
-      { transaction },
-    );
+    await layItems(layout.id, snapshot.items, transaction);
     await recordAudit(
       actor,
       { action: 'revision.restored', subjectId: revisionId, details: { layoutId: layout.id } },
