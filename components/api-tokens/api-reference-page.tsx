@@ -104,9 +104,9 @@ function OperationRow({ method, path, operation }: Entry) {
   return (
     <details className="px-3.5 py-2">
       <summary className="flex min-h-8 cursor-pointer flex-wrap items-baseline gap-x-3 pointer-coarse:min-h-11">
-        <span className="w-14 shrink-0 font-mono text-sm font-medium text-petrol">{method.toUpperCase()}</span>
+        <span className="shrink-0 font-mono text-sm font-medium text-petrol sm:w-14">{method.toUpperCase()}</span>
         <span className="min-w-0 font-mono text-sm break-all">{path}</span>
-        <span className="min-w-0 flex-1 text-ink-soft sm:text-right">{operation.summary}</span>
+        <span className="min-w-0 text-ink-soft max-sm:w-full sm:flex-1 sm:text-right">{operation.summary}</span>
       </summary>
       <div className="grid gap-3 pt-2 pb-1 text-[0.9375rem] sm:pl-17">
         {operation.description && <p>{operation.description}</p>}

@@ -10,15 +10,15 @@ import type { Remark } from '@/lib/contracts/remarks';
 export function RemarkTable({ remarks }: { readonly remarks: readonly Remark[] }) {
   const today = new Date().toISOString().slice(0, 10);
   return (
-    <DataTable caption="Remarks of the project" className="min-w-[52rem]">
+    <DataTable caption="Remarks of the project" className="sm:min-w-[52rem]">
       <thead>
         <tr>
           <HeadCell>No.</HeadCell>
           <HeadCell>Sheet</HeadCell>
-          <HeadCell className="w-[38%]">Remark</HeadCell>
-          <HeadCell>By</HeadCell>
-          <HeadCell>Given to</HeadCell>
-          <HeadCell>Due</HeadCell>
+          <HeadCell className="sm:w-[38%]">Remark</HeadCell>
+          <HeadCell className="max-sm:hidden">By</HeadCell>
+          <HeadCell className="max-sm:hidden">Given to</HeadCell>
+          <HeadCell className="max-sm:hidden">Due</HeadCell>
           <HeadCell>State</HeadCell>
         </tr>
       </thead>
@@ -42,11 +42,11 @@ export function RemarkTable({ remarks }: { readonly remarks: readonly Remark[] }
                 </span>
               )}
             </DataCell>
-            <DataCell>
+            <DataCell className="max-sm:hidden">
               {remark.author.you ? 'You' : remark.author.name}, <Moment iso={remark.createdAt} />
             </DataCell>
-            <DataCell>{remark.assignee?.name ?? '–'}</DataCell>
-            <DataCell className={classNames('font-mono', isOverdue(remark, today) && 'text-red')}>
+            <DataCell className="max-sm:hidden">{remark.assignee?.name ?? '–'}</DataCell>
+            <DataCell className={classNames('font-mono max-sm:hidden', isOverdue(remark, today) && 'text-red')}>
               {remark.dueOn ?? '–'}
               {isOverdue(remark, today) && <span className="sr-only"> overdue</span>}
             </DataCell>

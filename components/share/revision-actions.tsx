@@ -23,6 +23,7 @@ export function RevisionActions({ revision }: { readonly revision: Revision }) {
         >
           What changed since
         </MenuItem>
+        <MenuItem onSelect={() => router.push(`/revisions/${id}/hand-over`)}>Hand over</MenuItem>
         <MenuItem onSelect={() => setRestoring(true)}>Restore as a new draft…</MenuItem>
       </Menu>
       <ConfirmDialog

@@ -63,7 +63,9 @@ function Opened({ revision }: { readonly revision: Revision }) {
         ]}
         actions={
           <>
-            <LinkButton href={`/revisions/${id}/hand-over`}>Hand over</LinkButton>
+            <LinkButton href={`/revisions/${id}/hand-over`} className={mayEdit ? 'max-sm:hidden' : undefined}>
+              Hand over
+            </LinkButton>
             {mayEdit && <RevisionActions revision={revision} />}
             {mayShare && (
               <Button variant="action" onClick={() => setSharing(true)}>
