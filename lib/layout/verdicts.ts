@@ -4,7 +4,8 @@ import { makeCellJudge, type ArmOf, type CellVerdicts, type PointVerdict } from 
 
 export { makeCellJudge, type ArmOf, type CellJudge, type CellVerdicts, type PointVerdict } from './judging/cell-judge';
 export type { ReachedPosture, RobotVerdict } from './judging/point-verdict';
-export type { PathVerdict, PathReading, RobotPathVerdict } from './judging/path-verdict';
+export type { PathReading, RobotPathVerdict } from './judging/path-run';
+export type { PathVerdict } from './judging/path-verdict';
 export type { PatternVerdict, RobotPatternVerdict } from './judging/pattern-verdict';
 
 /** The verdicts on all work of a sheet: task points, paths and patterns. For one look; see makeCellJudge for many. */

@@ -1,6 +1,6 @@
 import type { Transform } from '@/lib/kinematics/transforms';
 import type { Fixture, Item, SequenceStep, TaskPath, TaskPoint } from '../items';
-import { floorPath, type FloorPath } from '../judging/path-verdict';
+import { floorPath, type FloorPath } from '../judging/floor-path';
 import { patternPlace, placeCount } from '../judging/places';
 import { poseOnFloor } from '../task-points';
 

@@ -4,7 +4,9 @@ import type { Fixture, Item, Robot } from '../items';
 import { floorTaskPoints, targetInBase } from '../task-points';
 import { assigned, standOf, type Assignment } from './assignment';
 import { makeMemory } from './memory';
-import { betterPath, floorPath, judgePath, type PathVerdict, type RobotPathVerdict } from './path-verdict';
+import { floorPath } from './floor-path';
+import type { RobotPathVerdict } from './path-run';
+import { betterPath, judgePath, type PathVerdict } from './path-verdict';
 import { betterPattern, judgePattern, type PatternVerdict, type RobotPatternVerdict } from './pattern-verdict';
 import { betterOf, judgeTarget, type RobotVerdict } from './point-verdict';
 
